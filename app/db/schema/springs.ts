@@ -1,0 +1,58 @@
+import { check, mysqlTable, smallint, unique, varchar } from "drizzle-orm/mysql-core";
+import { sql } from "drizzle-orm";
+import { asTyped, id, lengthMm, moment, ref } from "./columns";
+import { shops } from "./shop";
+
+/** A leaf spring in the rack, measured flat on the bench: eye centre to eye centre, and front eye to pin. */
+export const springs = mysqlTable(
+  "springs",
+  {
+    id: id(),
+    shopId: ref()
+      .notNull()
+      .references(() => shops.id),
+    rackNumber: smallint({ unsigned: true }).notNull(),
+    lengthMm: lengthMm().notNull(),
+    lengthTyped: asTyped().notNull(),
+    frontHalfMm: lengthMm().notNull(),
+    frontHalfTyped: asTyped().notNull(),
+    leaves: smallint({ unsigned: true }).notNull(),
+    leafWidthMm: lengthMm().notNull(),
+    leafWidthTyped: asTyped().notNull(),
+    note: varchar({ length: 120 }).notNull().default(""),
+    addedAt: moment().notNull(),
+    /** NULL: in the rack. */
+    takenOutAt: moment(),
+  },
+  (t) => [
+    unique("springs_rack_number").on(t.shopId, t.rackNumber),
+    check("springs_half", sql`${t.frontHalfMm} > 0 and ${t.frontHalfMm} < ${t.lengthMm}`),
+  ],
+);
+
+/** A spring hanger pattern: its holes lie at fixed distances from hole 1. */
+export const hangers = mysqlTable("hangers", {
+  id: id(),
+  shopId: ref()
+    .notNull()
+    .references(() => shops.id),
+  name: varchar({ length: 60 }).notNull(),
+});
+
+export const hangerHoles = mysqlTable(
+  "hanger_holes",
+  {
+    id: id(),
+    shopId: ref()
+      .notNull()
+      .references(() => shops.id),
+    hangerId: ref()
+      .notNull()
+      .references(() => hangers.id),
+    number: smallint({ unsigned: true }).notNull(),
+    /** How far ahead of hole 1; hole 1 itself is 0. */
+    aheadMm: lengthMm().notNull(),
+    aheadTyped: asTyped().notNull(),
+  },
+  (t) => [unique("hanger_holes_number").on(t.hangerId, t.number)],
+);

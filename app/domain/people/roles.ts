@@ -1,0 +1,11 @@
+/** What a person may be in the shop. A paired display is a device, not a person. */
+export const ROLES = ["owner", "foreman", "tech", "counter"] as const;
+export type Role = (typeof ROLES)[number];
+
+/** Who may ask: a person in a role, or a paired display. */
+export const ACTOR_ROLES = [...ROLES, "display"] as const;
+export type ActorRole = (typeof ACTOR_ROLES)[number];
+
+/** What a person is able to do; a stage asks for one of them. */
+export const SKILLS = ["strip", "level", "layout", "fabricate", "weld", "torque", "brakes"] as const;
+export type Skill = (typeof SKILLS)[number];

@@ -1,0 +1,19 @@
+import type { z } from "zod";
+import { Refusal } from "../services/errors";
+
+/**
+ * Reads a form by a schema. Repeated names become lists only where the schema's caller asks for them.
+ * @throws Refusal invalid, with one sentence beside each field that is wrong
+ */
+export function readForm<S extends z.ZodType>(form: FormData, schema: S, lists: readonly string[] = []): z.output<S> {
+  const raw: Record<string, unknown> = {};
+  for (const name of new Set(form.keys())) {
+    raw[name] = lists.includes(name) ? form.getAll(name).map(String) : String(form.get(name));
+  }
+  for (const name of lists) raw[name] ??= [];
+  const result = schema.safeParse(raw);
+  if (result.success) return result.data;
+  const fields: Record<string, string> = {};
+  for (const issue of result.error.issues) fields[issue.path.join(".") || "form"] ??= issue.message;
+  throw new Refusal("invalid", Object.values(fields)[0] ?? "Something typed here cannot be used.", fields);
+}

@@ -1,0 +1,22 @@
+import { redirect } from "react-router";
+import type { ActorRole } from "~/domain/people/roles";
+import { actorContext } from "~/context";
+import type { Route } from "./+types/home";
+
+/** The page each role works on. */
+const FIRST_PAGE: Record<ActorRole, string> = {
+  owner: "/floor",
+  foreman: "/floor",
+  tech: "/scan",
+  counter: "/counter",
+  display: "/wall",
+};
+
+export function loader({ context }: Route.LoaderArgs) {
+  const actor = context.get(actorContext);
+  throw redirect(actor ? FIRST_PAGE[actor.role] : "/sign-in");
+}
+
+export default function Home() {
+  return null;
+}

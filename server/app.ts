@@ -1,0 +1,117 @@
+import { randomBytes } from "node:crypto";
+import { createRequestHandler } from "@react-router/express";
+import express, { type RequestHandler } from "express";
+import { rateLimit } from "express-rate-limit";
+import helmet from "helmet";
+import pino from "pino";
+import { pinoHttp } from "pino-http";
+import { RouterContextProvider, type ServerBuild } from "react-router";
+import { appContext, nonceContext } from "../app/context";
+import { openDatabase } from "../app/db/client.server";
+import { isUpToDate } from "../app/db/migrate.server";
+import { env } from "../app/env.server";
+import { type LiveServer, startRealtime } from "../app/realtime/sockets.server";
+import { sameOrigin, socketOriginAllowed } from "./origin";
+
+type Options = { io: LiveServer; migrationsDir: string; loadBuild?: () => Promise<ServerBuild> };
+
+/** Starts with the session cookie and ends with the path: neither belongs in a log line. */
+const REDACT = ["req.headers.cookie", 'res.headers["set-cookie"]', "req.headers.authorization"];
+
+/**
+ * The bridge between the process and the application: opens the database and the live channel, and answers requests.
+ * @throws in words when the database is behind the code
+ */
+export async function createApp({ io, migrationsDir, loadBuild }: Options) {
+  const settings = env();
+  const log = pino({ level: settings.LOG_LEVEL });
+  const now = () => new Date();
+  const { db, pool } = openDatabase(settings.DATABASE_URL);
+  if (!(await isUpToDate(pool, migrationsDir))) {
+    await pool.end();
+    throw new Error("The database is behind this version of the shop. Start it with `npm start`, which brings it up to date.");
+  }
+  const realtime = startRealtime(io, { db, now, onFault: (error, what) => log.error({ err: error, what }, "live channel") });
+  const production = settings.NODE_ENV === "production";
+
+  const app = express();
+  app.disable("x-powered-by");
+  app.set("trust proxy", settings.TRUST_PROXY);
+  app.get("/healthz", async (_req, res) => {
+    try {
+      await pool.query("select 1");
+      res.json({ ok: true });
+    } catch {
+      res.status(503).json({ ok: false });
+    }
+  });
+  app.use(pinoHttp({ logger: log, redact: REDACT, customLogLevel: (_req, res, error) => (error || res.statusCode >= 500 ? "error" : "debug") }));
+  app.use((_req, res, next) => {
+    res.locals.nonce = randomBytes(16).toString("base64");
+    next();
+  });
+  app.use(securityHeaders(production, settings.COOKIE_SECURE === "1"));
+  app.use(sameOrigin);
+  app.post(
+    ["/sign-in{.data}", "/pair{.data}"],
+    rateLimit({
+      windowMs: 60_000,
+      limit: settings.SIGN_IN_PER_MINUTE,
+      standardHeaders: "draft-8",
+      legacyHeaders: false,
+      message: { message: "Too many tries from this address. Wait a minute." },
+    }),
+  );
+  app.use((_req, res, next) => {
+    // Pages are made for one person: nothing between us and them keeps a copy.
+    res.set("Cache-Control", "no-store");
+    next();
+  });
+  app.use(
+    createRequestHandler({
+      build: loadBuild ?? (() => import("virtual:react-router/server-build")),
+      mode: settings.NODE_ENV,
+      getLoadContext(_req, res) {
+        const context = new RouterContextProvider();
+        context.set(appContext, { db, publish: realtime.publish, dropSession: realtime.dropSession, now });
+        context.set(nonceContext, production ? (res.locals.nonce as string) : undefined);
+        return context;
+      },
+    }),
+  );
+
+  return {
+    handler: app as unknown as RequestHandler,
+    allowSocket: socketOriginAllowed,
+    async close() {
+      await realtime.close();
+      await pool.end();
+    },
+  };
+}
+
+function securityHeaders(production: boolean, https: boolean): RequestHandler {
+  return helmet({
+    contentSecurityPolicy: production && {
+      useDefaults: false,
+      directives: {
+        "default-src": ["'self'"],
+        // The tag reader is WebAssembly.
+        "script-src": ["'self'", "'wasm-unsafe-eval'", (_req, res) => `'nonce-${(res as express.Response).locals.nonce}'`],
+        // Dragging and drawings to scale set style attributes.
+        "style-src": ["'self'", "'unsafe-inline'"],
+        "img-src": ["'self'", "data:", "blob:"],
+        "font-src": ["'self'"],
+        "connect-src": ["'self'"],
+        "media-src": ["'self'", "blob:"],
+        "worker-src": ["'self'", "blob:"],
+        "object-src": ["'none'"],
+        "base-uri": ["'none'"],
+        "form-action": ["'self'"],
+        "frame-ancestors": ["'none'"],
+      },
+    },
+    strictTransportSecurity: https,
+    referrerPolicy: { policy: "same-origin" },
+  });
+}
