@@ -53,7 +53,7 @@ export async function createApp({ io, migrationsDir, loadBuild }: Options) {
   app.use(securityHeaders(production, settings.COOKIE_SECURE === "1"));
   app.use(sameOrigin);
   app.post(
-    ["/sign-in{.data}", "/pair{.data}"],
+    ["/sign-in{.data}", "/devices{.data}"],
     rateLimit({
       windowMs: 60_000,
       limit: settings.SIGN_IN_PER_MINUTE,

@@ -12,7 +12,7 @@ export const ACCESS: readonly { path: string; GET?: Need; POST?: Need }[] = [
   { path: "/", GET: "anyone" },
   { path: "/sign-in", GET: "anyone", POST: "anyone" },
   { path: "/sign-out", POST: "signed-in" },
-  { path: "/pair", GET: "anyone", POST: "anyone" },
+  { path: "/pair", GET: "anyone" },
 
   { path: "/floor", GET: "floor:see" },
   { path: "/floor/move-vehicle", POST: "floor:move" },

@@ -19,8 +19,10 @@ const sources = [
 export async function ensureBuild(interrupt) {
   const stamp = inProject("build", ".sources");
   const wanted = hashSources();
-  const complete = existsSync(inProject("build", "server", "index.js")) && existsSync(inProject("build", "client"));
-  if (complete && existsSync(stamp) && readFileSync(stamp, "utf8") === wanted) return say("Build", "up to date");
+  const complete =
+    existsSync(inProject("build", "server", "index.js")) && existsSync(inProject("build", "client"));
+  if (complete && existsSync(stamp) && readFileSync(stamp, "utf8") === wanted)
+    return say("Build", "up to date");
 
   say("Build", "making the production build (some seconds)");
   const began = performance.now();

@@ -17,8 +17,8 @@ import { join } from "node:path";
 import { setTimeout as wait } from "node:timers/promises";
 import * as mariadb from "./mariadb.mjs";
 import { lastLines, Problem, say } from "./output.mjs";
-import { commandLine, hasEnded, isRunning } from "./process.mjs";
 import { firstFreePort } from "./ports.mjs";
+import { commandLine, hasEnded, isRunning } from "./process.mjs";
 
 const longestSocketPath = 100; // The system cuts off at about 107 bytes.
 const patience = { start: 120_000, stop: 60_000 };
@@ -139,8 +139,7 @@ async function findRunningServer(programs, paths, secrets, interrupt) {
 
 /** Whether a process is a server of our data: after a crash its number may belong to something else. */
 function servesFolder(pid, paths) {
-  const words = commandLine(pid);
-  return words === undefined || words.includes(`--datadir=${paths.data}`);
+  return `${commandLine(pid).trim()} `.includes(` --datadir=${paths.data} `);
 }
 
 /** Waits until the server lets the app's account in and says that it serves our data. */

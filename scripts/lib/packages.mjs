@@ -10,13 +10,17 @@ import { inProject } from "./project.mjs";
  */
 export async function ensurePackages(interrupt) {
   const stamp = inProject("node_modules", ".plumbay-lock");
-  const wanted = createHash("sha256").update(readFileSync(inProject("package-lock.json"))).digest("hex");
+  const wanted = createHash("sha256")
+    .update(readFileSync(inProject("package-lock.json")))
+    .digest("hex");
   if (readIfThere(stamp) === wanted) return say("Packages", "up to date");
 
   say("Packages", "installing (about a minute)");
   const began = performance.now();
   // The build needs the development packages, whatever NODE_ENV or the npm settings say.
-  const { code, output } = await run("npm", ["ci", "--include=dev", "--no-audit", "--no-fund"], { interrupt });
+  const { code, output } = await run("npm", ["ci", "--include=dev", "--no-audit", "--no-fund"], {
+    interrupt,
+  });
   if (code !== 0) {
     throw new Problem("The packages could not be installed.", {
       details: lastLines(output),

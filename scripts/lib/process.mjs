@@ -1,4 +1,4 @@
-import { spawn } from "node:child_process";
+import { execFileSync, spawn } from "node:child_process";
 import { accessSync, constants, readFileSync } from "node:fs";
 import { delimiter, join } from "node:path";
 import { setTimeout as wait } from "node:timers/promises";
@@ -95,12 +95,14 @@ export function isRunning(pid) {
   }
 }
 
-/** The words a running process was started with; undefined where the system does not tell. */
+/** The command line of a running process; empty when the system does not tell. */
 export function commandLine(pid) {
   try {
-    return readFileSync(`/proc/${pid}/cmdline`, "utf8").split("\0");
+    if (process.platform === "linux")
+      return readFileSync(`/proc/${pid}/cmdline`, "utf8").replaceAll("\0", " ");
+    return execFileSync("ps", ["-ww", "-o", "command=", "-p", String(pid)], { encoding: "utf8" });
   } catch {
-    return undefined;
+    return "";
   }
 }
 

@@ -47,11 +47,10 @@ const groupBy = <T, K>(items: readonly T[], key: (item: T) => K): Map<K, T[]> =>
   return groups;
 };
 
-/** Runs reads that must agree with each other: one consistent snapshot. */
+/** Runs reads that must agree with each other: one consistent snapshot. (`read only` beside it is written in a way that MariaDB does not parse.) */
 export function snapshot<T>(db: Db, read: (tx: Reader) => Promise<T>): Promise<T> {
   return db.transaction(read, {
     isolationLevel: "repeatable read",
-    accessMode: "read only",
     withConsistentSnapshot: true,
   });
 }

@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, isNull } from "drizzle-orm";
+import { and, desc, eq, isNull } from "drizzle-orm";
 import type { VehicleKind } from "../../domain/builds/vehicle-kinds";
 import { type Reader, schema } from "../client.server";
 
@@ -56,14 +56,4 @@ export async function lookUpTag(tx: Reader, shopId: number, code: string): Promi
     .orderBy(desc(layouts.id))
     .limit(1);
   return { state: "here", nickname, buildId: build.id, layoutId: layout?.id ?? null };
-}
-
-/** Every tag of the shop that hangs on a vehicle, in code order. */
-export async function readHangingCodes(tx: Reader, shopId: number): Promise<string[]> {
-  const rows = await tx
-    .select({ code: tags.code })
-    .from(tags)
-    .where(and(eq(tags.shopId, shopId), isNull(tags.replacedAt)))
-    .orderBy(asc(tags.code));
-  return rows.map((row) => row.code);
 }

@@ -1,0 +1,82 @@
+/** A length in millimetres. */
+export type Millimetres = number & { readonly __unit: "millimetres" };
+/** What a number without a unit means, and what lengths are shown in. */
+export type LengthUnit = "in" | "mm";
+
+/** One inch is 25.4 mm exactly (international yard and pound agreement, 1959). */
+export const MM_PER_INCH = 25.4;
+const INCHES_PER_FOOT = 12;
+
+/** Marks a number as millimetres. @throws RangeError when it is not finite */
+export function mm(n: number): Millimetres {
+  if (!Number.isFinite(n)) throw new RangeError(`${n} is not a length`);
+  return n as Millimetres;
+}
+export const inches = (n: number): Millimetres => mm(n * MM_PER_INCH);
+export const toInches = (length: Millimetres): number => length / MM_PER_INCH;
+
+export type Denominator = 16 | 32 | 64;
+export type InchParts = { sign: "" | "−"; whole: number; numerator: number; denominator: number };
+
+const gcd = (a: number, b: number): number => (b === 0 ? a : gcd(b, a % b));
+
+/**
+ * A length as whole inches and a reduced fraction, to the nearest 1/denominator; halves away from zero.
+ * @param length millimetres
+ * @returns numerator 0 (and denominator 1) when there is no fraction; no sign on zero
+ */
+export function inchParts(length: Millimetres, denominator: number = 16): InchParts {
+  // Six decimals of an inch are far below any tape; without them 1/64 stored as a decimal could fall just short of a half.
+  const steps = Math.round(Number((Math.abs(toInches(length)) * denominator).toFixed(6)));
+  const whole = Math.floor(steps / denominator);
+  const over = steps - whole * denominator;
+  const common = over === 0 ? denominator : gcd(over, denominator);
+  return {
+    sign: length < 0 && steps > 0 ? "−" : "",
+    whole,
+    numerator: over / common,
+    denominator: denominator / common,
+  };
+}
+
+/** "26 1/2", "−1/8", "0": to the nearest 1/denominator (16 unless told), halves away from zero; with `sign` also "+1/8". */
+export function formatInches(length: Millimetres, options: { denominator?: Denominator; sign?: boolean } = {}): string {
+  const { sign, whole, numerator, denominator } = inchParts(length, options.denominator ?? 16);
+  const plus = options.sign && sign === "" && (whole > 0 || numerator > 0) ? "+" : "";
+  const fraction = numerator === 0 ? "" : `${numerator}/${denominator}`;
+  const size = whole === 0 && fraction !== "" ? fraction : fraction === "" ? String(whole) : `${whole} ${fraction}`;
+  return `${sign || plus}${size}`;
+}
+
+/** "19 ft 2 in", "18 ft", "11 1/2 in" under a foot; to the nearest inch unless a denominator is given. */
+export function formatFeet(length: Millimetres, denominator: number = 1): string {
+  const parts = inchParts(length, denominator);
+  const feet = Math.floor(parts.whole / INCHES_PER_FOOT);
+  const rest = parts.whole - feet * INCHES_PER_FOOT;
+  const fraction = parts.numerator === 0 ? "" : `${parts.numerator}/${parts.denominator}`;
+  const inchesPart = [rest === 0 && fraction !== "" ? "" : String(rest), fraction].filter((part) => part !== "").join(" ");
+  if (feet === 0) return `${parts.sign}${inchesPart} in`;
+  return rest === 0 && fraction === "" ? `${parts.sign}${feet} ft` : `${parts.sign}${feet} ft ${inchesPart} in`;
+}
+
+/** "673 mm", "12.7 mm" with one decimal. */
+export function formatMillimetres(length: Millimetres, decimals = 0): string {
+  const size = Math.abs(length).toFixed(decimals);
+  return `${length < 0 && Number(size) !== 0 ? "−" : ""}${size} mm`;
+}
+
+/** "46.50": inches with a fixed number of decimals, without the unit; a true minus sign. */
+export function formatDecimalInches(length: Millimetres, places = 2): string {
+  const size = Math.abs(toInches(length)).toFixed(places);
+  return `${length < 0 && Number(size) !== 0 ? "−" : ""}${size}`;
+}
+
+/** A length in a person's unit, with it: "26 1/2 in" or "673 mm". */
+export function formatLength(
+  length: Millimetres,
+  unit: LengthUnit,
+  options: { denominator?: Denominator; sign?: boolean; decimals?: number } = {},
+): string {
+  return unit === "in" ? `${formatInches(length, options)} in` : formatMillimetres(length, options.decimals ?? 1);
+}
+export { parseLength } from "./parse-length";

@@ -1,0 +1,7 @@
+import { answer, serviceContext } from "~/http/request.server";
+import { undoFloor } from "~/services/undo-floor.server";
+import type { Route } from "./+types/undo-floor";
+
+export async function action({ request, context }: Route.ActionArgs) {
+  return answer(await request.formData(), () => undoFloor(serviceContext(context)));
+}
