@@ -200,7 +200,7 @@ async function insertStages(tx: Tx, shopId: number, buildId: number, what: BookI
       .values({
         shopId,
         buildId,
-        position: position + 1,
+        position,
         kind: line.kind,
         hours,
         skill: SKILL_FOR_STAGE[line.kind],

@@ -3,7 +3,7 @@ import { schema, type Tx } from "../db/client.server";
 import { readStanding } from "../db/queries/board.server";
 import type { Touch } from "../db/schema";
 import { STAGE_LABEL, type StageKind } from "../domain/builds/stages";
-import { change, type Context, requirePerson } from "./change.server";
+import { type Context, change, requirePerson } from "./change.server";
 import { Refusal } from "./errors";
 
 const { builds, stages, vehicles } = schema;
@@ -41,7 +41,10 @@ export async function setStage(ctx: Context, what: StageChange): Promise<{ words
     const label = said(stage.kind);
     const standing = await readStanding(tx, shopId, what.buildId);
     if (stage.state === what.state)
-      throw new Refusal("conflict", `${label} is ${what.state === "done" ? "finished" : "under way"} already.`);
+      throw new Refusal(
+        "conflict",
+        `${label} is ${what.state === "done" ? "finished" : "under way"} already.`,
+      );
     if (what.state === "under-way") {
       const other = all.find((row) => row.state === "under-way");
       if (other) throw new Refusal("conflict", `Finish ${said(other.kind)} first: it is under way.`);

@@ -44,13 +44,20 @@ const hours = z
 const MOST_STAGES = Math.max(...BUILD_TEMPLATE_IDS.map((id) => BUILD_TEMPLATES[id].stages.length));
 const PLACES = Array.from({ length: MOST_STAGES }, (_, index) => index);
 
-type StageFields = Record<`stage-${number}`, string | undefined> & Record<`hours-${number}`, number | undefined>;
+const tick = z.string().optional();
+type StageShape = Record<`stage-${number}`, typeof tick> & Record<`hours-${number}`, typeof hours>;
+/** `stage-0`: ticked or not; `hours-0`: its hours; and so on for every stage of the chosen list. */
 const stageShape = Object.fromEntries(
   PLACES.flatMap((index) => [
-    [`stage-${index}`, z.string().optional()],
+    [`stage-${index}`, tick],
     [`hours-${index}`, hours],
   ]),
-);
+) as StageShape;
+
+/** A stage's own fields: the schema's types do not carry the numbered names. */
+type StageFields = Record<`stage-${number}`, string | undefined> & Record<`hours-${number}`, number | undefined>;
+const isTicked = (form: object, index: number) => (form as StageFields)[`stage-${index}`] !== undefined;
+const hoursOf = (form: object, index: number) => (form as StageFields)[`hours-${index}`];
 
 const isDate = (typed: string) => /^\d{4}-\d{2}-\d{2}$/.test(typed) && !Number.isNaN(Date.parse(`${typed}T00:00:00Z`));
 const isTime = (typed: string) => /^([01]\d|2[0-3]):[0-5]\d/.test(typed);
@@ -100,13 +107,12 @@ export const bookInForm = (unit: LengthUnit) =>
       path: ["promiseDate"],
       message: "On which day? There is a time but no date.",
     })
-    .refine((form) => PLACES.some((index) => (form as StageFields)[`stage-${index}`] !== undefined), {
+    .refine((form) => PLACES.some((index) => isTicked(form, index)), {
       ...always,
       path: ["template"],
       message: "Leave at least one stage ticked.",
     })
     .transform((form) => {
-      const fields = form as typeof form & StageFields;
       const template = BUILD_TEMPLATES[form.template].stages;
       const id = Number(form.customerId);
       return {
@@ -129,7 +135,7 @@ export const bookInForm = (unit: LengthUnit) =>
         promise: form.promiseDate === "" ? null : { date: form.promiseDate, time: form.promiseTime || PROMISE_TIME },
         template: form.template,
         stages: template.flatMap((line, index) =>
-          fields[`stage-${index}`] === undefined ? [] : [{ index, hours: fields[`hours-${index}`] ?? line.hours }],
+          isTicked(form, index) ? [{ index, hours: hoursOf(form, index) ?? line.hours }] : [],
         ),
       };
     });

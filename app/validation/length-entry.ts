@@ -17,31 +17,39 @@ function inWords(length: number, unit: LengthUnit): string {
   return unit === "in" && length >= IN_FEET_FROM_MM ? formatFeet(value) : formatLength(value, unit, { decimals: 0 });
 }
 
+/** What is wrong with an entry, in a sentence; null when it will do. */
+function faultOf(typed: string, unit: LengthUnit, { least, most, what }: LengthRange): string | null {
+  const read = parseLength(typed, unit);
+  if (!read.ok) return read.problem;
+  if (read.value >= least && read.value <= most) return null;
+  return `This reads ${inWords(read.value, unit)}. ${what} between ${inWords(least, unit)} and ${inWords(most, unit)}.`;
+}
+
+function valueOf(typed: string, unit: LengthUnit): TypedLength {
+  const read = parseLength(typed, unit);
+  return { mm: read.ok ? read.value : mm(0), typed };
+}
+
+const entry = () => z.string({ error: "Type the length as on the tape." }).trim().max(LONGEST_ENTRY, "That is too long for a length.");
+
 /**
  * A length as typed on the tape, within what can be.
  * @param unit what a bare number means
  */
-export const lengthEntry = (unit: LengthUnit, { least, most, what }: LengthRange) =>
-  z
-    .string({ error: "Type the length as on the tape." })
-    .trim()
-    .max(LONGEST_ENTRY, "That is too long for a length.")
-    .transform((typed, ctx): TypedLength => {
-      const read = parseLength(typed, unit);
-      const fault = read.ok
-        ? read.value < least || read.value > most
-          ? `This reads ${inWords(read.value, unit)}. ${what} between ${inWords(least, unit)} and ${inWords(most, unit)}.`
-          : null
-        : read.problem;
-      if (fault !== null) ctx.addIssue({ code: "custom", message: fault });
-      return { mm: read.ok ? read.value : mm(0), typed };
-    });
+export const lengthEntry = (unit: LengthUnit, range: LengthRange) =>
+  entry().transform((typed, ctx): TypedLength => {
+    const message = faultOf(typed, unit, range);
+    if (message !== null) ctx.addIssue({ code: "custom", message });
+    return valueOf(typed, unit);
+  });
 
 /** The same, where nothing typed means that it was not given. */
 export const optionalLength = (unit: LengthUnit, range: LengthRange) =>
-  z
-    .string()
-    .trim()
-    .optional()
-    .transform((typed) => (typed ? typed : null))
-    .pipe(z.union([z.null(), lengthEntry(unit, range)]));
+  entry()
+    .default("")
+    .transform((typed, ctx): TypedLength | null => {
+      if (typed === "") return null;
+      const message = faultOf(typed, unit, range);
+      if (message !== null) ctx.addIssue({ code: "custom", message });
+      return valueOf(typed, unit);
+    });

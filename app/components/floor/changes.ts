@@ -11,7 +11,8 @@ function wordsFor(was: Standing | undefined, is: Standing, me: string): string |
   if (!was) return "Booked in, now";
   if (was.vehicle.placementId !== vehicle.placementId)
     return vehicle.movedBy === me ? null : `Moved by ${firstName(vehicle.movedBy)}, now`;
-  if (was.vehicle.hold?.id !== vehicle.hold?.id) return vehicle.hold ? "Put on hold, now" : "Hold lifted, now";
+  if (was.vehicle.hold?.id !== vehicle.hold?.id)
+    return vehicle.hold ? "Put on hold, now" : "Hold lifted, now";
   if (was.vehicle.level.state !== vehicle.level.state)
     return vehicle.level.state === "void" ? "Level void, now" : "Level checked, now";
   if (was.vehicle.stage?.id !== vehicle.stage?.id || was.vehicle.stage?.state !== vehicle.stage?.state)

@@ -7,7 +7,8 @@ import type { Board, BoardBay } from "../../domain/floor/board";
  */
 
 const FT_MM = 304.8;
-export const feet = (lengthMm: number): number => lengthMm / FT_MM;
+/** Feet to a tenth of a thousandth: finer than any drawing. */
+export const feet = (lengthMm: number): number => Math.round((lengthMm / FT_MM) * 1e4) / 1e4;
 
 export type Box = { x: number; y: number; w: number; h: number };
 
@@ -123,6 +124,8 @@ export function nextStop(stops: readonly Stop[], from: string | null, step: Step
   const side = step === "right" ? 1 : -1;
   const there = stops
     .filter((stop) => (stop.x - here.x) * side > Math.abs(stop.y - here.y) * 0.25 + 20)
-    .sort((a, b) => Math.hypot(a.x - here.x, 2 * (a.y - here.y)) - Math.hypot(b.x - here.x, 2 * (b.y - here.y)));
+    .sort(
+      (a, b) => Math.hypot(a.x - here.x, 2 * (a.y - here.y)) - Math.hypot(b.x - here.x, 2 * (b.y - here.y)),
+    );
   return there[0] ?? here;
 }

@@ -1,11 +1,12 @@
+import { HOLD_LABEL } from "../../domain/builds/stages";
 import type { Board, BoardBay, BoardVehicle } from "../../domain/floor/board";
 import { vehiclesOn } from "../../domain/floor/board";
-import { HOLD_LABEL } from "../../domain/builds/stages";
+import type { SignName } from "../../ui/signs";
 import { whenInWords } from "../time";
 
 export type Need = {
   buildId: number;
-  sign: string;
+  sign: SignName;
   tone: "stop" | "ask";
   title: string;
   words: string;

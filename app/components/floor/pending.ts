@@ -43,11 +43,19 @@ function movedPerson(board: Board, personId: number, toBuildId: number | null): 
   const crewOf = (vehicle: BoardVehicle): BoardVehicle => {
     const others = vehicle.crew.filter((one) => one.personId !== personId);
     if (vehicle.buildId === toBuildId)
-      return { ...vehicle, crew: [...others, { personId, name: person.name, initials: person.initials, since }] };
+      return {
+        ...vehicle,
+        crew: [...others, { personId, name: person.name, initials: person.initials, since }],
+      };
     return others.length === vehicle.crew.length ? vehicle : { ...vehicle, crew: others };
   };
   const on: CrewCard["on"] = target
-    ? { buildId: target.vehicle.buildId, nickname: target.vehicle.nickname, bayNumber: target.bay?.number ?? null, since }
+    ? {
+        buildId: target.vehicle.buildId,
+        nickname: target.vehicle.nickname,
+        bayNumber: target.bay?.number ?? null,
+        since,
+      }
     : null;
   return {
     ...board,

@@ -3,13 +3,15 @@ import { BAY_KIND_LABEL } from "../../domain/floor/bays";
 import type { BoardBay, BoardLevel, BoardVehicle, CrewCard } from "../../domain/floor/board";
 import { type Check, type Reason, type Verdict, wouldVoid } from "../../domain/floor/move-check";
 import { formatFeet, mm } from "../../domain/units/length";
+import type { SignName } from "../../ui/signs";
 import { ageInWords } from "../time";
 
 /** A place on the floor as a target: a bay by its id, or the yard (vehicles), or nowhere (people: free). */
 export type PlaceKey = number | "yard" | "free";
 
 export const bayName = (bay: BoardBay | null) => (bay ? `Bay ${bay.number}` : "the yard");
-export const bayTitle = (bay: BoardBay) => `Bay ${bay.number}, ${BAY_KIND_LABEL[bay.kind]}, ${formatFeet(mm(bay.lengthMm))}`;
+export const bayTitle = (bay: BoardBay) =>
+  `Bay ${bay.number}, ${BAY_KIND_LABEL[bay.kind]}, ${formatFeet(mm(bay.lengthMm))}`;
 export const firstName = (name: string) => name.split(" ")[0] ?? name;
 
 export const VERDICT_WORDS: Record<Verdict, string> = {
@@ -34,7 +36,7 @@ export function mouthWord(check: Check): string {
   return (first && SHORT[first.rule]) ?? VERDICT_WORDS.refuses;
 }
 
-const RULE_SIGN: Record<Reason["rule"], string> = {
+const RULE_SIGN: Record<Reason["rule"], SignName> = {
   taken: "vehicle",
   "too-long": "vehicle",
   "too-wide": "vehicle",
@@ -50,7 +52,7 @@ const RULE_SIGN: Record<Reason["rule"], string> = {
 };
 export const ruleSign = (rule: Reason["rule"]) => RULE_SIGN[rule];
 
-export const VERDICT_SIGN: Record<Verdict, string> = { takes: "bay", asks: "question", refuses: "hold" };
+export const VERDICT_SIGN: Record<Verdict, SignName> = { takes: "bay", asks: "question", refuses: "hold" };
 
 /** The level's state in words; null when none was taken. */
 export function levelWords(level: BoardLevel, now: string): string | null {
@@ -116,7 +118,9 @@ export function moveQuestion(
   now: string,
 ): Question {
   const { level } = vehicle;
-  const others = check.reasons.filter((reason) => reason.rule !== "voids-level").map((reason) => reason.words);
+  const others = check.reasons
+    .filter((reason) => reason.rule !== "voids-level")
+    .map((reason) => reason.words);
   const lost = wouldVoid(vehicle);
   const loss = [...others];
   if (lost && level.state !== "none" && level.state !== "void") {

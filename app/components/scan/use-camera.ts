@@ -7,13 +7,19 @@ import { type RefObject, useCallback, useEffect, useRef, useState } from "react"
  *   refused    the person or the browser said no
  *   none       there is no camera, or another program holds it
  *   insecure   browsers lend a camera to https pages only
+ *   fault      the reader could not be fetched or fell over
  */
-export type CameraState = "off" | "asking" | "reading" | "refused" | "none" | "insecure";
+export type CameraState = "off" | "asking" | "reading" | "refused" | "none" | "insecure" | "fault";
 
 const BETWEEN_LOOKS_MS = 120;
 
-const stateOf = (error: unknown): CameraState =>
-  error instanceof DOMException && (error.name === "NotAllowedError" || error.name === "SecurityError") ? "refused" : "none";
+const NO_CAMERA = ["NotFoundError", "NotReadableError", "OverconstrainedError", "AbortError"];
+
+function stateOf(error: unknown): CameraState {
+  if (!(error instanceof DOMException)) return "fault";
+  if (error.name === "NotAllowedError" || error.name === "SecurityError") return "refused";
+  return NO_CAMERA.includes(error.name) ? "none" : "fault";
+}
 
 async function isGranted(): Promise<boolean> {
   try {

@@ -1,7 +1,7 @@
 import { STAGE_LABEL } from "../builds/stages";
 import type { Skill } from "../people/roles";
 import { formatFeet, mm } from "../units/length";
-import { BAY_KIND_LABEL, type BayKind } from "./bays";
+import type { BayKind } from "./bays";
 import type { BayCard, BoardBay, BoardVehicle, CrewCard } from "./board";
 
 /** `takes`: nothing against it. `asks`: possible, but it costs something. `refuses`: it will not go. */
@@ -96,7 +96,7 @@ export function checkMove(vehicle: BoardVehicle, from: BoardBay | null, to: BayC
       reasons.push({
         rule: "bay-kind",
         verdict: "asks",
-        words: `${STAGE_LABEL[stage.kind]} needs ${needed}; Bay ${bay.number} is ${BAY_KIND_LABEL[bay.kind].toLowerCase()}.`,
+        words: `${STAGE_LABEL[stage.kind]} needs ${needed}; Bay ${bay.number} is ${KIND_WORDS[bay.kind]}.`,
       });
     } else if (stage && (stage.kind === "level" || stage.kind === "layout") && !bay.ratedForLayout)
       reasons.push({

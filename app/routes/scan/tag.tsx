@@ -30,7 +30,7 @@ export async function loader({ params, context }: Route.LoaderArgs) {
 export default function Tag({ loaderData }: Route.ComponentProps) {
   return (
     <Shell shell={loaderData.shell}>
-      <NoSuchTag typed={loaderData.typed} why={loaderData.why} timeZone={loaderData.shell.timeZone} now={loaderData.shell.now} />
+      <NoSuchTag typed={loaderData.typed} why={loaderData.why} timeZone={loaderData.shell.timeZone} />
     </Shell>
   );
 }

@@ -1,0 +1,32 @@
+import { type StepFacts, type StepId, whyShut } from "../../domain/layout/steps";
+import type { LayoutView } from "../../domain/layout/view";
+
+/** What the steps depend on, as a layout's screens know it. */
+export function factsOf(view: LayoutView): StepFacts {
+  const { level, standsInBay, bay } = view;
+  const needed = view.drops.filter((drop) => drop.needed);
+  const moved = level !== null && level.state !== "void" && !standsInBay;
+  return {
+    standsAcknowledged: view.stands !== null,
+    level: moved ? "void" : (level?.state ?? "none"),
+    levelVoidReason: moved ? `the vehicle is not in Bay ${bay.number}` : (level?.voided?.reason ?? null),
+    redropWanted: level?.redrop.state === "wanted",
+    marksConfirmed: view.marks !== null,
+    dropsKept: needed.filter((drop) => drop.reading?.stands && !drop.reading.suspect).length,
+    dropsNeeded: needed.length,
+    dropsSuspect: view.drops.filter((drop) => drop.reading?.suspect).length,
+    axleLineChosen: view.axle !== null,
+    optionsKnown: view.options !== null,
+    optionChosen: view.choice !== null,
+    approval: view.approval?.state ?? "none",
+  };
+}
+
+/** Why a step of this layout may not be worked on, in words; null when it may. */
+export const whyShutIn = (view: LayoutView, step: StepId): string | null => whyShut(step, factsOf(view));
+
+/** The step that opens a shut one: the first before it that is not done. */
+export function wayBack(view: LayoutView, step: StepId): { id: StepId; label: string } | null {
+  const before = view.steps.slice(0, view.steps.findIndex((one) => one.id === step));
+  return before.find((one) => one.state !== "done" && one.state !== "later" && whyShutIn(view, one.id) === null) ?? null;
+}

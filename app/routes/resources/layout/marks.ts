@@ -1,0 +1,1 @@
+export const action = () => Response.json({ message: "Not built yet" }, { status: 501 });
