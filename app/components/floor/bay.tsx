@@ -36,6 +36,7 @@ export function Bay({ card }: { card: BayCard }) {
       aria-label={bayTitle(bay)}
       data-place={bay.id}
       data-mouth={bay.mouth}
+      data-kind={bay.kind}
       {...place.data}
     >
       <span className="bay-no" aria-hidden="true">

@@ -19,9 +19,11 @@ describe("bays on the plan", () => {
   });
 
   it("stands a vehicle that is too long against the closed end", () => {
-    expect(noseInset(18 * FT, 19.17 * FT)).toBe(0);
-    expect(noseInset(20 * FT, 19 * FT)).toBeCloseTo(0.5);
-    expect(noseInset(40 * FT, 12 * FT)).toBe(2.2);
+    expect(noseInset(-1.17)).toBe(0);
+    expect(noseInset(0.6)).toBeCloseTo(0.3);
+    expect(noseInset(5)).toBe(0.5);
+    expect(noseInset(6)).toBeCloseTo(1.2);
+    expect(noseInset(20)).toBe(2.2);
   });
 
   it("draws B deeper in the bay than A, whichever way the bay opens", () => {

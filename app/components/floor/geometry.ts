@@ -54,10 +54,17 @@ export function aisleOf(board: Board): { x: number; w: number } | null {
   return to - from >= 6 ? { x: from, w: to - from } : null;
 }
 
-/** How far from a bay's closed end a vehicle is drawn, so that it stands nose in with a walk round it. Feet. */
-export function noseInset(bayLengthMm: number, vehicleLengthMm: number): number {
-  const spare = feet(bayLengthMm - vehicleLengthMm);
-  return Math.max(0, Math.min(2.2, spare / 2));
+/** A walk round the nose, and room at the mouth for the bay's number. Feet. */
+const WALK_FT = 2.2;
+const NUMBER_FT = 4.8;
+
+/**
+ * How far from a bay's closed end a vehicle is drawn: nose in with a walk round it where there is room, closer where
+ * the number would be covered, against the end when it is too long.
+ * @param spare how much longer the bay is than the vehicle, in feet; negative when it is shorter
+ */
+export function noseInset(spare: number): number {
+  return Math.max(0, Math.min(WALK_FT, Math.max(spare - NUMBER_FT, Math.min(0.5, spare / 2))));
 }
 
 /** Three painted sides, open at the mouth, as an SVG path. */

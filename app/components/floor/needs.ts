@@ -1,4 +1,4 @@
-import { HOLD_LABEL } from "../../domain/builds/stages";
+import type { HoldKind } from "../../domain/builds/stages";
 import type { Board, BoardBay, BoardVehicle } from "../../domain/floor/board";
 import { vehiclesOn } from "../../domain/floor/board";
 import type { SignName } from "../../ui/signs";
@@ -12,6 +12,13 @@ export type Need = {
   words: string;
   /** Since when it waits. */
   since: string;
+};
+
+const WAITS_FOR: Record<HoldKind, string> = {
+  parts: "parts",
+  customer: "customer",
+  "level-void": "level void",
+  safety: "safety",
 };
 
 function needOf(vehicle: BoardVehicle, bay: BoardBay | null, now: string, timeZone: string): Need | null {
@@ -33,7 +40,7 @@ function needOf(vehicle: BoardVehicle, bay: BoardBay | null, now: string, timeZo
       buildId,
       sign: asks ? "question" : "hold",
       tone: asks ? "ask" : "stop",
-      title: `${nickname}, ${HOLD_LABEL[hold.kind].toLowerCase()}`,
+      title: `${nickname}, ${WAITS_FOR[hold.kind]}`,
       words: `${where}: ${hold.words}${due}`,
       since: hold.placedAt,
     };

@@ -2,6 +2,13 @@ import type { BayCard, Board } from "../../domain/floor/board";
 import { aisleOf, type Box, bayBox, markPoint, type PlanExtent, paintPath } from "./geometry";
 
 const JOINT_FT = 13;
+/** Grains of the slab within one field between joints: strewn, yet the same on the server and in the browser. */
+const GRAIN = Array.from({ length: 14 }, (_, i) => [
+  Math.round(((i * 7.31 + 1.7) % JOINT_FT) * 100) / 100,
+  Math.round(((i * 4.93 + (i % 3) * 2.2) % JOINT_FT) * 100) / 100,
+  0.03 + (i % 4) * 0.008,
+]);
+
 const steps = (to: number) =>
   Array.from({ length: Math.max(0, Math.ceil(to / JOINT_FT) - 1) }, (_, i) => (i + 1) * JOINT_FT);
 
@@ -15,7 +22,15 @@ export function Slab({ board, extent }: { board: Board; extent: PlanExtent }) {
       preserveAspectRatio="none"
       aria-hidden="true"
     >
+      <defs>
+        <pattern id="slab-grain" width={JOINT_FT} height={JOINT_FT} patternUnits="userSpaceOnUse">
+          {GRAIN.map(([x, y, r]) => (
+            <circle key={x} cx={x} cy={y} r={r} className="fill-concrete-300" opacity=".8" />
+          ))}
+        </pattern>
+      </defs>
       <rect width={building.w} height={building.h} className="fill-concrete-200" />
+      <rect width={building.w} height={building.h} fill="url(#slab-grain)" />
       <g stroke="#cfcbc2" strokeWidth="1">
         {steps(building.w).map((x) => (
           <path key={x} d={`M${x} 0V${building.h}`} />
@@ -24,10 +39,10 @@ export function Slab({ board, extent }: { board: Board; extent: PlanExtent }) {
           <path key={y} d={`M0 ${y}H${building.w}`} />
         ))}
       </g>
-      <Walls board={board} building={building} />
       {board.bays.map((card) => (
         <BayGround key={card.bay.id} card={card} />
       ))}
+      <Walls board={board} building={building} />
     </svg>
   );
 }
@@ -100,11 +115,11 @@ function Lift({ box }: { box: Box }) {
 /** Weld curtains hang in folds along both sides. */
 function Curtains({ box }: { box: Box }) {
   const folds = Math.floor((box.w - 2.4) / 0.92);
-  const fold = "q.23 -.38 .46 0t.46 0".repeat(Math.max(0, folds));
+  const fold = "q.23 -.3 .46 0t.46 0".repeat(Math.max(0, folds));
   return (
     <g fill="none" stroke="#a9a59a" strokeWidth="1.4">
-      <path d={`M${box.x + 0.8} ${box.y + 0.85}${fold}`} />
-      <path d={`M${box.x + 0.8} ${box.y + box.h - 0.85}${fold}`} />
+      <path d={`M${box.x + 0.8} ${box.y + 0.62}${fold}`} />
+      <path d={`M${box.x + 0.8} ${box.y + box.h - 0.55}${fold}`} />
     </g>
   );
 }

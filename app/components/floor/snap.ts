@@ -1,4 +1,5 @@
 import type { Modifier } from "@dnd-kit/core";
+import { noseInset } from "./geometry";
 import type { PlaceKey } from "./words";
 
 /** Where a vehicle would stand in a place, on the screen; null where several stand, or where one stands already. */
@@ -14,7 +15,7 @@ function standIn(place: PlaceKey, width: number, height: number): { left: number
   const mouth = bay.dataset.mouth;
   if (mouth !== "east" && mouth !== "west") return null;
   const ft = Number.parseFloat(getComputedStyle(bay).getPropertyValue("--ft"));
-  const inset = Math.max(0, Math.min(2.2 * ft, (edge.width - width) / 2));
+  const inset = noseInset((edge.width - width) / ft) * ft;
   return {
     left: mouth === "east" ? edge.left + inset : edge.right - inset - width,
     top: box.top + (box.height - height) / 2,

@@ -18,7 +18,7 @@ export function vehicleStyle(vehicle: BoardVehicle, bay: BoardBay | null): CSSPr
   return {
     "--vl": feet(vehicle.lengthMm),
     "--vw": feet(vehicle.widthMm),
-    "--inset": bay ? noseInset(bay.lengthMm, vehicle.lengthMm) : 0,
+    "--inset": bay ? noseInset(feet(bay.lengthMm - vehicle.lengthMm)) : 0,
     "--turn": `${bay ? NOSE_TURN[bay.mouth] : 0}deg`,
   } as CSSProperties;
 }

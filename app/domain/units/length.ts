@@ -1,19 +1,10 @@
-/** A length in millimetres. */
-export type Millimetres = number & { readonly __unit: "millimetres" };
-/** What a number without a unit means, and what lengths are shown in. */
-export type LengthUnit = "in" | "mm";
+import { type LengthUnit, type Millimetres, toInches } from "./millimetres";
 
-/** One inch is 25.4 mm exactly (international yard and pound agreement, 1959). */
-export const MM_PER_INCH = 25.4;
+export { inches, type LengthUnit, MM_PER_INCH, type Millimetres, mm, toInches } from "./millimetres";
+export { parseLength } from "./parse-length";
+
 const INCHES_PER_FOOT = 12;
 
-/** Marks a number as millimetres. @throws RangeError when it is not finite */
-export function mm(n: number): Millimetres {
-  if (!Number.isFinite(n)) throw new RangeError(`${n} is not a length`);
-  return n as Millimetres;
-}
-export const inches = (n: number): Millimetres => mm(n * MM_PER_INCH);
-export const toInches = (length: Millimetres): number => length / MM_PER_INCH;
 
 export type Denominator = 16 | 32 | 64;
 export type InchParts = { sign: "" | "−"; whole: number; numerator: number; denominator: number };
@@ -79,4 +70,3 @@ export function formatLength(
 ): string {
   return unit === "in" ? `${formatInches(length, options)} in` : formatMillimetres(length, options.decimals ?? 1);
 }
-export { parseLength } from "./parse-length";

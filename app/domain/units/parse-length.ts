@@ -1,5 +1,5 @@
 import { type Outcome, ok, problem } from "../outcome";
-import { inches, type LengthUnit, type Millimetres, mm } from "./length";
+import { inches, type LengthUnit, type Millimetres, mm } from "./millimetres";
 
 const EXAMPLE = "for example 26 1/2";
 /** Nothing in a shop is longer; a longer number is a slip of the finger. */

@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { inches, toInches } from "../../../domain/units/length";
+import { formatInches, inches } from "../../../domain/units/length";
 import { acrossOf, extrasIn, firstTexts, heightsNow, nextUnread, placesOf, postedHeights } from "./heights";
 
 const places = placesOf(0);
@@ -27,11 +27,11 @@ describe("a level by the heights that are typed", () => {
     expect(now.missing).toBeNull();
     expect(now.level?.rightHigh).toBeCloseTo(0.6, 2);
     expect(now.level?.noseHigh).toBeCloseTo(0.1, 2);
-    expect([...now.moves].map(([id, raise]) => [id, toInches(raise)])).toEqual([
-      ["left-front", 0.3125],
-      ["right-front", 0],
-      ["left-rear", 0.5],
-      ["right-rear", 0.1875],
+    expect([...now.moves].map(([id, raise]) => [id, formatInches(raise)])).toEqual([
+      ["left-front", "5/16"],
+      ["right-front", "0"],
+      ["left-rear", "1/2"],
+      ["right-rear", "3/16"],
     ]);
     expect(Math.abs(now.after?.rightHigh ?? 1)).toBeLessThan(0.005);
   });
