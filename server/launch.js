@@ -30,11 +30,6 @@ const io = new Server(http, {
   destroyUpgrade: !development,
   allowRequest: (req, callback) => callback(null, allowSocket(req)),
 });
-// The first request of each socket would otherwise be kept in memory as long as the socket lives.
-io.engine.on("connection", (socket) => {
-  socket.request = null;
-});
-
 let shop;
 let vite;
 if (development) {

@@ -137,17 +137,17 @@ function Fields({ customers, unit, typed, faults, busy }: FieldsProps) {
           <TextAreaField label="In the customer's words" name="wanted" rows={4} maxLength={2000} defaultValue={typed.wanted} error={faults.wanted} />
           <Sizes typed={typed} faults={faults} unit={unit} />
         </Part>
+        <Part title="Promise">
+          <div className="grid gap-4 sm:grid-cols-2">
+            <Field label="Promised for" name="promiseDate" type="date" defaultValue={typed.promiseDate} error={faults.promiseDate} hint="Empty: no promise." />
+            <Field label="Time" name="promiseTime" type="time" defaultValue={typed.promiseTime} error={faults.promiseTime} hint={`Empty: ${PROMISE_TIME}.`} />
+          </div>
+        </Part>
       </div>
       <div className="grid gap-8">
         <VehiclePreview {...{ kind, nickname, length, width, unit }} />
         <Part title="Stages">
           <StagePick typed={typed} faults={faults} />
-        </Part>
-        <Part title="Promise">
-          <div className="grid grid-cols-2 gap-4">
-            <Field label="Promised for" name="promiseDate" type="date" defaultValue={typed.promiseDate} error={faults.promiseDate} hint="Empty: no promise." />
-            <Field label="Time" name="promiseTime" type="time" defaultValue={typed.promiseTime} error={faults.promiseTime} hint={`Empty: ${PROMISE_TIME}.`} />
-          </div>
         </Part>
         <div className="flex flex-wrap gap-3">
           <Button tone="go" size="l" type="submit" busy={busy}>

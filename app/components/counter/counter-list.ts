@@ -100,5 +100,8 @@ export function countShows(rows: readonly CounterRow[], now: string): Record<Cou
 }
 
 /** The stage in words. */
-export const stageWords = (stage: CounterRow["stage"]) =>
-  stage === null ? "All done" : `${STAGE_LABEL[stage.kind]}${stage.state === "under-way" ? ", under way" : ", next"}`;
+export function stageWords(stage: CounterRow["stage"]): string {
+  if (stage === null) return "All done";
+  if (stage.kind === "hand-over") return stage.state === "under-way" ? "Ready to go" : "Hand-over next";
+  return `${STAGE_LABEL[stage.kind]}${stage.state === "under-way" ? ", under way" : ", next"}`;
+}

@@ -6,6 +6,7 @@ import { Sign } from "../../ui/sign";
 import { Tape } from "../../ui/tape";
 import { SortHead } from "./sort-head";
 import { spanInWords, whenInWords } from "../time";
+import { VehiclePlan } from "../vehicle-plan";
 import {
   COUNTER_SHOWS,
   type CounterQuery,
@@ -19,7 +20,9 @@ import {
   stageWords,
 } from "./counter-list";
 
-type Row = CounterRow & { buildId: number; kind: VehicleKind };
+type Row = CounterRow & { buildId: number; kind: VehicleKind; lengthMm: number; widthMm: number };
+/** Pixels a millimetre: every vehicle of the list is drawn to one scale. */
+const LIST_SCALE = 0.0165;
 type Props = {
   rows: Row[];
   query: CounterQuery;
@@ -153,7 +156,14 @@ function BuildLine({ row, now, timeZone }: { row: Row; now: string; timeZone: st
           <Tape name={row.nickname} code={row.code} />
         </Link>
       </td>
-      <td className={`${CELL} text-concrete-700`}>{VEHICLE_KIND[row.kind].label}</td>
+      <td className={`${CELL} text-concrete-700`}>
+        <span className="flex items-center gap-4">
+          <span className="hidden w-28 xl:block">
+            <VehiclePlan kind={row.kind} lengthMm={row.lengthMm} widthMm={row.widthMm} scale={LIST_SCALE} />
+          </span>
+          {VEHICLE_KIND[row.kind].label}
+        </span>
+      </td>
       <td className={CELL}>{row.customer}</td>
       <td className={CELL}>
         {stageWords(row.stage)}
@@ -177,6 +187,7 @@ function PromiseCell({ row, now, timeZone }: { row: Row; now: string; timeZone: 
   const away = Math.abs(Date.parse(row.promisedAt) - Date.parse(now));
   return (
     <>
+      <span className="text-concrete-700 md:hidden">Promised </span>
       <time dateTime={row.promisedAt} className={late ? "font-semibold" : ""}>
         {whenInWords(row.promisedAt, now, timeZone)}
       </time>

@@ -17,7 +17,7 @@ export function SortHead({
   return (
     <th scope="col" aria-sort={sorted} className={`whitespace-nowrap pr-4 ${side}`}>
       {state === "none" ? (
-        <span className="label">{label}</span>
+        <span className="label inline-flex min-h-11 items-center">{label}</span>
       ) : (
         <Link
           to={to}
@@ -26,11 +26,11 @@ export function SortHead({
           className={`label inline-flex min-h-11 items-center gap-1 hover:text-ink ${sorted ? "text-ink" : ""}`}
         >
           {label}
-          <svg viewBox="0 0 10 12" className="h-3 w-2.5" aria-hidden="true">
-            {sorted ? (
+          {sorted ? (
+            <svg viewBox="0 0 10 12" className={`h-3 w-2.5 ${numeric ? "order-first" : ""}`} aria-hidden="true">
               <path d={state === "up" ? "M5 1l4 5H6v5H4V6H1z" : "M5 11L1 6h3V1h2v5h3z"} fill="currentColor" />
-            ) : null}
-          </svg>
+            </svg>
+          ) : null}
         </Link>
       )}
     </th>

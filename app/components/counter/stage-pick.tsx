@@ -51,6 +51,7 @@ export function StagePick({ typed, faults }: { typed: Record<string, string>; fa
           <StageRow
             key={stage.kind}
             stage={stage}
+            begins={stage.stay !== null && stages[index - 1]?.stay !== stage.stay}
             index={index}
             line={lines[index] ?? { ticked: true, hours: "" }}
             fault={faults[`hours-${index}`]}
@@ -68,20 +69,26 @@ export function StagePick({ typed, faults }: { typed: Record<string, string>; fa
   );
 }
 
-function needs(stage: StageTemplate): string {
-  const where = stage.bayKinds.map((kind) => BAY_KIND_LABEL[kind].toLowerCase()).join(" or ");
+const inAnyOf = (words: string[]) =>
+  words.length < 2 ? words.join("") : `${words.slice(0, -1).join(", ")} or ${words[words.length - 1]}`;
+
+function needs(stage: StageTemplate, begins: boolean): string {
+  const where = inAnyOf(stage.bayKinds.map((kind) => BAY_KIND_LABEL[kind].toLowerCase()));
   const heads = stage.heads > 1 ? `${stage.heads} people` : "";
-  return [where, heads, stage.stay ? "not moved in between" : ""].filter(Boolean).join(", ");
+  return [where, heads, begins ? "from here on it is not moved" : ""].filter(Boolean).join("; ");
 }
 
 function StageRow({
   stage,
+  begins,
   index,
   line,
   fault,
   change,
 }: {
   stage: StageTemplate;
+  /** An unbroken stay begins with this stage. */
+  begins: boolean;
   index: number;
   line: Line;
   fault: string | undefined;
@@ -90,7 +97,7 @@ function StageRow({
   const label = STAGE_LABEL[stage.kind];
   const faultId = `hours-${index}-fault`;
   return (
-    <li className="border-concrete-200 border-b">
+    <li className={`border-concrete-200 border-b border-l-4 pl-2 ${stage.stay ? "border-l-brass" : "border-l-transparent"}`}>
       <div className="flex min-h-12 items-center gap-3">
         <label className={`flex min-h-12 min-w-0 grow cursor-pointer items-center gap-3 ${line.ticked ? "" : "text-concrete-500"}`}>
           <input
@@ -104,7 +111,7 @@ function StageRow({
           <Sign name={stageSign(stage.kind)} size={20} />
           <span className="min-w-0">
             <span className={line.ticked ? "font-semibold" : "line-through"}>{label}</span>{" "}
-            <span className="text-[15px] text-concrete-500">{needs(stage)}</span>
+            <span className="text-[15px] text-concrete-500">{needs(stage, begins)}</span>
           </span>
         </label>
         <span className="flex shrink-0 items-center gap-1.5">

@@ -66,7 +66,7 @@ export function SignInPage({
         <p className="max-w-md text-concrete-700">
           {demoShop ? (
             <>
-              <b className="font-semibold text-ink">Demo shop.</b> {demoShop} is made up: <code className="font-semibold">npm start</code>{" "}
+              <b className="font-semibold text-ink">Demo shop.</b> {demoShop} is made up: <b className="font-semibold text-ink">npm start</b>{" "}
               printed its sign-ins where it was started.
             </>
           ) : (

@@ -17,9 +17,10 @@ export function Hangers({ hangers, unit }: { hangers: readonly HangerCard[]; uni
             <p className="font-semibold">{hanger.name}</p>
             <HolePlate holes={hanger.holes} longestMm={longest} />
             <p className="text-concrete-700">
+              {hanger.holes.length} {hanger.holes.length === 1 ? "hole" : "holes"}
               {hanger.holes
-                .map((hole) => (hole.aheadMm === 0 ? `Hole ${hole.number}` : `${hole.number}: ${formatLength(mm(hole.aheadMm), unit, { denominator: 32 })} ahead`))
-                .join(", ")}
+                .filter((hole) => hole.aheadMm !== 0)
+                .map((hole) => `; ${hole.number} is ${formatLength(mm(hole.aheadMm), unit, { denominator: 32 })} ahead`)}
             </p>
           </li>
         ))}

@@ -1,6 +1,6 @@
 const EYE_MM = 26;
 const LEAF_MM = 13;
-const HEIGHT_MM = 250;
+const HEIGHT_MM = 214;
 
 /**
  * A leaf spring lying flat, seen from the side, nose to the right, to the scale of the longest in the rack. The shorter
@@ -25,7 +25,7 @@ export function SpringDrawing({
   const right = width / 2 + lengthMm / 2;
   const left = right - lengthMm;
   const pin = right - frontHalfMm;
-  const top = 70;
+  const top = 62;
   const rear = lengthMm - frontHalfMm;
   const shown = Math.max(1, Math.min(Math.round(leaves), 9));
   const shorter = Array.from({ length: shown - 1 }, (_, index) => {

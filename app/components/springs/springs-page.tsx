@@ -157,8 +157,11 @@ function Rack(props: SpringsPageProps) {
   );
 }
 
-const CELL = "py-2 pr-4 align-middle max-lg:block max-lg:py-0 max-lg:pr-0";
-const NUMBER = `${CELL} whitespace-nowrap text-right max-lg:text-left`;
+const CELL = "py-2 pr-4 align-middle max-lg:py-0 max-lg:pr-0";
+const NUMBER = `${CELL} whitespace-nowrap text-right`;
+/** Below a table's width a spring is a drawing with its figures in a line under it. */
+const LINE =
+  "border-concrete-200 border-b max-lg:relative max-lg:flex max-lg:flex-wrap max-lg:items-center max-lg:gap-x-5 max-lg:py-3 max-lg:pl-14";
 
 function SpringLine({ spring, unit, longestMm, mayEdit }: SpringsPageProps & { spring: Spring }) {
   const size = (length: number) => formatLength(mm(length), unit, { denominator: 32 });
@@ -166,11 +169,11 @@ function SpringLine({ spring, unit, longestMm, mayEdit }: SpringsPageProps & { s
   const pin = pinWords(spring.lengthMm, spring.frontHalfMm, unit);
   const rear = spring.lengthMm - spring.frontHalfMm;
   return (
-    <tr className="border-concrete-200 border-b max-lg:grid max-lg:grid-cols-[4rem_minmax(0,1fr)_auto] max-lg:gap-x-4 max-lg:gap-y-1 max-lg:py-3">
-      <th scope="row" className={`${CELL} font-label font-semibold text-2xl`}>
+    <tr className={LINE}>
+      <th scope="row" className={`${CELL} font-label font-semibold text-2xl max-lg:absolute max-lg:top-3 max-lg:left-0`}>
         {spring.rackNumber}
       </th>
-      <td className={`${CELL} lg:w-[30%] lg:min-w-64 max-lg:col-span-2`}>
+      <td className={`${CELL} max-lg:w-full lg:w-[26%] lg:min-w-52 xl:w-[30%]`}>
         <SpringDrawing
           lengthMm={spring.lengthMm}
           frontHalfMm={spring.frontHalfMm}
@@ -179,22 +182,22 @@ function SpringLine({ spring, unit, longestMm, mayEdit }: SpringsPageProps & { s
           name={`Spring ${spring.rackNumber} flat: ${size(spring.lengthMm)}, ${pin}`}
         />
       </td>
-      <td className={`${NUMBER} font-semibold text-lg max-lg:col-start-2`}>{size(spring.lengthMm)}</td>
-      <td className={`${NUMBER} max-lg:col-start-2`}>
+      <td className={`${NUMBER} font-semibold text-lg`}>{size(spring.lengthMm)}</td>
+      <td className={NUMBER}>
         {bare(spring.frontHalfMm)} + {bare(rear)}
       </td>
-      <td className={`${CELL} max-lg:col-start-2`}>{pin}</td>
-      <td className={`${NUMBER} max-lg:col-start-2`}>
+      <td className={CELL}>{pin}</td>
+      <td className={NUMBER}>
         {spring.leaves}
         <span className="lg:sr-only"> {spring.leaves === 1 ? "leaf" : "leaves"}</span>
       </td>
-      <td className={`${NUMBER} max-lg:col-start-2`}>
+      <td className={NUMBER}>
         {size(spring.leafWidthMm)}
         <span className="lg:hidden"> wide</span>
       </td>
-      <td className={`${CELL} text-concrete-700 max-lg:col-start-2`}>{spring.note}</td>
+      <td className={`${CELL} text-concrete-700`}>{spring.note}</td>
       {mayEdit ? (
-        <td className={`${CELL} text-right max-lg:col-span-3 max-lg:justify-self-end`}>
+        <td className={`${CELL} whitespace-nowrap text-right max-lg:ml-auto lg:pr-0`}>
           <TakeOut spring={spring} />
         </td>
       ) : null}

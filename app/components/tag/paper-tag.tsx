@@ -30,7 +30,15 @@ export function PaperTag({ nickname, code, kind, qr, shape, goesOn, again = fals
       <svg className="paper-tag-ring" viewBox="0 0 22 22" aria-hidden="true">
         <circle cx="11" cy="11" r="7.6" fill="none" stroke="#b9a06a" strokeWidth="5.2" />
         <circle cx="11" cy="11" r="10.2" fill="none" stroke="#22211e" strokeWidth=".7" />
-        <circle cx="11" cy="11" r="5" fill="#eceae4" stroke="#22211e" strokeWidth=".9" />
+        <circle className="paper-tag-hole" cx="11" cy="11" r="5" stroke="#22211e" strokeWidth=".9" />
+        <path
+          className="paper-tag-twine"
+          d="M11 12C9 4 13-6 22-13 31-20 46-18 58-25M11 12C13 5 10-5 16-13 24-22 42-25 58-25"
+          fill="none"
+          stroke="#8a6f3d"
+          strokeWidth="1.5"
+          strokeLinecap="round"
+        />
       </svg>
       <p className="paper-tag-tape">{nickname}</p>
       <p className="paper-tag-kind">{kind}</p>

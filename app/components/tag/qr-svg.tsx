@@ -1,4 +1,4 @@
-/** A QR picture, black on white with its quiet zone. `name`: what it is, for those who do not see it. */
+/** A QR picture, black on the paper it lies on, with its quiet zone. `name`: what it is, for those who do not see it. */
 export function QrSvg({
   size,
   path,
@@ -11,12 +11,7 @@ export function QrSvg({
   name?: string;
   className?: string;
 }) {
-  const square = (
-    <>
-      <rect width={size} height={size} fill="#fff" />
-      <path d={path} fill="#000" />
-    </>
-  );
+  const square = <path d={path} fill="#000" />;
   const box = { viewBox: `0 0 ${size} ${size}`, shapeRendering: "crispEdges" as const, className };
   return name ? (
     <svg {...box} role="img" aria-label={name}>

@@ -13,6 +13,8 @@ export type BuildRow = {
   nickname: string;
   code: string;
   kind: VehicleKind;
+  lengthMm: number;
+  widthMm: number;
   customer: string;
   /** The stage in hand, or the next open one; null when all are done. */
   stage: { kind: StageKind; state: StageState } | null;
@@ -61,6 +63,8 @@ export async function readBuildsHere(tx: Reader, shopId: number): Promise<BuildR
       nickname: vehicle.nickname,
       code: code ?? "",
       kind: vehicle.kind,
+      lengthMm: vehicle.lengthMm,
+      widthMm: vehicle.widthMm,
       customer,
       stage: stage ? { kind: stage.kind, state: stage.state } : null,
       bayNumber: bay,
