@@ -98,16 +98,15 @@ export async function moveInside(
     if (isDuplicate(error)) throw new Refusal("conflict", "That bay was taken a moment ago.");
     throw error;
   }
-  if (check.voidsLevel) {
-    const level = (await readLevels(tx, [move.buildId])).get(move.buildId);
-    if (level?.levelCheckId)
-      await voidLevel(tx, ctx, personId, {
-        layoutId: level.layoutId,
-        levelCheckId: level.levelCheckId,
-        reason: target === "yard" ? "rolled out to the yard" : `moved to Bay ${target.bay.number}`,
-        note,
-      });
-  }
+  // Whatever the board shows of it: a level that stands goes with the move.
+  const level = (await readLevels(tx, [move.buildId])).get(move.buildId);
+  if (level?.levelCheckId && (level.level.state === "true" || level.level.state === "not-true"))
+    await voidLevel(tx, ctx, personId, {
+      layoutId: level.layoutId,
+      levelCheckId: level.levelCheckId,
+      reason: target === "yard" ? "rolled out to the yard" : `moved to Bay ${target.bay.number}`,
+      note,
+    });
   if (target === "yard") await releaseCrew(tx, move.buildId, at);
   return { vehicle, fromBay, toBay: target === "yard" ? null : target.bay, voided: check.voidsLevel };
 }

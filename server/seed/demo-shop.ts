@@ -5,14 +5,41 @@ import { type Db, schema } from "../../app/db/client.server";
 import type { StageKind } from "../../app/domain/builds/stages";
 import type { Role, Skill } from "../../app/domain/people/roles";
 import { demoLayouts } from "./demo-layouts";
-import { makeBay, makeBuild, makeHanger, makePerson, makeShop, makeSpring, makeStint, type MadeBuild, putOn } from "./factories";
+import { makeBay, makeBuild, makeHanger, makePerson, makeShop, makeSpring, makeStint, type MadeBuild, PAD_MARKS, putOn } from "./factories";
 
 /*
  * The demo shop: made up from the ground to the people, and marked as demo on every screen. Vehicles by kind and
  * nickname, springs by dimensions. Its day is laid around the moment it is made, so that it looks alive.
  */
 
-const ZONE = "America/Boise";
+/** Somewhere it is mid-morning when the demo is made: a demo shop at midnight would look dead. */
+const ZONES = [
+  "Pacific/Auckland",
+  "Australia/Brisbane",
+  "Asia/Tokyo",
+  "Asia/Bangkok",
+  "Asia/Karachi",
+  "Asia/Dubai",
+  "Europe/Athens",
+  "Europe/London",
+  "Atlantic/Azores",
+  "America/Sao_Paulo",
+  "America/New_York",
+  "America/Denver",
+  "America/Los_Angeles",
+  "Pacific/Honolulu",
+];
+const MID_MORNING = 10.5;
+
+/** The zone of the list in which it is nearest to mid-morning. */
+export function demoZone(now: Date): string {
+  const off = (zone: string) => {
+    const there = new TZDate(now.getTime(), zone);
+    const away = Math.abs(there.getHours() + there.getMinutes() / 60 - MID_MORNING);
+    return Math.min(away, 24 - away);
+  };
+  return ZONES.reduce((best, zone) => (off(zone) < off(best) ? zone : best));
+}
 
 const PEOPLE: readonly { key: string; name: string; role: Role; skills?: readonly Skill[] }[] = [
   { key: "nell", name: "Nell Varga", role: "owner" },
@@ -33,8 +60,9 @@ export type SignIn = { role: Role; name: string; email: string };
 /** Fills an empty database. @returns who can sign in, all with the password given */
 export async function makeDemoShop(db: Db, password: string, now = new Date()): Promise<{ shop: string; signIns: SignIn[] }> {
   const name = "Juniper Flat Chassis";
-  const shopId = await makeShop(db, { name, isDemo: true, timeZone: ZONE, now, lengthFt: 89.7, widthFt: 52.6 });
-  const today = startOfDay(new TZDate(now.getTime(), ZONE));
+  const zone = demoZone(now);
+  const shopId = await makeShop(db, { name, isDemo: true, timeZone: zone, now, lengthFt: 89.7, widthFt: 52.6 });
+  const today = startOfDay(new TZDate(now.getTime(), zone));
   /** A time of the shop's day, some days from today. */
   const at = (day: number, hour: number, minute = 0) =>
     new Date(addMinutes(addHours(addDays(today, day), hour), minute).getTime());
@@ -66,8 +94,8 @@ export async function makeDemoShop(db: Db, password: string, now = new Date()): 
     { number: 3, kind: "lift", xFt: 4.54, yFt: 27.6, lengthFt: 24, widthFt: 12, mouth: "east" },
     { number: 4, kind: "general", xFt: 10.54, yFt: 40.15, lengthFt: 18, widthFt: 12, mouth: "east" },
     { number: 5, kind: "level-pad", xFt: 57.7, yFt: 0.54, lengthFt: 32, widthFt: 18, mouth: "west" },
-    { number: 6, kind: "weld", xFt: 57.7, yFt: 19.08, lengthFt: 28, widthFt: 17.3, mouth: "west" },
-    { number: 7, kind: "general", xFt: 57.7, yFt: 36.9, lengthFt: 26, widthFt: 15, mouth: "west" },
+    { number: 6, kind: "weld", xFt: 57.7, yFt: 19.08, lengthFt: 28, widthFt: 17.3, mouth: "west", rated: true, marks: PAD_MARKS },
+    { number: 7, kind: "general", xFt: 57.7, yFt: 36.9, lengthFt: 26, widthFt: 15, mouth: "west", rated: true, marks: PAD_MARKS },
     { number: 8, kind: "apron", xFt: 0, yFt: 54.5, lengthFt: 22.5, widthFt: 9.2, mouth: "east", outside: true },
   ] as const;
   for (const row of bays) bay[row.number] = await makeBay(db, shopId, row);
@@ -84,8 +112,9 @@ export async function makeDemoShop(db: Db, password: string, now = new Date()): 
     { rackNumber: 31, lengthIn: 56, frontHalfIn: 28, leaves: 5 },
     { rackNumber: 35, lengthIn: 44.5, frontHalfIn: 21.5, leaves: 7, widthIn: 2.25 },
   ];
-  for (const spring of springs) await makeSpring(db, shopId, spring);
-  await makeHanger(db, shopId, "Three-hole front hanger", [0, 1, 2]);
+  const rack = new Map<number, number>();
+  for (const spring of springs) rack.set(spring.rackNumber, await makeSpring(db, shopId, spring));
+  const { holes } = await makeHanger(db, shopId, "Three-hole front hanger", [0, 1, 2]);
 
   const by = id("rosa");
   const tyre = { words: "35 × 12.5", loadedRadius: "16.5", radius: "17.5", width: "12.5" };
@@ -157,7 +186,15 @@ export async function makeDemoShop(db: Db, password: string, now = new Date()): 
   await hold("biscuit", "level-void", "Stand 3 was touched", 44);
 
   await planWeek({ db, shopId, at, bayId, id, stage: (key, kind) => made(key).stages.get(kind) });
-  await demoLayouts({ db, shopId, now, id, build: (key) => made(key).buildId, bayId });
+  await demoLayouts({
+    db,
+    shopId,
+    now,
+    id,
+    build: (key) => made(key).buildId,
+    spring: (rackNumber) => rack.get(rackNumber) ?? 0,
+    hole: (number) => holes[number - 1] ?? 0,
+  });
   return { shop: name, signIns };
 }
 

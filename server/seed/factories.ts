@@ -160,18 +160,24 @@ export async function makeSpring(
 }
 
 /** @param aheadIn where each hole lies ahead of hole 1, in inches, hole 1 first */
-export async function makeHanger(db: Db, shopId: number, name: string, aheadIn: number[]): Promise<number> {
+export async function makeHanger(
+  db: Db,
+  shopId: number,
+  name: string,
+  aheadIn: number[],
+): Promise<{ hangerId: number; holes: number[] }> {
   const { id } = one(await db.insert(schema.hangers).values({ shopId, name }).$returningId());
-  await db.insert(schema.hangerHoles).values(
-    aheadIn.map((ahead, i) => ({
-      shopId,
-      hangerId: id,
-      number: i + 1,
-      aheadMm: ahead * IN,
-      aheadTyped: String(ahead),
-    })),
-  );
-  return id;
+  const holes: number[] = [];
+  for (const [i, ahead] of aheadIn.entries()) {
+    const hole = one(
+      await db
+        .insert(schema.hangerHoles)
+        .values({ shopId, hangerId: id, number: i + 1, aheadMm: ahead * IN, aheadTyped: String(ahead) })
+        .$returningId(),
+    );
+    holes.push(hole.id);
+  }
+  return { hangerId: id, holes };
 }
 
 export type MadeBuild = { buildId: number; vehicleId: number; placementId: number; stages: Map<StageKind, number> };

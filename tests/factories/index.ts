@@ -17,6 +17,8 @@ export type TestShop = {
   bays: Record<1 | 2 | 3 | 4 | 5, number>;
   springs: { centred: number; pinAhead: number };
   hangerId: number;
+  /** Holes 1, 2, 3. */
+  holes: number[];
 };
 
 let serial = 0;
@@ -60,7 +62,7 @@ export async function makeTestShop(db: Db, options: { password?: string; timeZon
       centred: await makeSpring(db, shopId, { rackNumber: 14, lengthIn: 52, frontHalfIn: 26 }),
       pinAhead: await makeSpring(db, shopId, { rackNumber: 22, lengthIn: 52, frontHalfIn: 24 }),
     },
-    hangerId: await makeHanger(db, shopId, "Three holes, 1 in apart", [0, 1, 2]),
+    ...(await makeHanger(db, shopId, "Three holes, 1 in apart", [0, 1, 2])),
   };
 }
 

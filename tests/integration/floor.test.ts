@@ -43,7 +43,7 @@ async function level(buildId: number, bayId: number, drops: number) {
   const layoutId = layout?.id ?? 0;
   const [check] = await db
     .insert(schema.levelChecks)
-    .values({ ...base, layoutId, method: "heights", noseHighDeg: 0.02, rightHighDeg: 0, allowedDeg: 0.1, isTrue: true, madeBy: by, madeAt: at })
+    .values({ ...base, layoutId, bayId, method: "heights", noseHighDeg: 0.02, rightHighDeg: 0, allowedDeg: 0.1, isTrue: true, madeBy: by, madeAt: at })
     .$returningId();
   for (let i = 0; i < drops; i++) {
     const [drop] = await db

@@ -11,6 +11,7 @@ import { StagePick } from "./stage-pick";
 import { VehiclePreview } from "./vehicle-preview";
 
 export type Refused = {
+  kind: string;
   message: string;
   fields: Record<string, string>;
   typed: Record<string, string>;
@@ -18,6 +19,36 @@ export type Refused = {
 };
 
 const kindOf = (typed: string | undefined): VehicleKind | null => VEHICLE_KINDS.find((kind) => kind === typed) ?? null;
+
+const LABEL: Record<string, string> = {
+  customerId: "Customer",
+  customerName: "Customer",
+  customerPhone: "Phone",
+  customerEmail: "E-mail",
+  kind: "Kind",
+  nickname: "Nickname",
+  length: "Length",
+  width: "Width",
+  wanted: "In the customer's words",
+  tyre: "Tyres",
+  tyreRadius: "Tyre radius",
+  loadedRadius: "Loaded radius",
+  tyreWidth: "Tyre width",
+  wheelbase: "Wheelbase",
+  approach: "Approach at least",
+  promiseDate: "Promised for",
+  promiseTime: "Time",
+  template: "Stages",
+};
+
+/** The faults as sentences that name their field, in the order of the form. */
+function sentences(faults: Record<string, string>): string[] {
+  const order = Object.keys(LABEL);
+  const place = (name: string) => (order.includes(name) ? order.indexOf(name) : order.length);
+  return Object.entries(faults)
+    .sort(([a], [b]) => place(a) - place(b))
+    .map(([name, words]) => `${LABEL[name] ?? "Hours"}: ${words}`);
+}
 
 /** A kind's usual size as a person of this shop would type it. */
 const usual = (sizeIn: number, unit: LengthUnit) =>
@@ -35,17 +66,27 @@ export function BookInForm({
   refused: Refused | null;
 }) {
   const busy = useNavigation().formAction?.startsWith("/counter/book-in") ?? false;
-  const [own, setOwn] = useState<Record<string, string> | null>(null);
+  const [faults, setFaults] = useState(refused?.fields ?? {});
+  /** Counts the tries that failed: each brings the person to the first field that is wrong. */
+  const [tries, setTries] = useState(0);
   const form = useRef<HTMLFormElement>(null);
-  const typed = refused?.typed ?? {};
-  const faults = own ?? refused?.fields ?? {};
-  // The server's newest answer takes the place of what the browser found before.
+  const fail = (found: Record<string, string>) => {
+    setFaults(found);
+    setTries((before) => before + 1);
+  };
+  const putRight = (...names: string[]) => {
+    if (names.some((name) => faults[name]))
+      setFaults((all) => Object.fromEntries(Object.entries(all).filter(([name]) => !names.includes(name))));
+  };
+  const failed = useRef(fail);
+  failed.current = fail;
   useEffect(() => {
-    if (refused) setOwn(null);
+    if (refused) failed.current(refused.fields);
   }, [refused]);
   useEffect(() => {
-    if (own || refused) form.current?.querySelector<HTMLElement>("[aria-invalid=true]")?.focus();
-  }, [own, refused]);
+    if (tries > 0) form.current?.querySelector<HTMLElement>("[aria-invalid=true]")?.focus();
+  }, [tries]);
+  const typed = refused?.typed ?? {};
 
   return (
     <main className="mx-auto w-full max-w-[88rem] p-4 sm:p-6">
@@ -58,21 +99,26 @@ export function BookInForm({
         onSubmit={(event) => {
           const found = faultsOf(new FormData(event.currentTarget), bookInForm(unit));
           const good = Object.keys(found).length === 0;
-          setOwn(good ? null : found);
           if (!good || busy) event.preventDefault();
+          if (!good) fail(found);
+        }}
+        onChange={(event) => {
+          // What is being put right is no longer called wrong; the next try looks at everything again.
+          const field: EventTarget = event.target;
+          if ("name" in field) putRight(String(field.name));
         }}
       >
         <h1 className="font-label font-semibold text-3xl">Book in a vehicle</h1>
-        <Faults faults={faults} refused={own ? null : refused} />
-        <Fields {...{ customers, unit, typed, faults, busy }} />
+        <Faults faults={faults} refused={refused} />
+        <Fields {...{ customers, unit, typed, faults, busy, putRight }} />
       </Form>
     </main>
   );
 }
 
 function Faults({ faults, refused }: { faults: Record<string, string>; refused: Refused | null }) {
-  if (Object.keys(faults).length > 0) return <ErrorSummary problems={[...new Set(Object.values(faults))]} />;
-  if (!refused) return null;
+  if (Object.keys(faults).length > 0) return <ErrorSummary problems={sentences(faults)} />;
+  if (!refused || refused.kind === "invalid") return null;
   const twin = refused.detail.buildId;
   return (
     <p role="alert" className="border-oxide border-l-4 bg-oxide-wash px-4 py-3 font-medium text-oxide">
@@ -92,9 +138,11 @@ type FieldsProps = {
   typed: Record<string, string>;
   faults: Record<string, string>;
   busy: boolean;
+  /** These fields were filled by us: what was wrong with them is so no longer. */
+  putRight: (...names: string[]) => void;
 };
 
-function Fields({ customers, unit, typed, faults, busy }: FieldsProps) {
+function Fields({ customers, unit, typed, faults, busy, putRight }: FieldsProps) {
   const [kind, setKind] = useState(kindOf(typed.kind));
   const [nickname, setNickname] = useState(typed.nickname ?? "");
   const [length, setLength] = useState(typed.length ?? "");
@@ -110,6 +158,7 @@ function Fields({ customers, unit, typed, faults, busy }: FieldsProps) {
       if (isUsual(width, before?.widthIn)) setWidth(usual(widthIn, unit));
     }
     setKind(next);
+    putRight("kind", "length", "width");
   };
   const hint = unit === "in" ? "As on the tape: 189, 15' 9 or 480 cm" : "As on the tape: 4800 or 480 cm";
   return (

@@ -76,7 +76,7 @@ export function CustomerPick({
           aria-activedescendant={found[active] ? `${listId}-${found[active].id}` : undefined}
           hint={chosen ? knownWords(chosen) : name.trim() === "" ? "A name; known customers are offered." : "A new customer."}
           error={faults.customerName ?? faults.customerId}
-          onFocus={() => setOpen(true)}
+          onClick={() => setOpen(true)}
           onBlur={() => setOpen(false)}
           onKeyDown={onKeyDown}
           onChange={(event) => {
@@ -91,7 +91,7 @@ export function CustomerPick({
           role="listbox"
           aria-label="Known customers"
           hidden={found.length === 0}
-          className="absolute inset-x-0 top-full z-10 border border-paint-edge bg-chalk shadow-lift"
+          className="absolute inset-x-0 top-[4.5rem] z-10 border border-paint-edge bg-chalk shadow-lift"
         >
           {found.map((customer, index) => (
             <div

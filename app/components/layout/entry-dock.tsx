@@ -22,16 +22,30 @@ type Props = {
 };
 
 /** The reading in hand at the foot of the screen: what it is, what it is understood as, and the press that keeps it. */
-export function EntryDock({ what, hint, value, onChange, onKeep, unit, next, caution, busy, padUp, setPad }: Props) {
+export function EntryDock({
+  what,
+  hint,
+  value,
+  onChange,
+  onKeep,
+  unit,
+  next,
+  caution,
+  busy,
+  padUp,
+  setPad,
+}: Props) {
   const [padUnit, setPadUnit] = useState<LengthUnit>(unit);
   const read = understood(value, unit);
   const ok = read !== null && "mm" in read;
   return (
-    <section className="layout-dock" aria-label={`${what}, in hand`}>
+    <section className="layout-dock" aria-label="Reading in hand">
       <div className="flex min-h-15 items-center gap-3 border-t-2 border-concrete-500 bg-chalk px-4 py-1">
         <div className="min-w-0 flex-1">
           <p className="font-label text-[19px] leading-tight font-semibold text-brass-ink">{what}</p>
-          <p className={`truncate font-label text-base leading-tight ${read && !ok ? "font-semibold text-oxide" : "text-concrete-700"}`}>
+          <p
+            className={`truncate font-label text-base leading-tight ${read && !ok ? "font-semibold text-oxide" : "text-concrete-700"}`}
+          >
             {read && "problem" in read ? read.problem : ok ? `understood: ${read.words}` : hint}
           </p>
         </div>
@@ -43,7 +57,13 @@ export function EntryDock({ what, hint, value, onChange, onKeep, unit, next, cau
             Keep {ok ? value.trim() : ""}
           </Button>
         )}
-        <Button size="l" tone="quiet" aria-pressed={padUp} onClick={() => setPad(!padUp)} className="hidden sm:inline-flex">
+        <Button
+          size="l"
+          tone="quiet"
+          aria-pressed={padUp}
+          onClick={() => setPad(!padUp)}
+          className="hidden sm:inline-flex"
+        >
           {padUp ? "Pad away" : "Number pad"}
         </Button>
       </div>

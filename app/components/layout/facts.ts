@@ -17,7 +17,7 @@ export function factsOf(view: LayoutView): StepFacts {
     dropsSuspect: view.drops.filter((drop) => drop.reading?.suspect).length,
     axleLineChosen: view.axle !== null,
     optionsKnown: view.options !== null,
-    optionChosen: view.choice !== null,
+    optionChosen: view.choice !== null && !view.choice.changed,
     approval: view.approval?.state ?? "none",
   };
 }
@@ -27,6 +27,12 @@ export const whyShutIn = (view: LayoutView, step: StepId): string | null => whyS
 
 /** The step that opens a shut one: the first before it that is not done. */
 export function wayBack(view: LayoutView, step: StepId): { id: StepId; label: string } | null {
-  const before = view.steps.slice(0, view.steps.findIndex((one) => one.id === step));
-  return before.find((one) => one.state !== "done" && one.state !== "later" && whyShutIn(view, one.id) === null) ?? null;
+  const before = view.steps.slice(
+    0,
+    view.steps.findIndex((one) => one.id === step),
+  );
+  return (
+    before.find((one) => one.state !== "done" && one.state !== "later" && whyShutIn(view, one.id) === null) ??
+    null
+  );
 }

@@ -1,13 +1,13 @@
-import type { LayoutView } from "../../domain/layout/view";
 import { VEHICLE_KIND } from "../../domain/builds/vehicle-kinds";
+import type { LayoutView } from "../../domain/layout/view";
 import type { LiveStatus } from "../../realtime/live-status";
 import { Sign, type SignName } from "../../ui/sign";
 import { Stencil } from "../../ui/stencil";
 import { Tape } from "../../ui/tape";
 import { ageInWords, whenInWords } from "../time";
 import { levelWords } from "./level-words";
-import type { Outbox } from "./use-unsent";
 import { unsentWords } from "./unsent";
+import type { Outbox } from "./use-unsent";
 
 type Props = { view: LayoutView; person: string; now: number; live: LiveStatus; outbox: Outbox };
 
@@ -28,7 +28,7 @@ export function LayoutHead({ view, person, now, live, outbox }: Props) {
           </span>
         </h1>
         <p className="truncate font-label text-[15px] text-concrete-700">
-          Layout of the front end, fixed eye {fixedEye}. <span className="whitespace-nowrap">{person} signed in</span>
+          Front end, fixed eye {fixedEye} · {person}
         </p>
       </div>
       <div className="layout-facts">
@@ -62,11 +62,17 @@ function LevelFact({ view, now }: { view: LayoutView; now: number }) {
   const by = (level?.voided?.made ?? level?.made)?.name.split(" ")[0];
   const isTrue = level?.state === "true";
   return (
-    <Fact sign={isTrue ? "level" : level?.state === "void" ? "void" : "not-level"} tone={isTrue ? "text-moss" : "text-oxide"}>
-      <b className={`line-clamp-1 font-semibold ${isTrue ? "text-moss" : level ? "text-oxide" : ""}`}>{levelWords(level)}</b>
+    <Fact
+      sign={isTrue ? "level" : level?.state === "void" ? "void" : "not-level"}
+      tone={isTrue ? "text-moss" : "text-oxide"}
+    >
+      <b className={`line-clamp-1 font-semibold ${isTrue ? "text-moss" : level ? "text-oxide" : ""}`}>
+        {levelWords(level)}
+      </b>
       {at ? (
         <>
-          {level?.voided ? "since" : "read"} {whenInWords(at, new Date(now), shop.timeZone)}, {ageInWords(at, new Date(now))} ago
+          {level?.voided ? "since" : "read"} {whenInWords(at, new Date(now), shop.timeZone)},{" "}
+          {ageInWords(at, new Date(now))} ago
           {by ? `, ${by}` : ""}
         </>
       ) : (
@@ -79,7 +85,8 @@ function LevelFact({ view, now }: { view: LayoutView; now: number }) {
 function SentFact({ view, live, outbox }: { view: LayoutView; live: LiveStatus; outbox: Outbox }) {
   const waiting = unsentWords(outbox.list);
   const refused = outbox.list.filter((one) => one.refused !== null).length;
-  const heard = live.lastHeard === null ? null : whenInWords(new Date(live.lastHeard), new Date(), view.shop.timeZone);
+  const heard =
+    live.lastHeard === null ? null : whenInWords(new Date(live.lastHeard), new Date(), view.shop.timeZone);
   if (waiting)
     return (
       <div role="status" className="flex items-center gap-2">
@@ -95,10 +102,23 @@ function SentFact({ view, live, outbox }: { view: LayoutView; live: LiveStatus; 
     );
   return (
     <div role="status">
-      <Fact sign={live.state === "not-live" ? "unsent" : "sent"} tone={live.state === "not-live" ? "text-brass-ink" : "text-moss"}>
-        {refused > 0 ? <b className="text-oxide">{refused} not taken</b> : <b className="font-semibold">All sent</b>}
+      <Fact
+        sign={live.state === "not-live" ? "unsent" : "sent"}
+        tone={live.state === "not-live" ? "text-brass-ink" : "text-moss"}
+      >
+        {refused > 0 ? (
+          <b className="text-oxide">{refused} not taken</b>
+        ) : (
+          <b className="font-semibold">All sent</b>
+        )}
         <br />
-        {live.state === "live" ? "live" : live.state === "joining" ? "joining" : heard ? `no signal since ${heard}` : "no signal"}
+        {live.state === "live"
+          ? "live"
+          : live.state === "joining"
+            ? "joining"
+            : heard
+              ? `no signal since ${heard}`
+              : "no signal"}
       </Fact>
     </div>
   );

@@ -1,4 +1,11 @@
-import { formatInches, formatMillimetres, type LengthUnit, type Millimetres, mm, parseLength } from "../../domain/units/length";
+import {
+  formatInches,
+  formatMillimetres,
+  type LengthUnit,
+  type Millimetres,
+  mm,
+  parseLength,
+} from "../../domain/units/length";
 
 /** A length as it stands on the tape, without its unit in inches: "26 1/2", "673 mm". */
 export function onTape(length: Millimetres, unit: LengthUnit): string {

@@ -33,4 +33,3 @@ describe("a level in words", () => {
     expect(levelWords(level({ state: "void", voided }))).toBe("Level void: a stand was touched");
   });
 });
-

@@ -7,7 +7,10 @@ const lower = (words: string): string => words.charAt(0).toLowerCase() + words.s
 export function levelWords(level: LevelView | null): string {
   if (!level) return "Not levelled yet";
   if (level.state === "void") return `Level void: ${level.voided?.reason ?? "it was broken"}`;
-  const { headline } = levelVerdict({ noseHigh: level.noseHighDeg, rightHigh: level.rightHighDeg }, level.allowedDeg);
+  const { headline } = levelVerdict(
+    { noseHigh: level.noseHighDeg, rightHigh: level.rightHighDeg },
+    level.allowedDeg,
+  );
   const slope = lower(headline.replace(/\.$/, ""));
   return level.state === "true" ? `Level true, ${slope}` : `Not true yet: ${slope}`;
 }

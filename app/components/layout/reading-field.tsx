@@ -21,7 +21,20 @@ type Props = {
 
 /** One reading: Enter keeps it, Esc brings back what stood there before, Tab goes on. */
 export function ReadingField(props: Props) {
-  const { label, quietLabel, name, value, onChange, onKeep, onHand, padUp, readOnly, error, hint, size = "m" } = props;
+  const {
+    label,
+    quietLabel,
+    name,
+    value,
+    onChange,
+    onKeep,
+    onHand,
+    padUp,
+    readOnly,
+    error,
+    hint,
+    size = "m",
+  } = props;
   const id = useId();
   const before = useRef(value);
   const onKeyDown = (event: KeyboardEvent<HTMLInputElement>) => {
@@ -63,7 +76,10 @@ export function ReadingField(props: Props) {
         onKeyDown={onKeyDown}
       />
       {error || hint ? (
-        <p id={`${id}-words`} className={`text-[15px] leading-tight ${error ? "font-medium text-oxide" : "text-concrete-500"}`}>
+        <p
+          id={`${id}-words`}
+          className={`text-[15px] leading-tight ${error ? "font-medium text-oxide" : "text-concrete-500"}`}
+        >
           {error ?? hint}
         </p>
       ) : null}

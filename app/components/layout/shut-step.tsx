@@ -16,12 +16,19 @@ export function ShutStep({ view, step, why }: { view: LayoutView; step: StepId; 
         tone={isVoid ? "void" : state?.state === "later" ? "empty" : "waiting"}
         sign={isVoid ? "void" : state?.state === "later" ? "plan" : "lock"}
         title={why}
-        detail={state?.state === "void" ? "Nothing that was read is lost: it waits until its ground is true again." : undefined}
+        detail={
+          state?.state === "void"
+            ? "Nothing that was read is lost: it waits until its ground is true again."
+            : undefined
+        }
         live
       />
       {back ? (
         <div className="p-4">
-          <Link to={`/layouts/${view.id}/step/${back.id}`} className={`${buttonClass("go", "xl")} w-full max-w-xl`}>
+          <Link
+            to={`/layouts/${view.id}/step/${back.id}`}
+            className={`${buttonClass("go", "xl")} w-full max-w-xl`}
+          >
             Go to {back.label}
           </Link>
         </div>

@@ -28,13 +28,22 @@ const TONE: Record<StepState["state"], string> = {
 };
 
 /** The steps down a plumb line, the bob at the one in hand; a strip across on narrow screens. */
-export function StepsRail({ layoutId, steps, current }: { layoutId: number; steps: readonly StepState[]; current: StepId }) {
+export function StepsRail({
+  layoutId,
+  steps,
+  current,
+}: {
+  layoutId: number;
+  steps: readonly StepState[];
+  current: StepId;
+}) {
   const here = steps.findIndex((step) => step.id === current);
   const currentRef = useRef<HTMLAnchorElement>(null);
   useEffect(() => {
     const strip = currentRef.current?.closest("ol");
     if (strip && strip.scrollWidth > strip.clientWidth && currentRef.current)
-      strip.scrollLeft = currentRef.current.offsetLeft - strip.clientWidth / 2 + currentRef.current.clientWidth / 2;
+      strip.scrollLeft =
+        currentRef.current.offsetLeft - strip.clientWidth / 2 + currentRef.current.clientWidth / 2;
   });
   return (
     <nav className="layout-rail" aria-label="Steps of this layout">
@@ -60,7 +69,9 @@ export function StepsRail({ layoutId, steps, current }: { layoutId: number; step
                 >
                   {isHere ? <Bob key={step.id} size={44} className="layout-bob" /> : null}
                   {step.label}
-                  <small className={TONE[step.state]}>{note || <span className="sr-only">{STATE_WORDS[step.state]}</span>}</small>
+                  <small className={TONE[step.state]}>
+                    {note || <span className="sr-only">{STATE_WORDS[step.state]}</span>}
+                  </small>
                 </Link>
               )}
             </li>

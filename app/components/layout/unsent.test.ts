@@ -50,7 +50,11 @@ describe("readings kept on the tablet", () => {
   });
 
   it("are never sent under another person's name, nor again once refused", () => {
-    const list = refuseUnsent([reading("a"), reading("b"), reading("c", { by: "Wes Tran" })], "a", "Level void");
+    const list = refuseUnsent(
+      [reading("a"), reading("b"), reading("c", { by: "Wes Tran" })],
+      "a",
+      "Level void",
+    );
     expect(sendable(list, "Pilar Echeverri").map((one) => one.clientKey)).toEqual(["b"]);
     expect(list[0]?.refused).toBe("Level void");
   });

@@ -19,7 +19,11 @@ const NO_LINK = "No signal: kept here, not sent. Press again when the link is ba
  */
 export function usePost(done: () => void): Sending {
   const onTheWay = useRef(false);
-  const [state, setState] = useState<Pick<Sending, "busy" | "trouble" | "fields">>({ busy: false, trouble: null, fields: {} });
+  const [state, setState] = useState<Pick<Sending, "busy" | "trouble" | "fields">>({
+    busy: false,
+    trouble: null,
+    fields: {},
+  });
   const send: Sending["send"] = async (to, fields) => {
     if (onTheWay.current) return null;
     onTheWay.current = true;
@@ -28,7 +32,11 @@ export function usePost(done: () => void): Sending {
     onTheWay.current = false;
     if (posted.state === "answered") {
       const { answer } = posted;
-      setState({ busy: false, trouble: answer.ok ? null : answer.message, fields: answer.ok ? {} : answer.fields });
+      setState({
+        busy: false,
+        trouble: answer.ok ? null : answer.message,
+        fields: answer.ok ? {} : answer.fields,
+      });
       done();
       return answer;
     }

@@ -1,6 +1,14 @@
 import { useCallback, useEffect, useRef, useSyncExternalStore } from "react";
 import { type Posted, post } from "./post";
-import { dropUnsent, keepUnsent, parseUnsent, refuseUnsent, sendable, type Unsent, unsentKey } from "./unsent";
+import {
+  dropUnsent,
+  keepUnsent,
+  parseUnsent,
+  refuseUnsent,
+  sendable,
+  type Unsent,
+  unsentKey,
+} from "./unsent";
 
 const NONE: Unsent[] = [];
 const RETRY_MS = 8000;
@@ -116,10 +124,7 @@ export function useUnsent(layoutId: number, person: string, linked: boolean, con
       const { read, write } = stored();
       const whole = { ...reading, by: person, keptAt: new Date().toISOString(), refused: null };
       write(keepUnsent(read(), whole));
-      const posted = await send(whole);
-      // Refused in front of the person: the words stand beside the field, so it need not wait in the list as well.
-      if (posted.state === "answered" && !posted.answer.ok) write(dropUnsent(read(), reading.clientKey));
-      return posted;
+      return send(whole);
     },
     [person, send, stored],
   );

@@ -29,7 +29,7 @@ export function ScanDesk({
       return;
     }
     camera.stop();
-    navigator.vibrate?.(60);
+    if (navigator.userActivation?.hasBeenActive) navigator.vibrate?.(60);
     onCode(scanned.code);
   });
   useBurst(onText);

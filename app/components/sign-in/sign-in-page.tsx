@@ -1,5 +1,6 @@
 import { Form, Link, useNavigation } from "react-router";
 import { Button } from "../../ui/button";
+import { Bob } from "../../ui/bob";
 import { Field } from "../../ui/field";
 
 /** The door: a plumb line hangs to the floor beside the form. */
@@ -20,7 +21,10 @@ export function SignInPage({
       <HangingBob />
       <div className="grid content-center gap-6 bg-chalk p-6 sm:p-12 lg:px-20">
         <header className="grid gap-1">
-          <p className="font-label font-semibold text-2xl">Plumbay</p>
+          <p className="flex items-center gap-2 font-label font-semibold text-2xl">
+            <Bob size={40} className="md:hidden" />
+            Plumbay
+          </p>
           <h1 className="font-label font-semibold text-4xl leading-tight">Sign in to your shop</h1>
         </header>
         {signedIn ? (

@@ -1,10 +1,10 @@
-import type { BayCard } from "../../domain/floor/board";
+import type { BayCard, BoardBay, BoardVehicle } from "../../domain/floor/board";
 import { Sign } from "../../ui/sign";
 import { Stencil } from "../../ui/stencil";
 import { ToolCheck } from "../../ui/tool-check";
 import { whenInWords } from "../time";
 import { VehicleGlyph } from "../vehicle-plan";
-import { endWords, levelLine, piecesWords, stageWords } from "./wall-words";
+import { endWords, levelLine, PLACE_WORDS, piecesWords, stageWords } from "./wall-words";
 
 const TONE = { true: "text-moss", stop: "text-oxide", quiet: "text-concrete-500" } as const;
 
@@ -56,7 +56,6 @@ function StaleLines({ card }: { card: BayCard }) {
 function LiveLines({ card, now, zone }: { card: BayCard; now: number; zone: string }) {
   const { vehicle } = card;
   if (!vehicle) return null;
-  const level = levelLine(vehicle, now);
   const ends = endWords(vehicle, now, zone);
   const { hold } = vehicle;
   return (
@@ -73,21 +72,12 @@ function LiveLines({ card, now, zone }: { card: BayCard; now: number; zone: stri
             Hold
           </span>
         ) : null}
-        {hold && hold.kind !== "level-void" ? (
-          <span className={`wall-cut ${hold.kind === "customer" ? "text-brass-ink" : "text-oxide"}`}>{hold.words}</span>
-        ) : level ? (
-          <span className={`wall-line wall-cut ${TONE[level.tone]}`}>
-            <Sign name={level.sign} size="calc(46 * var(--u))" />
-            <span className="wall-cut">{level.words}</span>
-          </span>
-        ) : (
-          <span className="font-medium text-concrete-500">No level taken</span>
-        )}
+        <SecondLine vehicle={vehicle} bay={card.bay} now={now} />
       </p>
       <p className="wall-line third wall-46">
-        {vehicle.crew.length === 0 ? <span className="text-concrete-500">Nobody on it</span> : null}
-        {vehicle.crew.map((person) => (
-          <ToolCheck key={person.personId} initials={person.initials} state="on" size="calc(54 * var(--u))" title={person.name} />
+        {vehicle.crew.length === 0 && !ends ? <span className="text-concrete-500">Nobody on it</span> : null}
+        {vehicle.crew.slice(0, 3).map((person) => (
+          <ToolCheck key={person.personId} initials={person.initials} state="on" size="calc(64 * var(--u))" letters={0.62} title={person.name} />
         ))}
         <span className="wall-line ml-auto">
           {ends ? <span className={ends.late ? "font-semibold text-oxide" : ""}>{ends.words}</span> : null}
@@ -105,5 +95,26 @@ function LiveLines({ card, now, zone }: { card: BayCard; now: number; zone: stri
         <VehicleGlyph kind={vehicle.kind} />
       </div>
     </>
+  );
+}
+
+/** The hold's reason, or the level, or where it stands when no level was taken. */
+function SecondLine({ vehicle, bay, now }: { vehicle: BoardVehicle; bay: BoardBay; now: number }) {
+  const level = levelLine(vehicle, now);
+  const { hold } = vehicle;
+  if (hold && (hold.kind !== "level-void" || level?.sign !== "void"))
+    return <span className={`wall-cut ${hold.kind === "customer" ? "text-brass-ink" : "text-oxide"}`}>{hold.words}</span>;
+  if (level)
+    return (
+      <span className={`wall-line wall-cut ${TONE[level.tone]}`}>
+        <Sign name={level.sign} size="calc(46 * var(--u))" />
+        <span className="wall-cut">{level.words}</span>
+      </span>
+    );
+  return (
+    <span className="wall-line font-medium text-concrete-500">
+      <Sign name="bay" size="calc(46 * var(--u))" />
+      {PLACE_WORDS[bay.kind]}
+    </span>
   );
 }

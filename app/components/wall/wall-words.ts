@@ -1,5 +1,6 @@
 import type { BayCard, BoardVehicle } from "../../domain/floor/board";
 import { STAGE_LABEL } from "../../domain/builds/stages";
+import type { BayKind } from "../../domain/floor/bays";
 import { spanInWords, whenInWords } from "../time";
 
 /** What the second line of a cell says, and in which tone. */
@@ -19,18 +20,33 @@ export function levelLine(vehicle: BoardVehicle, now: number): LevelLine {
 /** "hangers 2 of 4", or "" when the stage is not counted. */
 export function piecesWords(vehicle: BoardVehicle): string {
   const pieces = vehicle.stage?.pieces;
-  if (pieces) return `${pieces.word} ${pieces.done} of ${pieces.of}`;
+  if (pieces) {
+    const count = `${pieces.done} of ${pieces.of}`;
+    // A long name and stage leave no room for the word; the count alone still says how far it is.
+    return vehicle.nickname.length + stageWords(vehicle).length > 17 ? count : `${pieces.word} ${count}`;
+  }
   const { level, stage } = vehicle;
   return stage?.kind === "layout" && level.state !== "none" && level.drops > 0 ? `${level.drops} drops` : "";
 }
 
 export const stageWords = (vehicle: BoardVehicle) => (vehicle.stage ? STAGE_LABEL[vehicle.stage.kind] : "Done");
 
+/** Where a vehicle stands, when there is no level to speak of. */
+export const PLACE_WORDS: Record<BayKind, string> = {
+  "level-pad": "On the level pad",
+  lift: "On the lift",
+  weld: "In the weld bay",
+  general: "In the bay",
+  apron: "On the apron",
+};
+
 /** When it ends by the plan, or by how much it is late; null when it is not planned. */
 export function endWords(vehicle: BoardVehicle, now: number, zone: string): { late: boolean; words: string } | null {
   if (!vehicle.endsAt || vehicle.stage?.state !== "under-way") return null;
   const ends = Date.parse(vehicle.endsAt);
   if (ends < now) return { late: true, words: `${spanInWords(now - ends)} late` };
+  // Nobody works on what is held: an end by the plan would say nothing.
+  if (vehicle.hold) return null;
   return { late: false, words: `ends ${whenInWords(vehicle.endsAt, new Date(now), zone)}` };
 }
 

@@ -9,6 +9,7 @@ import type {
   CrewCard,
   NextCard,
 } from "../../domain/floor/board";
+import { leansOnLevel } from "../../domain/builds/stages";
 import { type Db, type Reader, schema } from "../client.server";
 import { OPEN_END, type Touch } from "../schema";
 
@@ -186,7 +187,7 @@ async function readStandings(
           initials: row.initials,
           since: iso(row.spell.fromAt),
         })),
-        level: level?.level ?? { state: "none" },
+        level: level && stage && leansOnLevel(stage.kind) ? level.level : { state: "none" },
         hold: hold ? boardHold(hold) : null,
         endsAt: ends ? iso(ends) : null,
         promisedAt: build.promisedAt ? iso(build.promisedAt) : null,

@@ -68,6 +68,10 @@ export const levelChecks = mysqlTable(
     layoutId: ref()
       .notNull()
       .references(() => layouts.id),
+    /** The bay it was levelled in: drops of another bay lie in another floor frame and are never carried over. */
+    bayId: ref()
+      .notNull()
+      .references(() => bays.id),
     method: mysqlEnum(LEVEL_METHODS).notNull(),
     noseHighDeg: angleDeg().notNull(),
     rightHighDeg: angleDeg().notNull(),

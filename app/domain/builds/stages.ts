@@ -31,6 +31,11 @@ export const STAGE_LABEL: Record<StageKind, string> = {
   "hand-over": "Ready",
 };
 
+const ON_A_LEVEL: readonly StageKind[] = ["level", "layout", "approval", "mock-up", "tack", "weld"];
+
+/** Does work at this stage lean on the level? Once the brackets are welded a moved vehicle loses nothing. */
+export const leansOnLevel = (kind: StageKind): boolean => ON_A_LEVEL.includes(kind);
+
 export const STAGE_STATES = ["open", "under-way", "done"] as const;
 export type StageState = (typeof STAGE_STATES)[number];
 

@@ -34,7 +34,7 @@ export type BoardStage = {
   pieces: { done: number; of: number; word: string } | null;
 };
 
-/** `none`: no level was taken on this visit. */
+/** `none`: no level was taken on this visit, or the stage in hand does not lean on it. */
 export type BoardLevel =
   | { state: "none" }
   | { state: "true" | "not-true"; noseHighDeg: number; rightHighDeg: number; checkedAt: string; drops: number }

@@ -1,6 +1,6 @@
 import { data, useRevalidator } from "react-router";
 import { may } from "~/auth/permissions";
-import { BuildPage } from "~/components/build/build-page";
+import { BuildPage } from "~/components/builds/build-page";
 import { Shell } from "~/components/frame/shell";
 import { appContext } from "~/context";
 import { readBayCards, readStanding, snapshot } from "~/db/queries/board.server";

@@ -1,1 +1,10 @@
-export const action = () => Response.json({ message: "Not built yet" }, { status: 501 });
+import { readForm } from "~/http/form.server";
+import { answer, idParam, serviceContext } from "~/http/request.server";
+import { startLayout } from "~/services/layouts/start-layout.server";
+import { StartLayoutForm } from "~/validation/layout";
+import type { Route } from "./+types/start-layout";
+
+export async function action({ request, params, context }: Route.ActionArgs) {
+  const form = await request.formData();
+  return answer(form, () => startLayout(serviceContext(context), { buildId: idParam(params.buildId), ...readForm(form, StartLayoutForm) }));
+}

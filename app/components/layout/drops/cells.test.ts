@@ -21,7 +21,12 @@ const reading = (over: Partial<DropReadingView> = {}): DropReadingView => ({
   made: { name: "Pilar Echeverri", initials: "PE", at: "2026-06-01T10:00:00.000Z" },
   ...over,
 });
-const drop = (point: DropView["point"], side: DropView["side"], read: DropReadingView | null, needed = true): DropView => ({
+const drop = (
+  point: DropView["point"],
+  side: DropView["side"],
+  read: DropReadingView | null,
+  needed = true,
+): DropView => ({
   point,
   side,
   label: point,
@@ -45,11 +50,41 @@ describe("a cell of the drops", () => {
     ["to drop", drop("opening-front", "left", null), [], "to-drop", ""],
     ["to drop", drop("axle-end", "left", null, false), [], "to-drop", "if wanted"],
     ["82 3/8", drop("opening-front", "left", reading()), [], "kept", "30 1/4 left"],
-    ["82 3/8", drop("opening-front", "left", reading({ checked: false })), [], "kept", "30 1/4 left, unchecked"],
-    ["82 3/8", drop("opening-front", "left", reading({ suspect: true })), [], "not-meeting", "tapes do not meet"],
-    ["82 3/8", drop("opening-front", "left", reading({ stands: false, suspect: true })), [], "waiting", "waits for the level"],
-    ["kept here", drop("opening-front", "left", reading()), [kept("opening-front", "left")], "kept-here", "not sent"],
-    ["not taken", drop("opening-front", "left", null), [kept("opening-front", "left", "Level void")], "not-taken", "Level void"],
+    [
+      "82 3/8",
+      drop("opening-front", "left", reading({ checked: false })),
+      [],
+      "kept",
+      "30 1/4 left, unchecked",
+    ],
+    [
+      "82 3/8",
+      drop("opening-front", "left", reading({ suspect: true })),
+      [],
+      "not-meeting",
+      "tapes do not meet",
+    ],
+    [
+      "82 3/8",
+      drop("opening-front", "left", reading({ stands: false, suspect: true })),
+      [],
+      "waiting",
+      "waits for the level",
+    ],
+    [
+      "kept here",
+      drop("opening-front", "left", reading()),
+      [kept("opening-front", "left")],
+      "kept-here",
+      "not sent",
+    ],
+    [
+      "not taken",
+      drop("opening-front", "left", null),
+      [kept("opening-front", "left", "Level void")],
+      "not-taken",
+      "Level void",
+    ],
   ] as const)("says %s", (words, one, unsent, state, detail) => {
     expect(cellOf(one, unsent, "in")).toMatchObject({ words, state, detail });
   });
@@ -65,7 +100,10 @@ describe("the drop to take in hand", () => {
 
   it("is the first needed one that is missing, then the rest", () => {
     expect(nextSpot(list, [], false)).toEqual({ point: "opening-front", side: "right" });
-    expect(nextSpot(list, [], false, { point: "opening-front", side: "right" })).toEqual({ point: "datum-front", side: "left" });
+    expect(nextSpot(list, [], false, { point: "opening-front", side: "right" })).toEqual({
+      point: "datum-front",
+      side: "left",
+    });
     const unsent = [kept("opening-front", "right"), kept("datum-front", "left")];
     expect(nextSpot(list, unsent, false)).toEqual({ point: "axle-end", side: "left" });
   });
@@ -76,7 +114,10 @@ describe("the drop to take in hand", () => {
   });
 
   it("is an old one while a new level waits for it", () => {
-    const old = [drop("opening-front", "left", null), drop("opening-rear", "left", reading({ stands: false }))];
+    const old = [
+      drop("opening-front", "left", null),
+      drop("opening-rear", "left", reading({ stands: false })),
+    ];
     expect(nextSpot(old, [], true)).toEqual({ point: "opening-rear", side: "left" });
   });
 
@@ -86,7 +127,11 @@ describe("the drop to take in hand", () => {
 });
 
 it("puts the two sides of a point beside each other, in the order of dropping", () => {
-  const rows = rowsOf([drop("datum-front", "left", null), drop("opening-front", "left", null), drop("opening-front", "right", null)]);
+  const rows = rowsOf([
+    drop("datum-front", "left", null),
+    drop("opening-front", "left", null),
+    drop("opening-front", "right", null),
+  ]);
   expect(rows.map((row) => [row.point.id, row.drops.length])).toEqual([
     ["opening-front", 2],
     ["datum-front", 1],

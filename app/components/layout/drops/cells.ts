@@ -32,7 +32,8 @@ export function cellOf(drop: DropView, unsent: readonly Unsent[], unit: LengthUn
   if (mine?.refused) return { state: "not-taken", sign: "off", words: "not taken", detail: mine.refused };
   if (mine) return { state: "kept-here", sign: "unsent", words: "kept here", detail: "not sent" };
   const { reading } = drop;
-  if (!reading) return { state: "to-drop", sign: "todo", words: "to drop", detail: drop.needed ? "" : "if wanted" };
+  if (!reading)
+    return { state: "to-drop", sign: "todo", words: "to drop", detail: drop.needed ? "" : "if wanted" };
   const words = onTape(reading.at.x, unit);
   const detail = offLine(reading.at.y, unit);
   if (!reading.stands) return { state: "waiting", sign: "void", words, detail: "waits for the level" };
@@ -49,7 +50,8 @@ export function rowsOf(drops: readonly DropView[]): { point: DropPoint; drops: D
 }
 
 const isSettled = (drop: DropView, unsent: readonly Unsent[]): boolean =>
-  unsentOf(unsent, subjectOf(drop))?.refused === null || (drop.reading !== null && drop.reading.stands && !drop.reading.suspect);
+  unsentOf(unsent, subjectOf(drop))?.refused === null ||
+  (drop.reading?.stands === true && !drop.reading.suspect);
 
 /**
  * The drop to take in hand: under a new level an old one, then tapes that do not meet, then what is needed, then the
@@ -63,7 +65,9 @@ export function nextSpot(
 ): Spot | null {
   const at = drops.findIndex((drop) => sameSpot(drop, after));
   const order = [...drops.slice(at + 1), ...drops.slice(0, at + 1)].filter((drop) => !sameSpot(drop, after));
-  const old = redropWanted ? order.find((drop) => drop.reading !== null && !drop.reading.stands && drop.needed) : undefined;
+  const old = redropWanted
+    ? order.find((drop) => drop.reading !== null && !drop.reading.stands && drop.needed)
+    : undefined;
   const found =
     old ??
     order.find((drop) => drop.reading?.suspect && !isSettled(drop, unsent)) ??

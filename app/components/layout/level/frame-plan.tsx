@@ -23,7 +23,12 @@ export function FramePlan({ stands, inHand, spread }: Props) {
   const railY = Math.max(26, ...known.map((stand) => Math.abs(stand.y) * k));
   const railX = Math.max(110, ...known.map((stand) => Math.abs(stand.x) * k)) + 22;
   return (
-    <svg viewBox={`0 0 ${W} ${H}`} className="level-plan" role="img" aria-label="The stands under the frame, from above, nose to the right">
+    <svg
+      viewBox={`0 0 ${W} ${H}`}
+      className="level-plan"
+      role="img"
+      aria-label="The stands under the frame, from above, nose to the right"
+    >
       {CROSS_MEMBERS.map((at) => (
         <rect
           key={at}
@@ -50,7 +55,13 @@ export function FramePlan({ stands, inHand, spread }: Props) {
         className="stroke-line"
         strokeDasharray="14 4 3 4"
       />
-      <text x={MID.x + 70} y={MID.y - 6} textAnchor="middle" fontSize={15} className="fill-concrete-700 font-label">
+      <text
+        x={MID.x + 3}
+        y={MID.y - 7}
+        textAnchor="middle"
+        fontSize={15}
+        className="fill-concrete-700 font-label"
+      >
         nose →
       </text>
       {known.map((stand) => (

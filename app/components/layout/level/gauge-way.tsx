@@ -3,15 +3,23 @@ import { formatDegrees } from "../../../domain/units/angle";
 import { Sign } from "../../../ui/sign";
 import { ReadingField } from "../reading-field";
 import { angleIn, GAUGE_PLACES, slopeAt } from "./gauge";
-import type { LevelWay } from "./level-way";
 import { twistDegreesWords } from "./level-verdict";
+import type { LevelWay } from "./level-way";
 
 /** The angle gauge, read and turned end for end at four places: its own error cancels. */
-export function GaugeWay({ draft, change, fields, readOnly, check, now }: LevelWay & { now: GaugeLevel | null }) {
+export function GaugeWay({
+  draft,
+  change,
+  fields,
+  readOnly,
+  check,
+  now,
+}: LevelWay & { now: GaugeLevel | null }) {
   return (
     <div className="grid gap-2.5 p-2.5">
       <p className="flex items-center gap-2 px-1 text-[15px] text-concrete-700">
-        <Sign name="turn" size={22} /> Read, turn the gauge end for end on the same spot, read again. Minus is typed as −.
+        <Sign name="turn" size={22} /> Read, turn the gauge end for end on the same spot, read again. Minus is
+        typed as −.
       </p>
       <div className="grid gap-2.5 sm:grid-cols-2">
         {GAUGE_PLACES.map(({ id, label, plus }) => {
@@ -52,7 +60,9 @@ export function GaugeWay({ draft, change, fields, readOnly, check, now }: LevelW
       {now ? (
         <p role="status" className="px-1 text-[15px] text-concrete-700">
           {now.gaugeDoubt ? (
-            <b className="font-semibold text-oxide">The gauge's own error changed between places: do not trust it. </b>
+            <b className="font-semibold text-oxide">
+              The gauge's own error changed between places: do not trust it.{" "}
+            </b>
           ) : (
             `The gauge itself reads ${formatDegrees(now.gaugeOffset)} off; turning it took that out. `
           )}

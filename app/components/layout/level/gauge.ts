@@ -29,7 +29,12 @@ export function gaugeNow(draft: Draft): GaugeLevel | null {
     const [first, turned] = [angleIn(draft[`first.${place}`]), angleIn(draft[`turned.${place}`])];
     return first === null || turned === null ? null : { first, turned };
   };
-  const [leftRail, rightRail, frontCross, rearCross] = [at("leftRail"), at("rightRail"), at("frontCross"), at("rearCross")];
+  const [leftRail, rightRail, frontCross, rearCross] = [
+    at("leftRail"),
+    at("rightRail"),
+    at("frontCross"),
+    at("rearCross"),
+  ];
   return leftRail && rightRail && frontCross && rearCross
     ? levelFromAngles({ leftRail, rightRail, frontCross, rearCross })
     : null;
@@ -39,6 +44,7 @@ export function gaugeNow(draft: Draft): GaugeLevel | null {
 export function postedGauge(draft: Draft): Draft {
   const fields: Draft = { method: "gauge" };
   for (const { id } of GAUGE_PLACES)
-    for (const way of ["first", "turned"] as const) fields[`${way}.${id}`] = draft[`${way}.${id}`]?.trim() ?? "";
+    for (const way of ["first", "turned"] as const)
+      fields[`${way}.${id}`] = draft[`${way}.${id}`]?.trim() ?? "";
   return fields;
 }

@@ -4,10 +4,10 @@ import { formatDegrees } from "../../../domain/units/angle";
 import { mm } from "../../../domain/units/length";
 import { EntryDock } from "../entry-dock";
 import { lengthIn, withUnit } from "../lengths";
-import type { LevelWay } from "./level-way";
 import { FramePlan } from "./frame-plan";
-import { acrossOf, nextUnread, type HeightsNow, type Place } from "./heights";
+import { acrossOf, type HeightsNow, nextUnread, type Place } from "./heights";
 import { twistWords } from "./level-verdict";
+import type { LevelWay } from "./level-way";
 import { StandCard } from "./stand-cards";
 
 type Props = LevelWay & { places: readonly Place[]; now: HeightsNow };
@@ -19,16 +19,23 @@ export function HeightsWay({ view, places, now, draft, change, fields, readOnly,
   const cards = useRef<HTMLDivElement>(null);
   const place = places.find((one) => one.id === inHand) ?? null;
   const next = place ? nextUnread(places, draft, place.id) : null;
-  const focusOn = (id: string) => cards.current?.querySelector<HTMLInputElement>(`[name="height.${id}"]`)?.focus();
+  const focusOn = (id: string) =>
+    cards.current?.querySelector<HTMLInputElement>(`[name="height.${id}"]`)?.focus();
   const keep = () => {
     if (next) return focusOn(next.id);
     if (!now.missing) check();
   };
-  const before = new Map(view.level?.readings.map((reading) => [reading.place, reading.height?.typed ?? null]));
+  const before = new Map(
+    view.level?.readings.map((reading) => [reading.place, reading.height?.typed ?? null]),
+  );
   return (
     <>
       <div className="stand-cards" ref={cards}>
-        <FramePlan stands={planStands(places, draft, unit)} inHand={inHand} spread={spreadWords(places, draft, unit)} />
+        <FramePlan
+          stands={planStands(places, draft, unit)}
+          inHand={inHand}
+          spread={spreadWords(places, draft, unit)}
+        />
         {places.map((one) => (
           <StandCard
             key={one.id}
@@ -51,7 +58,11 @@ export function HeightsWay({ view, places, now, draft, change, fields, readOnly,
       {place && !readOnly ? (
         <EntryDock
           what={`${place.label} stand`}
-          hint={before.get(place.id) ? `was ${before.get(place.id)}: read it again` : "height of the frame over the water level or laser"}
+          hint={
+            before.get(place.id)
+              ? `was ${before.get(place.id)}: read it again`
+              : "height of the frame over the water level or laser"
+          }
           value={draft[`height.${place.id}`] ?? ""}
           onChange={(value) => change({ [`height.${place.id}`]: value })}
           onKeep={keep}
@@ -76,7 +87,8 @@ function AfterWords({ now, unit }: { now: HeightsNow; unit: LevelWay["view"]["un
     <p className="stand-after" role="status">
       {raises ? (
         <b className="font-semibold">
-          Raised so, it stands {nose === right ? `${nose.replace("−", "")} both ways` : `${nose} along, ${right} across`}.{" "}
+          Raised so, it stands{" "}
+          {nose === right ? `${nose.replace("−", "")} both ways` : `${nose} along, ${right} across`}.{" "}
         </b>
       ) : null}
       <span className="text-concrete-700">{twist}</span>
@@ -90,7 +102,11 @@ function planStands(places: readonly Place[], draft: LevelWay["draft"], unit: Le
   const known = xs.filter((x) => x !== null);
   if (known.length < 2) return CORNERS;
   const mid = (Math.max(...known) + Math.min(...known)) / 2;
-  return places.map((place, i) => ({ place: place.id, x: minus(xs[i] ?? null, mid), y: acrossOf(place, draft, unit) }));
+  return places.map((place, i) => ({
+    place: place.id,
+    x: minus(xs[i] ?? null, mid),
+    y: acrossOf(place, draft, unit),
+  }));
 }
 
 const minus = (x: number | null, mid: number): number | null => (x === null ? null : x - mid);
@@ -104,7 +120,11 @@ const CORNERS = [
 ];
 
 /** "stands 108 in apart, 30 in across"; null while that is not known. */
-function spreadWords(places: readonly Place[], draft: LevelWay["draft"], unit: LevelWay["view"]["unit"]): string | null {
+function spreadWords(
+  places: readonly Place[],
+  draft: LevelWay["draft"],
+  unit: LevelWay["view"]["unit"],
+): string | null {
   const xs = places.flatMap((place) => lengthIn(draft[`x.${place.id}`], unit) ?? []);
   const ys = places.flatMap((place) => acrossOf(place, draft, unit) ?? []);
   if (xs.length < 2 || ys.length < 2) return null;

@@ -39,7 +39,9 @@ describe("a level by the heights that are typed", () => {
   it("waits for what is missing, in words", () => {
     expect(heightsNow(places, heights, "in", shim).missing).toBe("Say where the stands are first.");
     const { "height.left-rear": _, ...three } = heights;
-    expect(heightsNow(places, { ...stands, ...three }, "in", shim).missing).toBe("One stand is still to be read.");
+    expect(heightsNow(places, { ...stands, ...three }, "in", shim).missing).toBe(
+      "One stand is still to be read.",
+    );
     expect(heightsNow(places, { ...stands, "height.left-front": "24 1/" }, "in", shim).missing).toBe(
       "4 stands are still to be read.",
     );

@@ -1,4 +1,9 @@
-import { type LevelReading, levelFromHeights, type StandHeight, standCorrections } from "../../../domain/layout/level";
+import {
+  type LevelReading,
+  levelFromHeights,
+  type StandHeight,
+  standCorrections,
+} from "../../../domain/layout/level";
 import type { LevelView } from "../../../domain/layout/view";
 import { type LengthUnit, type Millimetres, mm } from "../../../domain/units/length";
 import { lengthIn } from "../lengths";
@@ -15,7 +20,10 @@ const CORNERS: readonly Place[] = [
 
 /** The four corners, and as many stands more as were put under. */
 export function placesOf(extras: number): Place[] {
-  const more = Array.from({ length: extras }, (_, i): Place => ({ id: `extra-${i + 1}`, label: `Extra stand ${i + 1}`, side: "left" }));
+  const more = Array.from(
+    { length: extras },
+    (_, i): Place => ({ id: `extra-${i + 1}`, label: `Extra stand ${i + 1}`, side: "left" }),
+  );
   return [...CORNERS, ...more];
 }
 
@@ -34,8 +42,15 @@ const unsigned = (typed: string): string => typed.replace(/^\s*[-−–]\s*/, ""
 export function firstTexts(level: LevelView | null): Draft {
   const texts: Draft = {};
   for (const reading of level?.readings ?? []) {
+    if (level?.state !== "void" && reading.firstDeg !== null)
+      texts[`first.${reading.place}`] = String(reading.firstDeg);
+    if (level?.state !== "void" && reading.turnedDeg !== null)
+      texts[`turned.${reading.place}`] = String(reading.turnedDeg);
     if (reading.x) texts[`x.${reading.place}`] = reading.x.typed;
-    if (reading.y) texts[`y.${reading.place}`] = placesOf(0).some((one) => one.id === reading.place) ? unsigned(reading.y.typed) : reading.y.typed;
+    if (reading.y)
+      texts[`y.${reading.place}`] = placesOf(0).some((one) => one.id === reading.place)
+        ? unsigned(reading.y.typed)
+        : reading.y.typed;
     if (reading.height && level?.state !== "void") texts[`height.${reading.place}`] = reading.height.typed;
   }
   return texts;
@@ -58,7 +73,12 @@ export type HeightsNow = {
 };
 
 /** The level by what is typed now, and what to do at each stand. */
-export function heightsNow(places: readonly Place[], draft: Draft, unit: LengthUnit, shim: Millimetres): HeightsNow {
+export function heightsNow(
+  places: readonly Place[],
+  draft: Draft,
+  unit: LengthUnit,
+  shim: Millimetres,
+): HeightsNow {
   const none = { level: null, moves: new Map<string, Millimetres>(), after: null };
   const stands: StandHeight[] = [];
   let placeless = 0;
@@ -73,7 +93,10 @@ export function heightsNow(places: readonly Place[], draft: Draft, unit: LengthU
   }
   if (placeless > 0) return { ...none, missing: "Say where the stands are first." };
   if (unread > 0)
-    return { ...none, missing: unread === 1 ? "One stand is still to be read." : `${unread} stands are still to be read.` };
+    return {
+      ...none,
+      missing: unread === 1 ? "One stand is still to be read." : `${unread} stands are still to be read.`,
+    };
   const level = levelFromHeights(stands);
   if (!level.ok) return { ...none, missing: level.problem };
   const todo = standCorrections(stands, { mode: "raise", shim });

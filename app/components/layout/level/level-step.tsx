@@ -34,7 +34,8 @@ function LevelCheck({ view, may, done }: Props) {
   const first = firstTexts(level);
   const { draft, change, reset } = useDraft(`plumbay.layout.${view.id}.level`, first);
   const [extras, setExtras] = useState(() => extrasIn(Object.keys(first)));
-  const way = draft.method === "gauge" || draft.method === "heights" ? draft.method : (level?.method ?? "heights");
+  const way =
+    draft.method === "gauge" || draft.method === "heights" ? draft.method : (level?.method ?? "heights");
   const pad = usePad();
   const sending = usePost(done);
   const places = placesOf(Math.max(extras, extrasIn(Object.keys(draft))));
@@ -42,13 +43,23 @@ function LevelCheck({ view, may, done }: Props) {
   const gauge = gaugeNow(draft);
   const typed = way === "heights" ? heights.level : gauge;
   const posted = way === "heights" ? postedHeights(places, draft) : postedGauge(draft);
-  const dirty = isDirty(posted, way === "heights" ? postedHeights(places, first) : postedGauge(first)) && (way === "gauge" ? gauge !== null : true);
-  const shown = dirty || level?.state === "void" ? typed : level && { noseHigh: level.noseHighDeg, rightHigh: level.rightHighDeg };
+  const dirty =
+    isDirty(posted, way === "heights" ? postedHeights(places, first) : postedGauge(first)) &&
+    (way === "gauge" ? gauge !== null : true);
+  const shown =
+    dirty || level?.state === "void"
+      ? typed
+      : level && { noseHigh: level.noseHighDeg, rightHigh: level.rightHighDeg };
   const check = async () => {
     const answer = await sending.send(`/layouts/${view.id}/level`, posted);
     if (answer?.ok) reset(draft);
   };
-  const readAgain = () => change(Object.fromEntries(Object.keys(draft).flatMap((name) => (/^(height|first|turned)\./.test(name) ? [[name, ""]] : []))));
+  const readAgain = () =>
+    change(
+      Object.fromEntries(
+        Object.keys(draft).flatMap((name) => (/^(height|first|turned)\./.test(name) ? [[name, ""]] : [])),
+      ),
+    );
   const props: LevelWay = {
     view,
     draft,
@@ -62,7 +73,15 @@ function LevelCheck({ view, may, done }: Props) {
   const isTrue = level?.state === "true" && !dirty;
   return (
     <>
-      <LevelVerdict view={view} typed={typed} dirty={dirty} missing={way === "heights" ? heights.missing : null} allowed={settings.allowedSlopeDeg} />
+      <div className="level-verdict">
+        <LevelVerdict
+          view={view}
+          typed={typed}
+          dirty={dirty}
+          missing={way === "heights" ? heights.missing : null}
+          allowed={settings.allowedSlopeDeg}
+        />
+      </div>
       <div className="level-ways" role="group" aria-label="Read with">
         {WAYS.map(({ id, label }) => (
           <button key={id} type="button" aria-pressed={way === id} onClick={() => change({ method: id })}>
@@ -70,13 +89,25 @@ function LevelCheck({ view, may, done }: Props) {
           </button>
         ))}
         <p className="ml-auto font-label text-[15px] text-concrete-700">
-          {view.levelRounds === 0 ? "First round" : `${level?.state === "void" || dirty ? "After round" : "Round"} ${view.levelRounds}`}
+          {view.levelRounds === 0
+            ? "First round"
+            : `${level?.state === "void" || dirty ? "After round" : "Round"} ${view.levelRounds}`}
         </p>
       </div>
-      {way === "heights" ? <HeightsWay {...props} places={places} now={heights} /> : <GaugeWay {...props} now={gauge} />}
-      {shown ? (
-        <LevelViews noseHighDeg={shown.noseHigh} rightHighDeg={shown.rightHigh} allowedDeg={level?.allowedDeg ?? settings.allowedSlopeDeg} />
-      ) : null}
+      <div className="level-main">
+        {way === "heights" ? (
+          <HeightsWay {...props} places={places} now={heights} />
+        ) : (
+          <GaugeWay {...props} now={gauge} />
+        )}
+        {shown ? (
+          <LevelViews
+            noseHighDeg={shown.noseHigh}
+            rightHighDeg={shown.rightHigh}
+            allowedDeg={level?.allowedDeg ?? settings.allowedSlopeDeg}
+          />
+        ) : null}
+      </div>
       <div className="level-acts">
         {sending.trouble ? (
           <p role="alert" className="w-full font-medium text-oxide">
@@ -84,7 +115,13 @@ function LevelCheck({ view, may, done }: Props) {
           </p>
         ) : null}
         {may.measure && !isTrue ? (
-          <Button tone={typed ? "go" : "plain"} size="l" busy={sending.busy} disabled={!typed || (!dirty && level?.state !== "void")} onClick={props.check}>
+          <Button
+            tone={typed ? "go" : "plain"}
+            size="l"
+            busy={sending.busy}
+            disabled={!typed || (!dirty && level?.state !== "void")}
+            onClick={props.check}
+          >
             Check level
           </Button>
         ) : null}
@@ -95,7 +132,11 @@ function LevelCheck({ view, may, done }: Props) {
           </Button>
         ) : null}
         {may.measure && level?.state === "true" ? (
-          <VoidLevel layoutId={view.id} dropsKept={view.drops.filter((drop) => drop.reading?.stands).length} done={done} />
+          <VoidLevel
+            layoutId={view.id}
+            dropsKept={view.drops.filter((drop) => drop.reading?.stands).length}
+            done={done}
+          />
         ) : null}
       </div>
       {way === "heights" ? (
@@ -121,7 +162,10 @@ function isDirty(now: Record<string, string>, before: Record<string, string>): b
 
 function NextAfter({ view }: { view: LayoutView }) {
   const redrop = view.level?.redrop.state === "wanted";
-  const next = redrop || view.marks ? { id: "drops", label: redrop ? "Drop one old point again" : "Go to Drops" } : { id: "marks", label: "Go to Control marks" };
+  const next =
+    redrop || view.marks
+      ? { id: "drops", label: redrop ? "Drop one old point again" : "Go to Drops" }
+      : { id: "marks", label: "Go to Control marks" };
   return (
     <Link to={`/layouts/${view.id}/step/${next.id}`} className={buttonClass("go", "l")}>
       {next.label}

@@ -1,4 +1,4 @@
-import { landsOut, type LevelReading, levelVerdict } from "../../../domain/layout/level";
+import { type LevelReading, landsOut, levelVerdict } from "../../../domain/layout/level";
 import type { LayoutView } from "../../../domain/layout/view";
 import { type Degrees, degrees, formatDegrees } from "../../../domain/units/angle";
 import { inches, type LengthUnit, mm } from "../../../domain/units/length";
@@ -10,13 +10,22 @@ import { smallLength, withUnit } from "../lengths";
 const EXAMPLE_HEIGHT = inches(30);
 
 /** What the slope would cost on the floor, in words; null when it costs nothing to speak of. */
-export function costWords(reading: Pick<LevelReading, "noseHigh" | "rightHigh">, unit: LengthUnit): string | null {
+export function costWords(
+  reading: Pick<LevelReading, "noseHigh" | "rightHigh">,
+  unit: LengthUnit,
+): string | null {
   const side = Math.abs(reading.rightHigh) >= Math.abs(reading.noseHigh);
   const slope = side ? reading.rightHigh : reading.noseHigh;
   const out = mm(Math.abs(landsOut(EXAMPLE_HEIGHT, slope)));
   const words = smallLength(out, unit);
   if (words.startsWith("under") || out < 0.05) return null;
-  const way = side ? (slope > 0 ? "out to the left" : "out to the right") : slope > 0 ? "out to the rear" : "out to the front";
+  const way = side
+    ? slope > 0
+      ? "out to the left"
+      : "out to the right"
+    : slope > 0
+      ? "out to the rear"
+      : "out to the front";
   return `As it stands, a point ${withUnit(EXAMPLE_HEIGHT, unit)} up lands ${words} ${way}.`;
 }
 
@@ -47,15 +56,27 @@ export function LevelVerdict({ view, typed, dirty, missing, allowed }: Props) {
       />
     );
   const reading = { noseHigh: level.noseHighDeg, rightHigh: level.rightHighDeg };
-  return <Reading view={view} reading={reading} allowed={level.allowedDeg} checked={clock(level.made.at, view.shop.timeZone)} />;
+  return (
+    <Reading
+      view={view}
+      reading={reading}
+      allowed={level.allowedDeg}
+      checked={clock(level.made.at, view.shop.timeZone)}
+    />
+  );
 }
 
-type ReadingProps = Pick<Props, "view" | "allowed"> & { reading: Pick<LevelReading, "noseHigh" | "rightHigh">; checked: string | null };
+type ReadingProps = Pick<Props, "view" | "allowed"> & {
+  reading: Pick<LevelReading, "noseHigh" | "rightHigh">;
+  checked: string | null;
+};
 
 function Reading({ view, reading, allowed, checked }: ReadingProps) {
   const verdict = levelVerdict(reading, allowed);
   const cost = costWords(reading, view.unit);
-  const said = checked ? `Read ${checked} by ${view.level?.made.name}.` : "Not kept yet: check it to make it count.";
+  const said = checked
+    ? `Read ${checked} by ${view.level?.made.name}.`
+    : "Not kept yet: check it to make it count.";
   if (verdict.isTrue)
     return (
       <Verdict

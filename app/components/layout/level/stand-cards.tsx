@@ -1,7 +1,6 @@
-import type { Millimetres } from "../../../domain/units/length";
-import type { LengthUnit } from "../../../domain/units/length";
-import { Sign } from "../../../ui/sign";
+import type { LengthUnit, Millimetres } from "../../../domain/units/length";
 import { Inches } from "../../../ui/length";
+import { Sign } from "../../../ui/sign";
 import { lengthIn, understood } from "../lengths";
 import { ReadingField } from "../reading-field";
 import type { Draft } from "../use-draft";
@@ -24,7 +23,20 @@ type Props = {
 };
 
 /** One stand: its height as read, and what to do with it. */
-export function StandCard({ place, draft, unit, inHand, raise, before, padUp, readOnly, error, onChange, onKeep, onHand }: Props) {
+export function StandCard({
+  place,
+  draft,
+  unit,
+  inHand,
+  raise,
+  before,
+  padUp,
+  readOnly,
+  error,
+  onChange,
+  onKeep,
+  onHand,
+}: Props) {
   const value = draft[`height.${place.id}`] ?? "";
   const read = understood(value, unit);
   const problem = read && "problem" in read && !inHand ? read.problem : undefined;

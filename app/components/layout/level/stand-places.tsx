@@ -31,8 +31,8 @@ export function StandPlaces({ places, draft, open, readOnly, fields, change, add
       </summary>
       <div className="grid gap-4 px-4 pb-4">
         <p className="max-w-2xl text-[15px] text-concrete-700">
-          All in a rectangle? Type it once here. Otherwise each stand for itself, ahead of the rear pair and out from the
-          frame's centre line.
+          All in a rectangle? Type it once here. Otherwise each stand for itself, ahead of the rear pair and
+          out from the frame's centre line.
         </p>
         {readOnly ? null : (
           <div className="grid max-w-xl gap-4 sm:grid-cols-2">

@@ -4,10 +4,23 @@ import { Dialog } from "../../../ui/dialog";
 import { Field } from "../../../ui/field";
 import { usePost } from "../use-post";
 
-const REASONS = ["A stand was touched", "The vehicle moved", "A heavy part went on or off", "Another day began"];
+const REASONS = [
+  "A stand was touched",
+  "The vehicle moved",
+  "A heavy part went on or off",
+  "Another day began",
+];
 
 /** The press that voids a level which is true: whoever touched a stand says so here, and what it was. */
-export function VoidLevel({ layoutId, dropsKept, done }: { layoutId: number; dropsKept: number; done: () => void }) {
+export function VoidLevel({
+  layoutId,
+  dropsKept,
+  done,
+}: {
+  layoutId: number;
+  dropsKept: number;
+  done: () => void;
+}) {
   const [open, setOpen] = useState(false);
   const [reason, setReason] = useState(REASONS[0] ?? "");
   const { busy, trouble, fields, send } = usePost(done);
@@ -31,19 +44,31 @@ export function VoidLevel({ layoutId, dropsKept, done }: { layoutId: number; dro
             <Button size="l" data-autofocus onClick={() => setOpen(false)}>
               Leave it true
             </Button>
-            <Button tone="stop" size="l" busy={busy} disabled={reason.trim() === ""} onClick={() => void say()}>
+            <Button
+              tone="stop"
+              size="l"
+              busy={busy}
+              disabled={reason.trim() === ""}
+              onClick={() => void say()}
+            >
               Void the level
             </Button>
           </>
         }
       >
         <p>
-          {dropsKept > 0 ? `${dropsKept} ${dropsKept === 1 ? "drop waits" : "drops wait"} then. ` : ""}The way back: level again,
-          then drop one old point again. An approval under it is void as well.
+          {dropsKept > 0 ? `${dropsKept} ${dropsKept === 1 ? "drop waits" : "drops wait"} then. ` : ""}The way
+          back: level again, then drop one old point again. An approval under it is void as well.
         </p>
         <div className="grid gap-2 sm:grid-cols-2">
           {REASONS.map((words) => (
-            <Button key={words} size="l" aria-pressed={reason === words} className={reason === words ? "border-brass-ink bg-brass-wash" : ""} onClick={() => setReason(words)}>
+            <Button
+              key={words}
+              size="l"
+              aria-pressed={reason === words}
+              className={reason === words ? "border-brass-ink bg-brass-wash" : ""}
+              onClick={() => setReason(words)}
+            >
               {words}
             </Button>
           ))}

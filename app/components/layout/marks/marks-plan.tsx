@@ -18,14 +18,24 @@ export function MarksPlan({ marks, spread }: { marks: readonly Mark[]; spread: s
   });
   const others = marks.filter((mark) => mark !== a && mark !== b);
   return (
-    <svg viewBox={`0 0 640 ${height}`} className="block w-full" role="img" aria-label="The control marks of this bay, from above">
+    <svg
+      viewBox={`0 0 640 ${height}`}
+      className="block w-full"
+      role="img"
+      aria-label="The control marks of this bay, from above"
+    >
       {a && b ? <ChalkLine from={at(a)} to={at(b)} words={spread} /> : null}
       {others.flatMap((mark) =>
         [a, b].map((end) => {
           if (!end) return null;
           const [p, q] = [at(mark), at(end)];
           return (
-            <path key={mark.label + end.label} d={`M${p.x} ${p.y}L${q.x} ${q.y}`} opacity={0.4} className="stroke-line" />
+            <path
+              key={mark.label + end.label}
+              d={`M${p.x} ${p.y}L${q.x} ${q.y}`}
+              opacity={0.4}
+              className="stroke-line"
+            />
           );
         }),
       )}
@@ -34,10 +44,19 @@ export function MarksPlan({ marks, spread }: { marks: readonly Mark[]; spread: s
         const inHand = mark === a || mark === b;
         return (
           <g key={mark.label}>
-            {inHand ? <circle cx={x} cy={y} r={15} fill="none" strokeWidth={2.4} className="stroke-brass-ink" /> : null}
+            {inHand ? (
+              <circle cx={x} cy={y} r={15} fill="none" strokeWidth={2.4} className="stroke-brass-ink" />
+            ) : null}
             <circle cx={x} cy={y} r={6} strokeWidth={1.4} className="fill-brass stroke-ink" />
             <circle cx={x} cy={y} r={1.6} className="fill-ink" />
-            <text x={x} y={y - 22} textAnchor="middle" fontSize={30} fontWeight={800} className="fill-ink font-label">
+            <text
+              x={x}
+              y={y - 22}
+              textAnchor="middle"
+              fontSize={30}
+              fontWeight={800}
+              className="fill-ink font-label"
+            >
               {mark.label}
             </text>
           </g>

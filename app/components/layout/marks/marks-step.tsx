@@ -16,7 +16,9 @@ import { MarksPlan } from "./marks-plan";
 /** A to B taped against what the bay's marks were surveyed at: a wrong or worn tape shows here, before it costs anything. */
 export function MarksStep({ view, may, done }: { view: LayoutView; may: May; done: () => void }) {
   const { bay, unit, settings, marks, shop } = view;
-  const { draft, change, reset } = useDraft(`plumbay.layout.${view.id}.marks`, { taped: marks?.taped.typed ?? "" });
+  const { draft, change, reset } = useDraft(`plumbay.layout.${view.id}.marks`, {
+    taped: marks?.taped.typed ?? "",
+  });
   const sending = usePost(done);
   const pad = usePad();
   const [a, b] = ["A", "B"].map((label) => bay.marks.find((mark) => mark.label === label));
@@ -47,7 +49,11 @@ export function MarksStep({ view, may, done }: { view: LayoutView; may: May; don
           tone={fits ? (dirty ? "in-hand" : "true") : "not-true"}
           sign={fits ? "control-mark" : "off"}
           size="l"
-          title={fits ? `The tape agrees with the floor: ${agreeWords(off, unit)}.` : `${smallLength(off, unit)} ${off > 0 ? "longer" : "shorter"} than the survey. Not the same floor.`}
+          title={
+            fits
+              ? `The tape agrees with the floor: ${agreeWords(off, unit)}.`
+              : `${smallLength(off, unit)} ${off > 0 ? "longer" : "shorter"} than the survey. Not the same floor.`
+          }
           detail={
             fits
               ? `Survey ${knownWords}. ${dirty || !marks ? "Not kept yet." : `Kept ${clock(marks.made.at, shop.timeZone)} by ${marks.made.name}.`}`
@@ -57,7 +63,10 @@ export function MarksStep({ view, may, done }: { view: LayoutView; may: May; don
         />
       )}
       <div className="grid gap-4 p-4">
-        <MarksPlan marks={bay.marks} spread={off === null ? knownWords : withUnit(typed ?? marks?.taped.mm ?? mm(0), unit)} />
+        <MarksPlan
+          marks={bay.marks}
+          spread={off === null ? knownWords : withUnit(typed ?? marks?.taped.mm ?? mm(0), unit)}
+        />
         <div className="flex flex-wrap items-end gap-3">
           <div className="min-w-60 flex-1">
             <ReadingField

@@ -1,1 +1,10 @@
-export const action = () => Response.json({ message: "Not built yet" }, { status: 501 });
+import { readForm } from "~/http/form.server";
+import { answer, idParam, serviceContext } from "~/http/request.server";
+import { approveOption } from "~/services/layouts/approve-option.server";
+import { ApproveForm } from "~/validation/layout";
+import type { Route } from "./+types/approve";
+
+export async function action({ request, params, context }: Route.ActionArgs) {
+  const form = await request.formData();
+  return answer(form, () => approveOption(serviceContext(context), idParam(params.layoutId), readForm(form, ApproveForm).key || null));
+}

@@ -1,1 +1,13 @@
-export const action = () => Response.json({ message: "Not built yet" }, { status: 501 });
+import { measuringContext, readOr } from "~/http/layout-form.server";
+import { answer, idParam } from "~/http/request.server";
+import { chooseAxleLine } from "~/services/layouts/choose-axle-line.server";
+import { readAxleForm } from "~/validation/layout";
+import type { Route } from "./+types/axle-line";
+
+export async function action({ request, params, context }: Route.ActionArgs) {
+  const form = await request.formData();
+  return answer(form, async () => {
+    const { ctx, unit } = await measuringContext(context);
+    return chooseAxleLine(ctx, idParam(params.layoutId), readOr(readAxleForm(form, unit)));
+  });
+}

@@ -1,1 +1,13 @@
-export const action = () => Response.json({ message: "Not built yet" }, { status: 501 });
+import { measuringContext, readOr } from "~/http/layout-form.server";
+import { answer, idParam } from "~/http/request.server";
+import { confirmMarks } from "~/services/layouts/confirm-marks.server";
+import { readMarksForm } from "~/validation/layout";
+import type { Route } from "./+types/marks";
+
+export async function action({ request, params, context }: Route.ActionArgs) {
+  const form = await request.formData();
+  return answer(form, async () => {
+    const { ctx, unit } = await measuringContext(context);
+    return confirmMarks(ctx, idParam(params.layoutId), readOr(readMarksForm(form, unit)));
+  });
+}

@@ -1,1 +1,10 @@
-export const action = () => Response.json({ message: "Not built yet" }, { status: 501 });
+import { readForm } from "~/http/form.server";
+import { answer, idParam, serviceContext } from "~/http/request.server";
+import { voidLevelByHand } from "~/services/layouts/void-level-by-hand.server";
+import { VoidForm } from "~/validation/layout";
+import type { Route } from "./+types/void-level";
+
+export async function action({ request, params, context }: Route.ActionArgs) {
+  const form = await request.formData();
+  return answer(form, () => voidLevelByHand(serviceContext(context), idParam(params.layoutId), readForm(form, VoidForm).reason));
+}

@@ -1,0 +1,101 @@
+import { type ReactNode, useEffect, useRef, useState } from "react";
+import type { StepId } from "../../domain/layout/steps";
+import type { LayoutView } from "../../domain/layout/view";
+import type { LiveStatus } from "../../realtime/live-status";
+import { useNow } from "../wall/use-now";
+import { ApprovalStep } from "./choose/approval-step";
+import { AxleLineStep } from "./choose/axle-line-step";
+import { OptionsStep } from "./choose/options-step";
+import { DropsStep } from "./drops/drops-step";
+import { whyShutIn } from "./facts";
+import { LayoutHead } from "./layout-head";
+import { LevelStep } from "./level/level-step";
+import { MarksStep } from "./marks/marks-step";
+import type { May } from "./may";
+import { ShutStep } from "./shut-step";
+import { StandsStep } from "./stands/stands-step";
+import { StepsRail } from "./steps-rail";
+import { useUnsent } from "./use-unsent";
+import "./layout.css";
+
+type Props = {
+  view: LayoutView;
+  step: StepId;
+  may: May;
+  person: string;
+  servedAt: string;
+  live: LiveStatus;
+  /** Reads the layout again. */
+  refresh: () => void;
+};
+
+/** A layout with one of its steps in hand. */
+export function LayoutPage({ view, step, may, person, servedAt, live, refresh }: Props) {
+  const now = useNow(servedAt, 10_000);
+  const outbox = useUnsent(view.id, person, live.state === "live", refresh);
+  const shut = whyShutIn(view, step);
+  return (
+    <>
+      <LayoutHead view={view} person={person} now={now} live={live} outbox={outbox} />
+      <LevelNews view={view} />
+      <div className="layout-body">
+        <StepsRail layoutId={view.id} steps={view.steps} current={step} />
+        <main className="layout-work" aria-label={view.steps.find((one) => one.id === step)?.label}>
+          {step === "drops" ? (
+            <DropsStep view={view} may={may} outbox={outbox} shut={shut} />
+          ) : (
+            <>
+              {shut ? <ShutStep view={view} step={step} why={shut} /> : null}
+              {stepIn({ view, step, may: shut ? NOTHING : may, shut: shut !== null, refresh })}
+            </>
+          )}
+        </main>
+      </div>
+    </>
+  );
+}
+
+const NOTHING: May = { measure: false, approve: false };
+
+type StepProps = Pick<Props, "view" | "step" | "may" | "refresh"> & { shut: boolean };
+
+/** The step's own screen. A shut one shows only what was done there before, and takes nothing. */
+function stepIn({ view, step, may, shut, refresh }: StepProps): ReactNode {
+  switch (step) {
+    case "stands":
+      return <StandsStep view={view} may={may} done={refresh} />;
+    case "level":
+      return shut ? null : <LevelStep view={view} may={may} done={refresh} />;
+    case "marks":
+      return shut ? null : <MarksStep view={view} may={may} done={refresh} />;
+    case "axle-line":
+      return shut && !view.axle ? null : <AxleLineStep view={view} may={may} />;
+    case "options":
+      return shut && !view.options ? null : <OptionsStep view={view} may={may} />;
+    case "approval":
+      return shut && !view.approval ? null : <ApprovalStep view={view} may={may} />;
+    default:
+      return null;
+  }
+}
+
+/** Says it at once, to those who listen, when a level that stood is void: on this tablet or by somebody else. */
+function LevelNews({ view }: { view: LayoutView }) {
+  const state = view.standsInBay ? (view.level?.state ?? "none") : "void";
+  const before = useRef(state);
+  const [news, setNews] = useState("");
+  const reason = view.standsInBay
+    ? (view.level?.voided?.reason ?? "it was broken")
+    : `the vehicle left Bay ${view.bay.number}`;
+  useEffect(() => {
+    if (before.current === "true" && state === "void")
+      setNews(`The level is void: ${reason}. Stop measuring.`);
+    else if (state === "true") setNews("");
+    before.current = state;
+  }, [state, reason]);
+  return (
+    <p role="alert" className="sr-only">
+      {news}
+    </p>
+  );
+}
