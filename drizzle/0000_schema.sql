@@ -284,6 +284,7 @@ CREATE TABLE `level_checks` (
 	`id` bigint unsigned AUTO_INCREMENT NOT NULL,
 	`shop_id` bigint unsigned NOT NULL,
 	`layout_id` bigint unsigned NOT NULL,
+	`bay_id` bigint unsigned NOT NULL,
 	`method` enum('heights','gauge') NOT NULL,
 	`nose_high_deg` decimal(10,6) NOT NULL,
 	`right_high_deg` decimal(10,6) NOT NULL,
@@ -525,6 +526,7 @@ ALTER TABLE `layouts` ADD CONSTRAINT `layouts_marks_by_people_id_fk` FOREIGN KEY
 ALTER TABLE `layouts` ADD CONSTRAINT `layouts_axle_by_people_id_fk` FOREIGN KEY (`axle_by`) REFERENCES `people`(`id`) ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE `level_checks` ADD CONSTRAINT `level_checks_shop_id_shops_id_fk` FOREIGN KEY (`shop_id`) REFERENCES `shops`(`id`) ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE `level_checks` ADD CONSTRAINT `level_checks_layout_id_layouts_id_fk` FOREIGN KEY (`layout_id`) REFERENCES `layouts`(`id`) ON DELETE no action ON UPDATE no action;--> statement-breakpoint
+ALTER TABLE `level_checks` ADD CONSTRAINT `level_checks_bay_id_bays_id_fk` FOREIGN KEY (`bay_id`) REFERENCES `bays`(`id`) ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE `level_checks` ADD CONSTRAINT `level_checks_made_by_people_id_fk` FOREIGN KEY (`made_by`) REFERENCES `people`(`id`) ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE `level_checks` ADD CONSTRAINT `level_checks_voided_by_people_id_fk` FOREIGN KEY (`voided_by`) REFERENCES `people`(`id`) ON DELETE no action ON UPDATE no action;--> statement-breakpoint
 ALTER TABLE `level_readings` ADD CONSTRAINT `level_readings_shop_id_shops_id_fk` FOREIGN KEY (`shop_id`) REFERENCES `shops`(`id`) ON DELETE no action ON UPDATE no action;--> statement-breakpoint

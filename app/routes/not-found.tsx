@@ -1,7 +1,7 @@
 import { data } from "react-router";
-import { NothingHere } from "~/components/scan/nothing-here";
-import { Shell } from "~/components/frame/shell";
 import { may } from "~/auth/permissions";
+import { Shell } from "~/components/frame/shell";
+import { NothingHere } from "~/components/scan/nothing-here";
 import { actorContext } from "~/context";
 import { readShell } from "~/http/shell.server";
 import type { Route } from "./+types/not-found";
@@ -12,7 +12,10 @@ export const meta: Route.MetaFunction = () => [{ title: "Nothing here · Plumbay
 export async function loader({ context }: Route.LoaderArgs) {
   const actor = context.get(actorContext);
   return data(
-    { shell: actor ? await readShell(context, actor) : null, mayScan: actor !== null && may(actor.role, "scan:use") },
+    {
+      shell: actor ? await readShell(context, actor) : null,
+      mayScan: actor !== null && may(actor.role, "scan:use"),
+    },
     { status: 404 },
   );
 }

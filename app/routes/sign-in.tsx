@@ -30,7 +30,11 @@ export async function action({ request, context }: Route.ActionArgs) {
       dropSession(before.sessionHash);
     }
     const userAgent = request.headers.get("user-agent") ?? "";
-    const secret = await startSession(db, { shopId, personId, deviceId: before?.deviceId ?? null, userAgent }, now());
+    const secret = await startSession(
+      db,
+      { shopId, personId, deviceId: before?.deviceId ?? null, userAgent },
+      now(),
+    );
     throw redirect(safeReturn(new URL(request.url).searchParams.get("to")), {
       headers: { "Set-Cookie": await sessionCookie().serialize(secret) },
     });

@@ -1,7 +1,7 @@
 import { and, eq, isNull } from "drizzle-orm";
 import { isDuplicate, schema } from "../db/client.server";
 import type { SpringEntry } from "../validation/spring";
-import { change, type Context, requirePerson } from "./change.server";
+import { type Context, change, requirePerson } from "./change.server";
 import { Refusal } from "./errors";
 
 const { springs } = schema;
@@ -11,7 +11,10 @@ const { springs } = schema;
  * @throws Refusal invalid when the rack number was given to another spring, one that has left the rack included: old
  * records name springs by it
  */
-export async function addSpring(ctx: Context, what: SpringEntry): Promise<{ springId: number; words: string }> {
+export async function addSpring(
+  ctx: Context,
+  what: SpringEntry,
+): Promise<{ springId: number; words: string }> {
   const { shopId } = requirePerson(ctx, "springs:edit");
   return change(ctx, async (tx, note) => {
     const id = await (async () => {

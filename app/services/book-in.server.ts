@@ -4,10 +4,15 @@ import { and, eq, gt } from "drizzle-orm";
 import { isDuplicate, schema, type Tx } from "../db/client.server";
 import { readShop } from "../db/queries/shop.server";
 import { OPEN_END } from "../db/schema";
-import { BAYS_FOR_STAGE, BUILD_TEMPLATES, SKILL_FOR_STAGE, type StageTemplate } from "../domain/builds/stages";
+import {
+  BAYS_FOR_STAGE,
+  BUILD_TEMPLATES,
+  SKILL_FOR_STAGE,
+  type StageTemplate,
+} from "../domain/builds/stages";
 import { codeFromBytes } from "../domain/tags/short-code";
 import type { BookIn } from "../validation/book-in";
-import { change, type Context, requirePerson } from "./change.server";
+import { type Context, change, requirePerson } from "./change.server";
 import { Refusal } from "./errors";
 
 const { builds, customers, placements, shops, stageBayKinds, stages, tags, vehicles } = schema;
@@ -48,9 +53,13 @@ export async function bookIn(
     // One book-in of a shop after another: two presses of one button must see each other.
     await tx.select({ id: shops.id }).from(shops).where(eq(shops.id, shopId)).for("update");
     const shop = await readShop(tx, shopId);
-    const promisedAt = what.promise ? momentInShop(what.promise.date, what.promise.time, shop.timeZone) : null;
+    const promisedAt = what.promise
+      ? momentInShop(what.promise.date, what.promise.time, shop.timeZone)
+      : null;
     if (promisedAt && promisedAt.getTime() <= now.getTime())
-      throw new Refusal("invalid", "The promise is in the past.", { promiseDate: "The promise is in the past: choose a later day." });
+      throw new Refusal("invalid", "The promise is in the past.", {
+        promiseDate: "The promise is in the past: choose a later day.",
+      });
     const customer = await findCustomer(tx, shopId, what);
     await refuseTwice(tx, shopId, customer.name, what.nickname, now);
 
@@ -59,7 +68,9 @@ export async function bookIn(
     const code = await insertTag(tx, shopId, vehicleId, now, newCode);
     const buildId = await insertBuild(tx, { shopId, personId, vehicleId, promisedAt, now }, what);
     await insertStages(tx, shopId, buildId, what);
-    await tx.insert(placements).values({ shopId, buildId, bayId: null, fromAt: now, untilAt: OPEN_END, movedBy: personId });
+    await tx
+      .insert(placements)
+      .values({ shopId, buildId, bayId: null, fromAt: now, untilAt: OPEN_END, movedBy: personId });
 
     const words = `${what.nickname} booked in`;
     note({
@@ -74,7 +85,11 @@ export async function bookIn(
 }
 
 /** The customer meant: one of this shop's, or one to be written down (no id yet). */
-async function findCustomer(tx: Tx, shopId: number, what: BookIn): Promise<{ id: number | null; name: string }> {
+async function findCustomer(
+  tx: Tx,
+  shopId: number,
+  what: BookIn,
+): Promise<{ id: number | null; name: string }> {
   if (what.customer.id === null) return { id: null, name: what.customer.name };
   const [row] = await tx
     .select({ id: customers.id, name: customers.name })
@@ -88,7 +103,13 @@ async function findCustomer(tx: Tx, shopId: number, what: BookIn): Promise<{ id:
 }
 
 /** Tells a second press of the button from a second vehicle: same owner, same nickname, within a minute. */
-async function refuseTwice(tx: Tx, shopId: number, customerName: string, nickname: string, now: Date): Promise<void> {
+async function refuseTwice(
+  tx: Tx,
+  shopId: number,
+  customerName: string,
+  nickname: string,
+  now: Date,
+): Promise<void> {
   const [twin] = await tx
     .select({ buildId: builds.id })
     .from(builds)
@@ -114,12 +135,21 @@ async function refuseTwice(tx: Tx, shopId: number, customerName: string, nicknam
 async function insertCustomer(tx: Tx, shopId: number, what: BookIn, now: Date): Promise<number> {
   if (what.customer.id !== null) return what.customer.id;
   const { name, phone, email } = what.customer;
-  const [row] = await tx.insert(customers).values({ shopId, name, phone, email, createdAt: now }).$returningId();
+  const [row] = await tx
+    .insert(customers)
+    .values({ shopId, name, phone, email, createdAt: now })
+    .$returningId();
   if (!row) throw new Error("The customer was not inserted");
   return row.id;
 }
 
-async function insertVehicle(tx: Tx, shopId: number, customerId: number, what: BookIn, now: Date): Promise<number> {
+async function insertVehicle(
+  tx: Tx,
+  shopId: number,
+  customerId: number,
+  what: BookIn,
+  now: Date,
+): Promise<number> {
   const { kind, nickname, length, width } = what;
   const [row] = await tx
     .insert(vehicles)

@@ -3,7 +3,7 @@ import { schema } from "../db/client.server";
 import { readStanding } from "../db/queries/board.server";
 import { readBuildTag } from "../db/queries/tags.server";
 import { insertTag, type NewCode, randomCode } from "./book-in.server";
-import { change, type Context, requirePerson } from "./change.server";
+import { type Context, change, requirePerson } from "./change.server";
 import { Refusal } from "./errors";
 
 const { tags, vehicles } = schema;

@@ -26,7 +26,9 @@ const good = {
 };
 const faultsOf = (raw: Record<string, unknown>) => {
   const result = bookInForm("in").safeParse(raw);
-  return Object.fromEntries((result.error?.issues ?? []).map((issue) => [issue.path.join("."), issue.message]));
+  return Object.fromEntries(
+    (result.error?.issues ?? []).map((issue) => [issue.path.join("."), issue.message]),
+  );
 };
 
 describe("the book-in form", () => {

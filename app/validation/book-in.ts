@@ -2,7 +2,7 @@ import { z } from "zod";
 import { BUILD_TEMPLATE_IDS, BUILD_TEMPLATES } from "../domain/builds/stages";
 import { VEHICLE_KINDS } from "../domain/builds/vehicle-kinds";
 import type { LengthUnit } from "../domain/units/length";
-import { lengthEntry, type LengthRange, optionalLength } from "./length-entry";
+import { type LengthRange, lengthEntry, optionalLength } from "./length-entry";
 
 export const NICKNAME_LONGEST = 24;
 
@@ -12,8 +12,10 @@ const RADIUS: LengthRange = { least: 150, most: 1000, what: "A tyre's radius is"
 const TYRE_WIDTH: LengthRange = { least: 80, most: 700, what: "A tyre's width is" };
 const WHEELBASE: LengthRange = { least: 800, most: 12_000, what: "A wheelbase is" };
 
-const text = (longest: number, words: string) => z.string({ error: words }).trim().max(longest, `At most ${longest} signs.`);
-const optionalText = (longest: number) => z.string().trim().max(longest, `At most ${longest} signs.`).default("");
+const text = (longest: number, words: string) =>
+  z.string({ error: words }).trim().max(longest, `At most ${longest} signs.`);
+const optionalText = (longest: number) =>
+  z.string().trim().max(longest, `At most ${longest} signs.`).default("");
 
 /** Whole degrees; nothing typed means that nothing was asked for. */
 const approach = z
@@ -55,11 +57,13 @@ const stageShape = Object.fromEntries(
 ) as StageShape;
 
 /** A stage's own fields: the schema's types do not carry the numbered names. */
-type StageFields = Record<`stage-${number}`, string | undefined> & Record<`hours-${number}`, number | undefined>;
+type StageFields = Record<`stage-${number}`, string | undefined> &
+  Record<`hours-${number}`, number | undefined>;
 const isTicked = (form: object, index: number) => (form as StageFields)[`stage-${index}`] !== undefined;
 const hoursOf = (form: object, index: number) => (form as StageFields)[`hours-${index}`];
 
-const isDate = (typed: string) => /^\d{4}-\d{2}-\d{2}$/.test(typed) && !Number.isNaN(Date.parse(`${typed}T00:00:00Z`));
+const isDate = (typed: string) =>
+  /^\d{4}-\d{2}-\d{2}$/.test(typed) && !Number.isNaN(Date.parse(`${typed}T00:00:00Z`));
 const isTime = (typed: string) => /^([01]\d|2[0-3]):[0-5]\d/.test(typed);
 
 /** A refinement that speaks even when other fields are wrong, so that every fault is named at once. */
@@ -80,9 +84,15 @@ export const bookInForm = (unit: LengthUnit) =>
         .trim()
         .max(190, "At most 190 signs.")
         .default("")
-        .refine((typed) => typed === "" || z.email().safeParse(typed).success, "That is not an e-mail address."),
+        .refine(
+          (typed) => typed === "" || z.email().safeParse(typed).success,
+          "That is not an e-mail address.",
+        ),
       kind: z.enum(VEHICLE_KINDS, { error: "Choose what kind of vehicle it is." }),
-      nickname: text(NICKNAME_LONGEST, "Give it a nickname: it goes on the tape.").min(1, "Give it a nickname: it goes on the tape."),
+      nickname: text(NICKNAME_LONGEST, "Give it a nickname: it goes on the tape.").min(
+        1,
+        "Give it a nickname: it goes on the tape.",
+      ),
       length: lengthEntry(unit, VEHICLE_LENGTH),
       width: lengthEntry(unit, VEHICLE_WIDTH),
       wanted: text(2000, "Write down what the customer wants.").min(1, "Write down what the customer wants."),
@@ -92,8 +102,16 @@ export const bookInForm = (unit: LengthUnit) =>
       tyreWidth: optionalLength(unit, TYRE_WIDTH),
       wheelbase: optionalLength(unit, WHEELBASE),
       approach,
-      promiseDate: z.string().trim().default("").refine((typed) => typed === "" || isDate(typed), "That is not a date."),
-      promiseTime: z.string().trim().default("").refine((typed) => typed === "" || isTime(typed), "That is not a time of day."),
+      promiseDate: z
+        .string()
+        .trim()
+        .default("")
+        .refine((typed) => typed === "" || isDate(typed), "That is not a date."),
+      promiseTime: z
+        .string()
+        .trim()
+        .default("")
+        .refine((typed) => typed === "" || isTime(typed), "That is not a time of day."),
       template: z.enum(BUILD_TEMPLATE_IDS, { error: "Choose a list of stages." }),
       ...stageShape,
     })
@@ -132,7 +150,8 @@ export const bookInForm = (unit: LengthUnit) =>
         wheelbase: form.wheelbase,
         approach: form.approach,
         /** As on the shop's clock. Without a time: the end of the working day. */
-        promise: form.promiseDate === "" ? null : { date: form.promiseDate, time: form.promiseTime || PROMISE_TIME },
+        promise:
+          form.promiseDate === "" ? null : { date: form.promiseDate, time: form.promiseTime || PROMISE_TIME },
         template: form.template,
         stages: template.flatMap((line, index) =>
           isTicked(form, index) ? [{ index, hours: hoursOf(form, index) ?? line.hours }] : [],

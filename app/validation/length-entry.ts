@@ -14,7 +14,9 @@ const IN_FEET_FROM_MM = 1000;
 
 function inWords(length: number, unit: LengthUnit): string {
   const value = mm(length);
-  return unit === "in" && length >= IN_FEET_FROM_MM ? formatFeet(value) : formatLength(value, unit, { decimals: 0 });
+  return unit === "in" && length >= IN_FEET_FROM_MM
+    ? formatFeet(value)
+    : formatLength(value, unit, { decimals: 0 });
 }
 
 /** What is wrong with an entry, in a sentence; null when it will do. */
@@ -25,12 +27,16 @@ function faultOf(typed: string, unit: LengthUnit, { least, most, what }: LengthR
   return `This reads ${inWords(read.value, unit)}. ${what} between ${inWords(least, unit)} and ${inWords(most, unit)}.`;
 }
 
-function valueOf(typed: string, unit: LengthUnit): TypedLength {
+function entryOf(typed: string, unit: LengthUnit): TypedLength {
   const read = parseLength(typed, unit);
   return { mm: read.ok ? read.value : mm(0), typed };
 }
 
-const entry = () => z.string({ error: "Type the length as on the tape." }).trim().max(LONGEST_ENTRY, "That is too long for a length.");
+const entry = () =>
+  z
+    .string({ error: "Type the length as on the tape." })
+    .trim()
+    .max(LONGEST_ENTRY, "That is too long for a length.");
 
 /**
  * A length as typed on the tape, within what can be.
@@ -40,7 +46,7 @@ export const lengthEntry = (unit: LengthUnit, range: LengthRange) =>
   entry().transform((typed, ctx): TypedLength => {
     const message = faultOf(typed, unit, range);
     if (message !== null) ctx.addIssue({ code: "custom", message });
-    return valueOf(typed, unit);
+    return entryOf(typed, unit);
   });
 
 /** The same, where nothing typed means that it was not given. */
@@ -51,5 +57,5 @@ export const optionalLength = (unit: LengthUnit, range: LengthRange) =>
       if (typed === "") return null;
       const message = faultOf(typed, unit, range);
       if (message !== null) ctx.addIssue({ code: "custom", message });
-      return valueOf(typed, unit);
+      return entryOf(typed, unit);
     });

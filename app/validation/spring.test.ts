@@ -4,7 +4,9 @@ import { springForm } from "./spring";
 const good = { rackNumber: "14", length: "52", frontHalf: "24 1/2", leaves: "5", leafWidth: "2.5", note: "" };
 const faultsOf = (raw: Record<string, unknown>) => {
   const result = springForm("in").safeParse(raw);
-  return Object.fromEntries((result.error?.issues ?? []).map((issue) => [issue.path.join("."), issue.message]));
+  return Object.fromEntries(
+    (result.error?.issues ?? []).map((issue) => [issue.path.join("."), issue.message]),
+  );
 };
 
 describe("the spring form", () => {
@@ -15,7 +17,8 @@ describe("the spring form", () => {
   });
 
   it("does not take a front half that is the whole spring or more", () => {
-    for (const frontHalf of ["52", "60"]) expect(faultsOf({ ...good, frontHalf }).frontHalf).toMatch(/shorter than the spring/);
+    for (const frontHalf of ["52", "60"])
+      expect(faultsOf({ ...good, frontHalf }).frontHalf).toMatch(/shorter than the spring/);
     expect(faultsOf({ ...good, frontHalf: "51 63/64" })).toEqual({});
   });
 

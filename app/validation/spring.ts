@@ -1,6 +1,6 @@
 import { z } from "zod";
 import type { LengthUnit } from "../domain/units/length";
-import { lengthEntry, type LengthRange } from "./length-entry";
+import { type LengthRange, lengthEntry } from "./length-entry";
 
 const SPRING_LENGTH: LengthRange = { least: 300, most: 2500, what: "A leaf spring is" };
 const HALF_LENGTH: LengthRange = { least: 50, most: 2450, what: "A front half is" };
@@ -27,11 +27,14 @@ export const springForm = (unit: LengthUnit) =>
       leafWidth: lengthEntry(unit, LEAF_WIDTH),
       note: z.string().trim().max(120, "At most 120 signs.").default(""),
     })
-    .refine((spring) => !spring.length?.mm || !spring.frontHalf?.mm || spring.frontHalf.mm < spring.length.mm, {
-      // Said beside other faults too, so that every one is named at once.
-      when: () => true,
-      path: ["frontHalf"],
-      message: "The front half must be shorter than the spring: measure from the front eye to the pin.",
-    });
+    .refine(
+      (spring) => !spring.length?.mm || !spring.frontHalf?.mm || spring.frontHalf.mm < spring.length.mm,
+      {
+        // Said beside other faults too, so that every one is named at once.
+        when: () => true,
+        path: ["frontHalf"],
+        message: "The front half must be shorter than the spring: measure from the front eye to the pin.",
+      },
+    );
 
 export type SpringEntry = z.output<ReturnType<typeof springForm>>;

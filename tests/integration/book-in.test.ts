@@ -2,10 +2,10 @@ import { and, eq, isNull } from "drizzle-orm";
 import { beforeAll, describe, expect, it } from "vitest";
 import { contextFor, makeTestShop, type TestShop } from "#tests/factories";
 import { testDatabase } from "#tests/setup/database";
+import { type Db, schema } from "~/db/client.server";
 import { readYard } from "~/db/queries/board.server";
 import { readBuild, readBuildsHere, readStages, readStory } from "~/db/queries/builds.server";
 import { lookUpTag } from "~/db/queries/tags.server";
-import { type Db, schema } from "~/db/client.server";
 import { BUILD_TEMPLATES } from "~/domain/builds/stages";
 import { readForm } from "~/http/form.server";
 import { bookIn, momentInShop } from "~/services/book-in.server";
@@ -75,14 +75,25 @@ describe("booking in", () => {
       lengthMm: 4800.6,
       lengthTyped: "15' 9",
       wanted: "Front axle an inch and a half forward",
-      asked: { tyre: "35 x 12.5", loadedRadius: "16 1/2", tyreRadius: "17.5", tyreWidth: null, wheelbase: null, approachDeg: 40 },
+      asked: {
+        tyre: "35 x 12.5",
+        loadedRadius: "16 1/2",
+        tyreRadius: "17.5",
+        tyreWidth: null,
+        wheelbase: null,
+        approachDeg: 40,
+      },
       customer: { name: "Rosa Lind", phone: "555 0142", email: "" },
       bookedInBy: "Cora Counter",
     });
     const stages = await readStages(db, booked.buildId);
-    expect(stages.map((stage) => stage.kind)).toEqual(BUILD_TEMPLATES["front-leaf"].stages.map((line) => line.kind));
+    expect(stages.map((stage) => stage.kind)).toEqual(
+      BUILD_TEMPLATES["front-leaf"].stages.map((line) => line.kind),
+    );
     expect(stages[0]?.hours).toBe(2.5);
-    expect(stages.map((stage) => stage.stay)).toEqual(BUILD_TEMPLATES["front-leaf"].stages.map((line) => line.stay));
+    expect(stages.map((stage) => stage.stay)).toEqual(
+      BUILD_TEMPLATES["front-leaf"].stages.map((line) => line.stay),
+    );
 
     const yard = await readYard(db, shop.shopId);
     const standing = yard.find((vehicle) => vehicle.buildId === booked.buildId);
@@ -104,15 +115,25 @@ describe("booking in", () => {
       .from(schema.journal)
       .where(and(eq(schema.journal.shopId, shop.shopId), eq(schema.journal.subjectId, booked.buildId)));
     expect(rows).toHaveLength(1);
-    expect(rows[0]).toMatchObject({ verb: "book-in", words: "Storied booked in", personId: shop.people.foreman.personId });
+    expect(rows[0]).toMatchObject({
+      verb: "book-in",
+      words: "Storied booked in",
+      personId: shop.people.foreman.personId,
+    });
     expect(rows[0]?.touches).toEqual([{ kind: "yard" }, { kind: "build", id: booked.buildId }]);
-    expect((await readStory(db, shop.shopId, booked.buildId))[0]).toMatchObject({ by: "Fay Foreman", words: "Storied booked in" });
+    expect((await readStory(db, shop.shopId, booked.buildId))[0]).toMatchObject({
+      by: "Fay Foreman",
+      words: "Storied booked in",
+    });
   });
 
   it("keeps which bays a stage may be done in", async () => {
     const booked = await bookIn(contextFor(db, shop.people.counter), entry());
     const level = (await readStages(db, booked.buildId)).find((stage) => stage.kind === "level");
-    const kinds = await db.select().from(schema.stageBayKinds).where(eq(schema.stageBayKinds.stageId, level?.id ?? 0));
+    const kinds = await db
+      .select()
+      .from(schema.stageBayKinds)
+      .where(eq(schema.stageBayKinds.stageId, level?.id ?? 0));
     expect(kinds.map((row) => row.kind)).toEqual(["level-pad"]);
   });
 
@@ -128,15 +149,24 @@ describe("booking in", () => {
   });
 
   it("reads the promise on the shop's own clock, summer and winter", async () => {
-    expect(momentInShop("2026-01-20", "17:00", "America/Boise").toISOString()).toBe("2026-01-21T00:00:00.000Z");
-    expect(momentInShop("2026-07-20", "17:00", "America/Boise").toISOString()).toBe("2026-07-20T23:00:00.000Z");
+    expect(momentInShop("2026-01-20", "17:00", "America/Boise").toISOString()).toBe(
+      "2026-01-21T00:00:00.000Z",
+    );
+    expect(momentInShop("2026-07-20", "17:00", "America/Boise").toISOString()).toBe(
+      "2026-07-20T23:00:00.000Z",
+    );
     const now = () => new Date("2026-07-01T12:00:00.000Z");
-    const booked = await bookIn(contextFor(db, shop.people.counter, { now }), entry({ promiseDate: "2026-07-20", promiseTime: "09:30" }));
+    const booked = await bookIn(
+      contextFor(db, shop.people.counter, { now }),
+      entry({ promiseDate: "2026-07-20", promiseTime: "09:30" }),
+    );
     expect((await readBuild(db, shop.shopId, booked.buildId))?.promisedAt).toBe("2026-07-20T15:30:00.000Z");
   });
 
   it("refuses a promise in the past beside its field", async () => {
-    const error = await refusal(bookIn(contextFor(db, shop.people.counter), entry({ promiseDate: "2020-01-01" })));
+    const error = await refusal(
+      bookIn(contextFor(db, shop.people.counter), entry({ promiseDate: "2020-01-01" })),
+    );
     expect(error.kind).toBe("invalid");
     expect(error.fields.promiseDate).toMatch(/in the past/);
   });
@@ -166,7 +196,10 @@ describe("the customer", () => {
       .$returningId();
     const before = await readBuildsHere(db, shop.shopId);
     const error = await refusal(
-      bookIn(contextFor(db, shop.people.counter), entry({ customerId: String(theirs?.id), customerName: "" })),
+      bookIn(
+        contextFor(db, shop.people.counter),
+        entry({ customerId: String(theirs?.id), customerName: "" }),
+      ),
     );
     expect(error.kind).toBe("not-found");
     expect(error.fields.customerId).toBeTruthy();
@@ -181,7 +214,9 @@ describe("a second press of the button", () => {
     const what = entry({ nickname: "Twice", customerName: "Pat Double" });
     const results = await Promise.allSettled([bookIn(ctx, what), bookIn(ctx, what), bookIn(ctx, what)]);
     expect(results.filter((result) => result.status === "fulfilled")).toHaveLength(1);
-    const refused = results.flatMap((result) => (result.status === "rejected" ? [result.reason as Refusal] : []));
+    const refused = results.flatMap((result) =>
+      result.status === "rejected" ? [result.reason as Refusal] : [],
+    );
     for (const error of refused) {
       expect(error.status).toBe(409);
       expect(error.message).toMatch(/^Twice was booked in a moment ago/);
@@ -195,7 +230,9 @@ describe("a second press of the button", () => {
     const at = (iso: string) => contextFor(db, shop.people.counter, { now: () => new Date(iso) });
     await bookIn(at("2026-03-02T10:00:00.000Z"), what);
     await expect(bookIn(at("2026-03-02T10:00:40.000Z"), what)).rejects.toThrow(/a moment ago/);
-    await expect(bookIn(at("2026-03-02T10:01:01.000Z"), what)).resolves.toMatchObject({ words: "Again booked in" });
+    await expect(bookIn(at("2026-03-02T10:01:01.000Z"), what)).resolves.toMatchObject({
+      words: "Again booked in",
+    });
   });
 });
 
@@ -217,7 +254,11 @@ describe("the tag", () => {
 
   it("of one shop may be that of another, and leads only within its own", async () => {
     const fresh = await makeTestShop(db);
-    const booked = await bookIn(contextFor(db, fresh.people.counter), entry({ nickname: "Namesake" }), codes("K7RD"));
+    const booked = await bookIn(
+      contextFor(db, fresh.people.counter),
+      entry({ nickname: "Namesake" }),
+      codes("K7RD"),
+    );
     expect(await lookUpTag(db, fresh.shopId, "K7RD")).toMatchObject({ state: "here", nickname: "Namesake" });
     expect(await lookUpTag(db, other.shopId, "K7RD")).not.toMatchObject({ nickname: "Namesake" });
     expect(await readBuild(db, other.shopId, booked.buildId)).toBeNull();
@@ -226,7 +267,11 @@ describe("the tag", () => {
   it("that was replaced says so, and is not replaced twice", async () => {
     const fresh = await makeTestShop(db);
     const ctx = contextFor(db, fresh.people.tech);
-    const booked = await bookIn(contextFor(db, fresh.people.counter), entry({ nickname: "Torn" }), codes("M3XF"));
+    const booked = await bookIn(
+      contextFor(db, fresh.people.counter),
+      entry({ nickname: "Torn" }),
+      codes("M3XF"),
+    );
     const race = await Promise.allSettled([
       replaceTag(ctx, { buildId: booked.buildId, code: "M3XF" }, codes("K7RD")),
       replaceTag(ctx, { buildId: booked.buildId, code: "M3XF" }, codes("H4KE")),
@@ -249,7 +294,16 @@ describe("who may", () => {
 
 describe("a form with faults", () => {
   it("names every field at once", () => {
-    const bad = form({ customerName: "", kind: "boat", nickname: "", length: "long", width: "", wanted: "", approach: "95", template: "none" });
+    const bad = form({
+      customerName: "",
+      kind: "boat",
+      nickname: "",
+      length: "long",
+      width: "",
+      wanted: "",
+      approach: "95",
+      template: "none",
+    });
     try {
       readForm(bad, bookInForm("in"));
       expect.unreachable();

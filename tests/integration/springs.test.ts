@@ -2,7 +2,7 @@ import { beforeAll, describe, expect, it } from "vitest";
 import { contextFor, makeTestShop, type TestShop } from "#tests/factories";
 import { testDatabase } from "#tests/setup/database";
 import type { Db } from "~/db/client.server";
-import { readHangers, readRack } from "~/db/queries/springs.server";
+import { readHangers, readNextRackNumber, readRack } from "~/db/queries/springs.server";
 import { readForm } from "~/http/form.server";
 import { addSpring, takeOutSpring } from "~/services/add-spring.server";
 import { Refusal } from "~/services/errors";
@@ -18,7 +18,15 @@ beforeAll(async () => {
 
 const entry = (over: Record<string, string> = {}) => {
   const form = new FormData();
-  const fields = { rackNumber: "31", length: "52", frontHalf: "24 1/2", leaves: "5", leafWidth: "2 1/2", note: "", ...over };
+  const fields = {
+    rackNumber: "31",
+    length: "52",
+    frontHalf: "24 1/2",
+    leaves: "5",
+    leafWidth: "2 1/2",
+    note: "",
+    ...over,
+  };
   for (const [name, value] of Object.entries(fields)) form.set(name, value);
   return readForm(form, springForm("in"));
 };
@@ -52,7 +60,10 @@ describe("the spring rack", () => {
 
   it("does not give one number to two springs, even at the same moment", async () => {
     const ctx = contextFor(db, shop.people.owner);
-    const results = await Promise.allSettled([addSpring(ctx, entry({ rackNumber: "40" })), addSpring(ctx, entry({ rackNumber: "40" }))]);
+    const results = await Promise.allSettled([
+      addSpring(ctx, entry({ rackNumber: "40" })),
+      addSpring(ctx, entry({ rackNumber: "40" })),
+    ]);
     expect(results.map((result) => result.status).sort()).toEqual(["fulfilled", "rejected"]);
     const error = await refused(addSpring(ctx, entry({ rackNumber: "40" })));
     expect(error.fields.rackNumber).toBe("Rack 40 holds a spring already.");
@@ -64,19 +75,28 @@ describe("the spring rack", () => {
     await takeOutSpring(ctx, springId);
     expect((await readRack(db, shop.shopId)).map((row) => row.rackNumber)).not.toContain(41);
     expect((await refused(takeOutSpring(ctx, springId))).kind).toBe("conflict");
-    expect((await refused(addSpring(ctx, entry({ rackNumber: "41" })))).fields.rackNumber).toMatch(/has left/);
+    expect((await refused(addSpring(ctx, entry({ rackNumber: "41" })))).fields.rackNumber).toMatch(
+      /has left/,
+    );
+    expect(await readNextRackNumber(db, shop.shopId)).toBe(42);
   });
 
   it("is the shop's own", async () => {
     const other = await makeTestShop(db);
     const error = await refused(takeOutSpring(contextFor(db, other.people.foreman), shop.springs.centred));
     expect(error.kind).toBe("not-found");
-    await expect(addSpring(contextFor(db, other.people.foreman), entry({ rackNumber: "31" }))).resolves.toBeTruthy();
+    await expect(
+      addSpring(contextFor(db, other.people.foreman), entry({ rackNumber: "31" })),
+    ).resolves.toBeTruthy();
   });
 
   it.each(["tech", "counter"] as const)("is not changed by a %s", async (who) => {
-    expect((await refused(addSpring(contextFor(db, shop.people[who]), entry({ rackNumber: "50" })))).kind).toBe("forbidden");
-    expect((await refused(takeOutSpring(contextFor(db, shop.people[who]), shop.springs.centred))).kind).toBe("forbidden");
+    expect(
+      (await refused(addSpring(contextFor(db, shop.people[who]), entry({ rackNumber: "50" })))).kind,
+    ).toBe("forbidden");
+    expect((await refused(takeOutSpring(contextFor(db, shop.people[who]), shop.springs.centred))).kind).toBe(
+      "forbidden",
+    );
   });
 
   it("shows the hangers with their holes in order", async () => {

@@ -1,13 +1,13 @@
 import { Link, useSearchParams } from "react-router";
-import type { BoardBay, BoardVehicle } from "../../domain/floor/board";
 import { VEHICLE_KIND, type VehicleKind } from "../../domain/builds/vehicle-kinds";
+import type { BoardBay, BoardVehicle } from "../../domain/floor/board";
 import { formatFeet, type LengthUnit, mm } from "../../domain/units/length";
 import { buttonClass } from "../../ui/button";
 import { Sign } from "../../ui/sign";
 import { Tape } from "../../ui/tape";
 import { spanInWords, whenInWords } from "../time";
 import { VehiclePlan } from "../vehicle-plan";
-import { AskedFor, type Asked } from "./asked-for";
+import { type Asked, AskedFor } from "./asked-for";
 import { StageLine, type StageRow } from "./stage-line";
 import { Standing } from "./standing";
 import { Story, type StoryRow } from "./story";
@@ -31,7 +31,14 @@ export type BuildPageProps = {
   /** Null: not for this role. */
   customer: { name: string; phone: string; email: string } | null;
   stages: StageRow[];
-  holds: { id: number; words: string; kind: string; placedBy: string; placedAt: string; dueAt: string | null }[];
+  holds: {
+    id: number;
+    words: string;
+    kind: string;
+    placedBy: string;
+    placedAt: string;
+    dueAt: string | null;
+  }[];
   /** Null: it stands nowhere any more. */
   standing: BoardVehicle | null;
   bay: BoardBay | null;
@@ -75,13 +82,19 @@ function Head({ build, mayPrint, now, timeZone }: BuildPageProps) {
   return (
     <header className="flex flex-wrap items-end justify-between gap-x-8 gap-y-4 border-concrete-300 border-b pb-5">
       <div className="flex min-w-0 flex-wrap items-end gap-x-8 gap-y-3">
-        <VehiclePlan kind={build.kind} lengthMm={build.lengthMm} widthMm={build.widthMm} scale={Math.min(230 / build.lengthMm, 96 / build.widthMm)} />
+        <VehiclePlan
+          kind={build.kind}
+          lengthMm={build.lengthMm}
+          widthMm={build.widthMm}
+          scale={Math.min(230 / build.lengthMm, 96 / build.widthMm)}
+        />
         <div className="grid gap-1">
           <h1>
             <Tape name={build.nickname} code={build.code} size="l" />
           </h1>
           <p className="text-concrete-700">
-            {VEHICLE_KIND[build.kind].label}, {formatFeet(mm(build.lengthMm))} long, {formatFeet(mm(build.widthMm))} wide
+            {VEHICLE_KIND[build.kind].label}, {formatFeet(mm(build.lengthMm))} long,{" "}
+            {formatFeet(mm(build.widthMm))} wide
           </p>
         </div>
       </div>
@@ -112,10 +125,13 @@ function JustBookedIn({ build, mayPrint }: { build: BuildPageProps["build"]; may
   const [params] = useSearchParams();
   if (!params.has("booked-in")) return null;
   return (
-    <p role="status" className="flex flex-wrap items-center gap-x-4 gap-y-2 border-moss border-l-4 bg-moss-wash px-4 py-3">
+    <p
+      role="status"
+      className="flex flex-wrap items-center gap-x-4 gap-y-2 border-moss border-l-4 bg-moss-wash px-4 py-3"
+    >
       <span>
-        <b className="font-semibold">{build.nickname} is booked in</b> and stands in the yard. Its tag is {build.code}:
-        print it and hang it on.
+        <b className="font-semibold">{build.nickname} is booked in</b> and stands in the yard. Its tag is{" "}
+        {build.code}: print it and hang it on.
       </span>
       {mayPrint ? (
         <Link to={`/builds/${build.id}/tag`} className={buttonClass("go", "m")}>
@@ -134,16 +150,24 @@ function CustomerNote({ customer }: { customer: { name: string; phone: string; e
       </h2>
       <p className="font-semibold text-lg">{customer.name}</p>
       {customer.phone ? (
-        <a href={`tel:${customer.phone.replace(/[^\d+]/g, "")}`} className="inline-flex min-h-11 items-center text-line underline">
+        <a
+          href={`tel:${customer.phone.replace(/[^\d+]/g, "")}`}
+          className="inline-flex min-h-11 items-center text-line underline"
+        >
           {customer.phone}
         </a>
       ) : null}
       {customer.email ? (
-        <a href={`mailto:${customer.email}`} className="inline-flex min-h-11 items-center break-all text-line underline">
+        <a
+          href={`mailto:${customer.email}`}
+          className="inline-flex min-h-11 items-center break-all text-line underline"
+        >
           {customer.email}
         </a>
       ) : null}
-      {customer.phone || customer.email ? null : <p className="text-concrete-700">No number or address given.</p>}
+      {customer.phone || customer.email ? null : (
+        <p className="text-concrete-700">No number or address given.</p>
+      )}
     </section>
   );
 }

@@ -30,17 +30,25 @@ export function StageLine({
   timeZone: string;
 }) {
   if (stages.length === 0) return <p className="text-concrete-700">This build has no stages.</p>;
-  const inHand = stages.find((stage) => stage.state === "under-way") ?? stages.find((stage) => stage.state === "open");
+  const inHand =
+    stages.find((stage) => stage.state === "under-way") ?? stages.find((stage) => stage.state === "open");
   return (
     <ol className="grid">
       {stages.map((stage, index) => (
-        <li key={stage.id} className="grid min-h-11 grid-cols-[2.25rem_1.75rem_minmax(0,1fr)_auto] items-center gap-x-2">
+        <li
+          key={stage.id}
+          className="grid min-h-11 grid-cols-[2.25rem_1.75rem_minmax(0,1fr)_auto] items-center gap-x-2"
+        >
           <LinePart place={placeOf(stage, inHand)} first={index === 0} last={index === stages.length - 1} />
           <span className={stage.state === "open" && stage !== inHand ? "text-concrete-500" : ""}>
             <Sign name={stageSign(stage.kind)} size={20} />
           </span>
           <p className="min-w-0 py-1">
-            <span className={stage === inHand ? "font-semibold text-xl" : stage.state === "open" ? "text-concrete-700" : ""}>
+            <span
+              className={
+                stage === inHand ? "font-semibold text-xl" : stage.state === "open" ? "text-concrete-700" : ""
+              }
+            >
               {STAGE_LABEL[stage.kind]}
             </span>{" "}
             <span className={stage === inHand ? "font-medium text-brass-ink" : "text-concrete-500"}>
@@ -62,7 +70,8 @@ const placeOf = (stage: StageRow, inHand: StageRow | undefined): Place =>
   stage === inHand ? "in-hand" : stage.state === "done" ? "done" : "ahead";
 
 function stateWords(stage: StageRow, crew: Crew, now: string, timeZone: string): string {
-  if (stage.state === "done") return stage.finishedAt ? `done ${whenInWords(stage.finishedAt, now, timeZone)}` : "done";
+  if (stage.state === "done")
+    return stage.finishedAt ? `done ${whenInWords(stage.finishedAt, now, timeZone)}` : "done";
   if (stage.state === "open") return stage.pieces ? piecesWords(stage) : "";
   const who = crew.map((person) => person.name.split(" ")[0]).join(" and ");
   const since = stage.startedAt ? `since ${whenInWords(stage.startedAt, now, timeZone)}` : "under way";
@@ -76,7 +85,9 @@ function stays(stages: readonly StageRow[], index: number) {
   const stay = stages[index]?.stay;
   if (!stay || stages[index - 1]?.stay === stay) return null;
   const length = stages.filter((stage) => stage.stay === stay).length;
-  return length > 1 ? <span className="block text-[13px] text-concrete-500">one stay, {length} stages</span> : null;
+  return length > 1 ? (
+    <span className="block text-[13px] text-concrete-500">one stay, {length} stages</span>
+  ) : null;
 }
 
 /** A piece of the line: solid above and through what is done, the bob at what is in hand, dots ahead. */
@@ -85,17 +96,34 @@ function LinePart({ place, first, last }: { place: Place; first: boolean; last: 
   return (
     <span className="relative self-stretch" aria-hidden="true">
       {first ? null : (
-        <span className={`${middle} top-0 h-1/2 ${place === "ahead" ? "border-concrete-300 border-l-2 border-dotted" : "w-[2.4px] bg-brass"}`} />
+        <span
+          className={`${middle} top-0 h-1/2 ${place === "ahead" ? "border-concrete-300 border-l-2 border-dotted" : "w-[2.4px] bg-brass"}`}
+        />
       )}
       {last || place === "in-hand" ? null : (
-        <span className={`${middle} bottom-0 h-1/2 ${place === "ahead" ? "border-concrete-300 border-l-2 border-dotted" : "w-[2.4px] bg-brass"}`} />
+        <span
+          className={`${middle} bottom-0 h-1/2 ${place === "ahead" ? "border-concrete-300 border-l-2 border-dotted" : "w-[2.4px] bg-brass"}`}
+        />
       )}
       {place === "in-hand" ? (
-        <svg viewBox="0 0 18 34" width="18" height="34" className={`${middle} top-1/2 -translate-y-1/2`}>
-          <path d="M3.5 2h11l2.5 7-8 24L1 9z" className="fill-brass stroke-brass-ink" strokeWidth="1.6" strokeLinejoin="round" />
+        <svg
+          aria-hidden="true"
+          viewBox="0 0 18 34"
+          width="18"
+          height="34"
+          className={`${middle} top-1/2 -translate-y-1/2`}
+        >
+          <path
+            d="M3.5 2h11l2.5 7-8 24L1 9z"
+            className="fill-brass stroke-brass-ink"
+            strokeWidth="1.6"
+            strokeLinejoin="round"
+          />
         </svg>
       ) : (
-        <span className={`${middle} top-1/2 h-[2.4px] w-4 -translate-y-1/2 ${place === "done" ? "bg-brass-ink" : "bg-concrete-300"}`} />
+        <span
+          className={`${middle} top-1/2 h-[2.4px] w-4 -translate-y-1/2 ${place === "done" ? "bg-brass-ink" : "bg-concrete-300"}`}
+        />
       )}
     </span>
   );

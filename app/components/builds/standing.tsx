@@ -27,7 +27,8 @@ export function Standing(props: BuildPageProps) {
           {bay ? `Bay ${bay.number}, ${BAY_KIND_LABEL[bay.kind].toLowerCase()}` : "In the yard"}
         </p>
         <p className="text-concrete-700">
-          since {whenInWords(standing.since, now, timeZone)} ({ageInWords(standing.since, now)}), put there by {standing.movedBy}
+          since {whenInWords(standing.since, now, timeZone)} ({ageInWords(standing.since, now)}), put there by{" "}
+          {standing.movedBy}
         </p>
       </div>
       <Holds holds={props.holds} now={now} timeZone={timeZone} />
@@ -101,12 +102,19 @@ function StartLayout({ buildId, nickname }: { buildId: number; nickname: string 
     if (started !== null) void navigate(`/layouts/${started}`);
   }, [started, navigate]);
   return (
-    <fetcher.Form method="post" action={`/builds/${buildId}/layout`} className="grid justify-items-start gap-2">
+    <fetcher.Form
+      method="post"
+      action={`/builds/${buildId}/layout`}
+      className="grid justify-items-start gap-2"
+    >
       <input type="hidden" name="fixedEye" value="ahead" />
       <Button tone="go" size="m" type="submit" busy={fetcher.state !== "idle" || started !== null}>
         Start layout
       </Button>
-      <p role="status" className={fetcher.data && !fetcher.data.ok ? "font-medium text-oxide" : "text-concrete-700"}>
+      <p
+        role="status"
+        className={fetcher.data && !fetcher.data.ok ? "font-medium text-oxide" : "text-concrete-700"}
+      >
         {fetcher.data && !fetcher.data.ok
           ? fetcher.data.message
           : `The front end of ${nickname}, fixed eye ahead of the axle.`}

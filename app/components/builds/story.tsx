@@ -1,4 +1,4 @@
-import { sameDay, clock, dayAndDate } from "../time";
+import { clock, dayAndDate, sameDay } from "../time";
 
 /** `by` null: the shop's own doing. */
 export type StoryRow = { id: number; at: string; by: string | null; words: string };
@@ -17,7 +17,9 @@ export function Story({ rows, now, timeZone }: { rows: readonly StoryRow[]; now:
           return (
             <li key={row.id} className="grid gap-x-3 border-concrete-200 border-t py-1.5 first:border-t-0">
               {newDay ? (
-                <span className="label pt-1">{sameDay(row.at, now, timeZone) ? "Today" : dayAndDate(row.at, timeZone)}</span>
+                <span className="label pt-1">
+                  {sameDay(row.at, now, timeZone) ? "Today" : dayAndDate(row.at, timeZone)}
+                </span>
               ) : null}
               <p className="flex gap-3">
                 <time dateTime={row.at} className="w-11 shrink-0 text-concrete-500">

@@ -2,9 +2,9 @@ import { type ReactNode, useEffect, useRef, useState } from "react";
 import { Form, Link, useNavigation } from "react-router";
 import { VEHICLE_KIND, VEHICLE_KINDS, type VehicleKind } from "../../domain/builds/vehicle-kinds";
 import { formatInches, inches, type LengthUnit } from "../../domain/units/length";
-import { bookInForm, NICKNAME_LONGEST, PROMISE_TIME } from "../../validation/book-in";
 import { Button, buttonClass } from "../../ui/button";
 import { ErrorSummary, Field, SelectField, TextAreaField } from "../../ui/field";
+import { bookInForm, NICKNAME_LONGEST, PROMISE_TIME } from "../../validation/book-in";
 import { type Customer, CustomerPick } from "./customer-pick";
 import { faultsOf } from "./form-faults";
 import { StagePick } from "./stage-pick";
@@ -18,7 +18,8 @@ export type Refused = {
   detail: Record<string, unknown>;
 };
 
-const kindOf = (typed: string | undefined): VehicleKind | null => VEHICLE_KINDS.find((kind) => kind === typed) ?? null;
+const kindOf = (typed: string | undefined): VehicleKind | null =>
+  VEHICLE_KINDS.find((kind) => kind === typed) ?? null;
 
 const LABEL: Record<string, string> = {
   customerId: "Customer",
@@ -169,7 +170,13 @@ function Fields({ customers, unit, typed, faults, busy, putRight }: FieldsProps)
         </Part>
         <Part title="The vehicle">
           <div className="grid gap-4 sm:grid-cols-2">
-            <SelectField label="Kind" name="kind" value={kind ?? ""} error={faults.kind} onChange={(event) => chooseKind(kindOf(event.target.value))}>
+            <SelectField
+              label="Kind"
+              name="kind"
+              value={kind ?? ""}
+              error={faults.kind}
+              onChange={(event) => chooseKind(kindOf(event.target.value))}
+            >
               <option value="">Choose…</option>
               {VEHICLE_KINDS.map((known) => (
                 <option key={known} value={known}>
@@ -177,19 +184,65 @@ function Fields({ customers, unit, typed, faults, busy, putRight }: FieldsProps)
                 </option>
               ))}
             </SelectField>
-            <Field label="Nickname" name="nickname" value={nickname} maxLength={NICKNAME_LONGEST} autoComplete="off" hint="Goes on the tape and the tag." error={faults.nickname} onChange={(event) => setNickname(event.target.value)} />
-            <Field label="Length" name="length" value={length} autoComplete="off" hint={hint} error={faults.length} onChange={(event) => setLength(event.target.value)} />
-            <Field label="Width" name="width" value={width} autoComplete="off" hint="Mirrors folded." error={faults.width} onChange={(event) => setWidth(event.target.value)} />
+            <Field
+              label="Nickname"
+              name="nickname"
+              value={nickname}
+              maxLength={NICKNAME_LONGEST}
+              autoComplete="off"
+              hint="Goes on the tape and the tag."
+              error={faults.nickname}
+              onChange={(event) => setNickname(event.target.value)}
+            />
+            <Field
+              label="Length"
+              name="length"
+              value={length}
+              autoComplete="off"
+              hint={hint}
+              error={faults.length}
+              onChange={(event) => setLength(event.target.value)}
+            />
+            <Field
+              label="Width"
+              name="width"
+              value={width}
+              autoComplete="off"
+              hint="Mirrors folded."
+              error={faults.width}
+              onChange={(event) => setWidth(event.target.value)}
+            />
           </div>
         </Part>
         <Part title="What is wanted">
-          <TextAreaField label="In the customer's words" name="wanted" rows={4} maxLength={2000} defaultValue={typed.wanted} error={faults.wanted} />
+          <TextAreaField
+            label="In the customer's words"
+            name="wanted"
+            rows={4}
+            maxLength={2000}
+            defaultValue={typed.wanted}
+            error={faults.wanted}
+          />
           <Sizes typed={typed} faults={faults} unit={unit} />
         </Part>
         <Part title="Promise">
           <div className="grid gap-4 sm:grid-cols-2">
-            <Field label="Promised for" name="promiseDate" type="date" defaultValue={typed.promiseDate} error={faults.promiseDate} hint="Empty: no promise." />
-            <Field label="Time" name="promiseTime" type="time" defaultValue={typed.promiseTime} error={faults.promiseTime} hint={`Empty: ${PROMISE_TIME}.`} />
+            <Field
+              label="Promised for"
+              name="promiseDate"
+              type="date"
+              defaultValue={typed.promiseDate}
+              error={faults.promiseDate}
+              hint="Empty: no promise."
+            />
+            <Field
+              label="Time"
+              name="promiseTime"
+              type="time"
+              defaultValue={typed.promiseTime}
+              error={faults.promiseTime}
+              hint={`Empty: ${PROMISE_TIME}.`}
+            />
           </div>
         </Part>
       </div>
@@ -213,7 +266,14 @@ function Fields({ customers, unit, typed, faults, busy, putRight }: FieldsProps)
 
 function Sizes({ typed, faults, unit }: Pick<FieldsProps, "typed" | "faults" | "unit">) {
   const field = (name: string, label: string, hint?: string) => (
-    <Field label={label} name={name} autoComplete="off" defaultValue={typed[name]} error={faults[name]} hint={hint} />
+    <Field
+      label={label}
+      name={name}
+      autoComplete="off"
+      defaultValue={typed[name]}
+      error={faults[name]}
+      hint={hint}
+    />
   );
   const example = unit === "in" ? "16 1/2" : "419";
   return (

@@ -14,8 +14,17 @@ const row = (nickname: string, over: Partial<CounterRow> = {}): CounterRow => ({
   ...over,
 });
 const rows = [
-  row("Old Mule", { promisedAt: "2026-03-09T12:00:00.000Z", bayNumber: 5, stage: { kind: "layout", state: "under-way" } }),
-  row("Biscuit", { promisedAt: "2026-03-02T12:00:00.000Z", bayNumber: 1, hold: { words: "level void" }, code: "K7RD" }),
+  row("Old Mule", {
+    promisedAt: "2026-03-09T12:00:00.000Z",
+    bayNumber: 5,
+    stage: { kind: "layout", state: "under-way" },
+  }),
+  row("Biscuit", {
+    promisedAt: "2026-03-02T12:00:00.000Z",
+    bayNumber: 1,
+    hold: { words: "level void" },
+    code: "K7RD",
+  }),
   row("Moth", { customer: "Abel Quist", stage: null }),
 ];
 const names = (search: string) =>

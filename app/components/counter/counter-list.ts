@@ -96,7 +96,13 @@ export function pickRows<R extends CounterRow>(rows: readonly R[], query: Counte
 /** How many builds each view of the list has. */
 export function countShows(rows: readonly CounterRow[], now: string): Record<CounterShow, number> {
   const count = (show: CounterShow) => rows.filter((row) => shows(row, show, now)).length;
-  return { all: rows.length, late: count("late"), hold: count("hold"), bay: count("bay"), yard: count("yard") };
+  return {
+    all: rows.length,
+    late: count("late"),
+    hold: count("hold"),
+    bay: count("bay"),
+    yard: count("yard"),
+  };
 }
 
 /** The stage in words. */

@@ -4,7 +4,6 @@ import { VEHICLE_KIND, type VehicleKind } from "../../domain/builds/vehicle-kind
 import { buttonClass } from "../../ui/button";
 import { Sign } from "../../ui/sign";
 import { Tape } from "../../ui/tape";
-import { SortHead } from "./sort-head";
 import { spanInWords, whenInWords } from "../time";
 import { VehiclePlan } from "../vehicle-plan";
 import {
@@ -19,6 +18,7 @@ import {
   SHOW_LABEL,
   stageWords,
 } from "./counter-list";
+import { SortHead } from "./sort-head";
 
 type Row = CounterRow & { buildId: number; kind: VehicleKind; lengthMm: number; widthMm: number };
 /** Pixels a millimetre: every vehicle of the list is drawn to one scale. */
@@ -110,7 +110,9 @@ function Filters({ query, counts }: { query: CounterQuery; counts: Record<Counte
               className={`inline-flex min-h-11 items-center gap-1.5 border-b-[3px] px-2.5 ${here ? "border-brass font-semibold" : "border-transparent text-concrete-700 hover:border-concrete-300"}`}
             >
               {SHOW_LABEL[show]}
-              <span className={`font-label ${show === "late" && counts.late > 0 ? "text-oxide" : "text-concrete-500"}`}>
+              <span
+                className={`font-label ${show === "late" && counts.late > 0 ? "text-oxide" : "text-concrete-500"}`}
+              >
                 {counts[show]}
               </span>
             </Link>
@@ -132,7 +134,11 @@ function List({ rows, query, now, timeZone }: Pick<Props, "rows" | "query" | "no
               key={label}
               label={label}
               state={sort === null ? "none" : query.sort !== sort ? "off" : query.down ? "down" : "up"}
-              to={sort === null ? "" : counterAddress({ ...query, sort, down: query.sort === sort && !query.down })}
+              to={
+                sort === null
+                  ? ""
+                  : counterAddress({ ...query, sort, down: query.sort === sort && !query.down })
+              }
             />
           ))}
         </tr>
@@ -152,7 +158,10 @@ function BuildLine({ row, now, timeZone }: { row: Row; now: string; timeZone: st
   return (
     <tr className="relative border-concrete-200 border-b hover:bg-chalk max-md:grid max-md:grid-cols-2 max-md:gap-x-4 max-md:py-3">
       <td className={`${CELL} max-md:col-span-2 max-md:pb-1.5`}>
-        <Link to={`/builds/${row.buildId}`} className="inline-flex min-h-11 items-center after:absolute after:inset-0">
+        <Link
+          to={`/builds/${row.buildId}`}
+          className="inline-flex min-h-11 items-center after:absolute after:inset-0"
+        >
           <Tape name={row.nickname} code={row.code} />
         </Link>
       </td>
@@ -214,12 +223,18 @@ function NobodyHere({ mayBookIn }: { mayBookIn: boolean }) {
 }
 
 function NothingFound({ query }: { query: CounterQuery }) {
-  const what = [query.show === "all" ? "" : SHOW_LABEL[query.show].toLowerCase(), query.q ? `with “${query.q}”` : ""];
+  const what = [
+    query.show === "all" ? "" : SHOW_LABEL[query.show].toLowerCase(),
+    query.q ? `with “${query.q}”` : "",
+  ];
   return (
     <div className="grid max-w-xl gap-3 py-10">
       <p className="font-label font-semibold text-2xl">No build {what.filter(Boolean).join(" ")}.</p>
       <p>
-        <Link to={counterAddress({ ...query, q: "", show: "all" })} className="font-medium text-line underline">
+        <Link
+          to={counterAddress({ ...query, q: "", show: "all" })}
+          className="font-medium text-line underline"
+        >
           Show all that are here
         </Link>
       </p>

@@ -14,7 +14,8 @@ export function matchCustomers(customers: readonly Customer[], typed: string): C
   return customers
     .filter(
       ({ name, phone }) =>
-        name.toLowerCase().includes(needle) || (digits.length > 2 && phone.replace(/\D/g, "").includes(digits)),
+        name.toLowerCase().includes(needle) ||
+        (digits.length > 2 && phone.replace(/\D/g, "").includes(digits)),
     )
     .sort((a, b) => starts(a) - starts(b))
     .slice(0, MOST_SHOWN);
@@ -74,7 +75,13 @@ export function CustomerPick({
           aria-controls={listId}
           aria-autocomplete="list"
           aria-activedescendant={found[active] ? `${listId}-${found[active].id}` : undefined}
-          hint={chosen ? knownWords(chosen) : name.trim() === "" ? "A name; known customers are offered." : "A new customer."}
+          hint={
+            chosen
+              ? knownWords(chosen)
+              : name.trim() === ""
+                ? "A name; known customers are offered."
+                : "A new customer."
+          }
           error={faults.customerName ?? faults.customerId}
           onClick={() => setOpen(true)}
           onBlur={() => setOpen(false)}
@@ -114,12 +121,29 @@ export function CustomerPick({
       </div>
       {chosen ? null : (
         <div className="grid gap-4 sm:grid-cols-2">
-          <Field label="Phone" name="customerPhone" type="tel" autoComplete="off" maxLength={40} defaultValue={typed.customerPhone} error={faults.customerPhone} />
-          <Field label="E-mail" name="customerEmail" type="email" autoComplete="off" maxLength={190} defaultValue={typed.customerEmail} error={faults.customerEmail} />
+          <Field
+            label="Phone"
+            name="customerPhone"
+            type="tel"
+            autoComplete="off"
+            maxLength={40}
+            defaultValue={typed.customerPhone}
+            error={faults.customerPhone}
+          />
+          <Field
+            label="E-mail"
+            name="customerEmail"
+            type="email"
+            autoComplete="off"
+            maxLength={190}
+            defaultValue={typed.customerEmail}
+            error={faults.customerEmail}
+          />
         </div>
       )}
     </div>
   );
 }
 
-const knownWords = ({ phone, email }: Customer) => `Known customer${phone || email ? `, ${phone || email}` : ""}.`;
+const knownWords = ({ phone, email }: Customer) =>
+  `Known customer${phone || email ? `, ${phone || email}` : ""}.`;

@@ -5,6 +5,7 @@ export function faultsOf(form: FormData, schema: z.ZodType): Record<string, stri
   const raw: Record<string, string> = {};
   for (const [name, value] of form) if (typeof value === "string") raw[name] = value;
   const faults: Record<string, string> = {};
-  for (const issue of schema.safeParse(raw).error?.issues ?? []) faults[issue.path.join(".") || "form"] ??= issue.message;
+  for (const issue of schema.safeParse(raw).error?.issues ?? [])
+    faults[issue.path.join(".") || "form"] ??= issue.message;
   return faults;
 }

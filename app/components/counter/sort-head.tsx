@@ -27,7 +27,11 @@ export function SortHead({
         >
           {label}
           {sorted ? (
-            <svg viewBox="0 0 10 12" className={`h-3 w-2.5 ${numeric ? "order-first" : ""}`} aria-hidden="true">
+            <svg
+              viewBox="0 0 10 12"
+              className={`h-3 w-2.5 ${numeric ? "order-first" : ""}`}
+              aria-hidden="true"
+            >
               <path d={state === "up" ? "M5 1l4 5H6v5H4V6H1z" : "M5 11L1 6h3V1h2v5h3z"} fill="currentColor" />
             </svg>
           ) : null}

@@ -1,11 +1,18 @@
 import { useState } from "react";
-import { BUILD_TEMPLATE_IDS, BUILD_TEMPLATES, type BuildTemplateId, STAGE_LABEL, type StageTemplate } from "../../domain/builds/stages";
+import {
+  BUILD_TEMPLATE_IDS,
+  BUILD_TEMPLATES,
+  type BuildTemplateId,
+  STAGE_LABEL,
+  type StageTemplate,
+} from "../../domain/builds/stages";
 import { BAY_KIND_LABEL } from "../../domain/floor/bays";
-import { Sign } from "../../ui/sign";
 import { SelectField } from "../../ui/field";
+import { Sign } from "../../ui/sign";
 import { stageSign } from "../floor/bay-rows";
 
-const templateOf = (id: string | undefined): BuildTemplateId => BUILD_TEMPLATE_IDS.find((known) => known === id) ?? "front-leaf";
+const templateOf = (id: string | undefined): BuildTemplateId =>
+  BUILD_TEMPLATE_IDS.find((known) => known === id) ?? "front-leaf";
 const hoursOf = (typed: string) => Number(typed.replace(",", ".")) || 0;
 
 type Line = { ticked: boolean; hours: string };
@@ -19,7 +26,13 @@ function linesOf(template: BuildTemplateId, typed: Record<string, string> | null
 }
 
 /** A list of stages to start from; a stage is unticked, its hours are changed. */
-export function StagePick({ typed, faults }: { typed: Record<string, string>; faults: Record<string, string> }) {
+export function StagePick({
+  typed,
+  faults,
+}: {
+  typed: Record<string, string>;
+  faults: Record<string, string>;
+}) {
   const before = typed.template === undefined ? null : typed;
   const [template, setTemplate] = useState(templateOf(typed.template));
   const [lines, setLines] = useState(() => linesOf(template, before));
@@ -97,9 +110,13 @@ function StageRow({
   const label = STAGE_LABEL[stage.kind];
   const faultId = `hours-${index}-fault`;
   return (
-    <li className={`border-concrete-200 border-b border-l-4 pl-2 ${stage.stay ? "border-l-brass" : "border-l-transparent"}`}>
+    <li
+      className={`border-concrete-200 border-b border-l-4 pl-2 ${stage.stay ? "border-l-brass" : "border-l-transparent"}`}
+    >
       <div className="flex min-h-12 items-center gap-3">
-        <label className={`flex min-h-12 min-w-0 grow cursor-pointer items-center gap-3 ${line.ticked ? "" : "text-concrete-500"}`}>
+        <label
+          className={`flex min-h-12 min-w-0 grow cursor-pointer items-center gap-3 ${line.ticked ? "" : "text-concrete-500"}`}
+        >
           <input
             type="checkbox"
             name={`stage-${index}`}

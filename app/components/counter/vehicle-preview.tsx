@@ -4,7 +4,8 @@ import { parseLength } from "../../domain/units/parse-length";
 import { Tape } from "../../ui/tape";
 import { VehiclePlan } from "../vehicle-plan";
 
-const inWords = (length: Millimetres, unit: LengthUnit) => (unit === "in" ? formatFeet(length) : formatMillimetres(length));
+const inWords = (length: Millimetres, unit: LengthUnit) =>
+  unit === "in" ? formatFeet(length) : formatMillimetres(length);
 
 const read = (typed: string, unit: LengthUnit): Millimetres | null => {
   const length = typed.trim() === "" ? null : parseLength(typed, unit);
@@ -35,7 +36,12 @@ export function VehiclePreview({
       {kind && long && wide ? (
         <>
           <div className="relative">
-            <VehiclePlan kind={kind} lengthMm={long} widthMm={wide} scale={Math.min(WIDEST_PX / long, TALLEST_PX / wide)} />
+            <VehiclePlan
+              kind={kind}
+              lengthMm={long}
+              widthMm={wide}
+              scale={Math.min(WIDEST_PX / long, TALLEST_PX / wide)}
+            />
             {nickname.trim() ? (
               <div className="absolute inset-0 grid place-items-center">
                 <Tape name={nickname.trim()} />
@@ -43,7 +49,8 @@ export function VehiclePreview({
             ) : null}
           </div>
           <figcaption className="text-center">
-            <b className="font-semibold">{inWords(long, unit)}</b> long, <b className="font-semibold">{inWords(wide, unit)}</b> wide
+            <b className="font-semibold">{inWords(long, unit)}</b> long,{" "}
+            <b className="font-semibold">{inWords(wide, unit)}</b> wide
           </figcaption>
         </>
       ) : (

@@ -4,6 +4,8 @@ import type { LayoutView } from "../../domain/layout/view";
 /** What the steps depend on, as a layout's screens know it. */
 export function factsOf(view: LayoutView): StepFacts {
   const { level, standsInBay, bay } = view;
+  // Old drops count while they may still be carried over to a new level.
+  const waiting = level?.state !== "true" || level.redrop.state === "wanted";
   const needed = view.drops.filter((drop) => drop.needed);
   const moved = level !== null && level.state !== "void" && !standsInBay;
   return {
@@ -12,7 +14,7 @@ export function factsOf(view: LayoutView): StepFacts {
     levelVoidReason: moved ? `the vehicle is not in Bay ${bay.number}` : (level?.voided?.reason ?? null),
     redropWanted: level?.redrop.state === "wanted",
     marksConfirmed: view.marks !== null,
-    dropsKept: needed.filter((drop) => drop.reading?.stands && !drop.reading.suspect).length,
+    dropsKept: needed.filter((drop) => drop.reading !== null && (drop.reading.stands || waiting)).length,
     dropsNeeded: needed.length,
     dropsSuspect: view.drops.filter((drop) => drop.reading?.suspect).length,
     axleLineChosen: view.axle !== null,

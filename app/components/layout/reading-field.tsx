@@ -48,8 +48,8 @@ export function ReadingField(props: Props) {
     }
   };
   return (
-    <div className="grid min-w-0 content-start gap-0.5">
-      <label htmlFor={id} className="text-[15px] font-semibold text-concrete-700">
+    <div className="grid min-w-0 content-start gap-1">
+      <label htmlFor={id} className="text-[15px] leading-tight font-semibold text-concrete-700">
         {label}
         {quietLabel ? <span className="sr-only"> {quietLabel}</span> : null}
       </label>

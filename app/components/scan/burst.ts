@@ -13,7 +13,8 @@ export const NO_BURST: Burst = { signs: "", last: 0 };
  */
 export function takeKey(burst: Burst, key: string, at: number): { burst: Burst; text: string | null } {
   const fast = burst.signs !== "" && at - burst.last <= BETWEEN_KEYS_MS;
-  if (key === "Enter") return { burst: NO_BURST, text: fast && burst.signs.length >= LEAST_SIGNS ? burst.signs : null };
+  if (key === "Enter")
+    return { burst: NO_BURST, text: fast && burst.signs.length >= LEAST_SIGNS ? burst.signs : null };
   if (key === "Shift") return { burst: { ...burst, last: burst.signs ? at : 0 }, text: null };
   if (key.length !== 1) return { burst: NO_BURST, text: null };
   return { burst: { signs: fast ? burst.signs + key : key, last: at }, text: null };

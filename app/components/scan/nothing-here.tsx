@@ -25,7 +25,10 @@ export function NothingHere({
           <ul className="flex flex-wrap gap-x-6 gap-y-1">
             {areas.map((area) => (
               <li key={area.to}>
-                <Link className="inline-flex min-h-11 items-center font-medium text-line text-lg underline" to={area.to}>
+                <Link
+                  className="inline-flex min-h-11 items-center font-medium text-line text-lg underline"
+                  to={area.to}
+                >
                   {area.label}
                 </Link>
               </li>

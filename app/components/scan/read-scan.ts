@@ -37,8 +37,11 @@ export function readScan(typed: string): Scanned {
   const likely = stranger && LOOKS_LIKE[stranger];
   if (signs.length <= CODE_LENGTH + 1 && stranger && likely)
     return says(`There is no ${stranger} on our tags: is it ${likely}?`);
-  if (stranger && !likely) return says(`There is no “${stranger}” on our tags, only capital letters and digits.`);
+  if (stranger && !likely)
+    return says(`There is no “${stranger}” on our tags, only capital letters and digits.`);
   if (signs.length < CODE_LENGTH)
-    return says(`A tag has ${CODE_LENGTH} signs; here ${signs.length === 1 ? "is 1" : `are ${signs.length}`}.`);
+    return says(
+      `A tag has ${CODE_LENGTH} signs; here ${signs.length === 1 ? "is 1" : `are ${signs.length}`}.`,
+    );
   return says(`A tag has ${CODE_LENGTH} signs; here are ${signs.length}.`);
 }

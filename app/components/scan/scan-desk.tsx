@@ -53,7 +53,9 @@ export function ScanDesk({
         <dl className="grid gap-3 border-concrete-200 border-t pt-5 text-concrete-700">
           <div>
             <dt className="font-semibold text-ink">Nothing reads it?</dt>
-            <dd>Wipe the tag, keep it flat, mind the lamp's glare. The code below the picture always works.</dd>
+            <dd>
+              Wipe the tag, keep it flat, mind the lamp's glare. The code below the picture always works.
+            </dd>
           </div>
           <div>
             <dt className="font-semibold text-ink">Torn or lost?</dt>

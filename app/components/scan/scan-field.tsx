@@ -48,7 +48,11 @@ export function ScanField({
           Open
         </Button>
       </div>
-      <p id="scan-help" role="status" className={problem ? "font-medium text-lg text-oxide" : "text-concrete-700"}>
+      <p
+        id="scan-help"
+        role="status"
+        className={problem ? "font-medium text-lg text-oxide" : "text-concrete-700"}
+      >
         {problem ?? "Four signs under the picture. A scanner that types goes straight on."}
       </p>
     </Form>

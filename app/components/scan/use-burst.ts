@@ -2,7 +2,8 @@ import { useEffect, useRef } from "react";
 import { NO_BURST, takeKey } from "./burst";
 
 const isTyping = (target: EventTarget | null) =>
-  target instanceof HTMLElement && (target.isContentEditable || /^(INPUT|TEXTAREA|SELECT)$/.test(target.tagName));
+  target instanceof HTMLElement &&
+  (target.isContentEditable || /^(INPUT|TEXTAREA|SELECT)$/.test(target.tagName));
 
 /**
  * Listens on the whole page for a scanner that types, wherever the focus is. What goes into a field is left to that

@@ -5,7 +5,10 @@ import type { CameraState } from "./use-camera";
 const WORDS: Record<CameraState, { head: string; help: string }> = {
   off: { head: "The camera is off.", help: "It is used only to read tags; no picture is kept or sent." },
   asking: { head: "Getting the camera…", help: "If the browser asks, allow it." },
-  reading: { head: "Hold the tag in the frame.", help: "It goes on by itself. A hand's width away is about right." },
+  reading: {
+    head: "Hold the tag in the frame.",
+    help: "It goes on by itself. A hand's width away is about right.",
+  },
   refused: {
     head: "The browser keeps the camera from us.",
     help: "Allow it beside the address at the top, then try again. Or type the code.",
@@ -18,7 +21,10 @@ const WORDS: Record<CameraState, { head: string; help: string }> = {
     head: "Browsers lend a camera to https pages only.",
     help: "This page came over plain http. Type the code, use a scanner, or ask whoever looks after the server for https.",
   },
-  fault: { head: "The reader could not be fetched.", help: "Look at the network, then try again. Or type the code." },
+  fault: {
+    head: "The reader could not be fetched.",
+    help: "Look at the network, then try again. Or type the code.",
+  },
 };
 
 /** The camera's picture with the frame to hold a tag in, and what the camera is doing, in words. */
@@ -52,7 +58,9 @@ export function Viewfinder({
         {runs ? null : (
           <div className="absolute inset-0 grid place-items-center p-6">
             {state === "asking" ? (
-              <p className="rounded-[3px] bg-[#1a1b1d]/80 px-3 py-1 text-lg text-white">{WORDS.asking.head}</p>
+              <p className="rounded-[3px] bg-[#1a1b1d]/80 px-3 py-1 text-lg text-white">
+                {WORDS.asking.head}
+              </p>
             ) : (
               <Button tone="go" size="l" type="button" onClick={onStart}>
                 {state === "off" ? "Use the camera" : "Try the camera again"}
@@ -80,9 +88,18 @@ export function Viewfinder({
 function Frame({ lit }: { lit: boolean }) {
   const corner = (x: number, y: number, dx: number, dy: number) => `M${x} ${y + 26 * dy}V${y}H${x + 26 * dx}`;
   return (
-    <svg viewBox="0 0 400 300" className="pointer-events-none absolute inset-0 h-full w-full" aria-hidden="true">
+    <svg
+      viewBox="0 0 400 300"
+      className="pointer-events-none absolute inset-0 h-full w-full"
+      aria-hidden="true"
+    >
       <path
-        d={[corner(90, 40, 1, 1), corner(310, 40, -1, 1), corner(90, 260, 1, -1), corner(310, 260, -1, -1)].join("")}
+        d={[
+          corner(90, 40, 1, 1),
+          corner(310, 40, -1, 1),
+          corner(90, 260, 1, -1),
+          corner(310, 260, -1, -1),
+        ].join("")}
         fill="none"
         stroke={lit ? "#e3b25b" : "#565a5f"}
         strokeWidth="4"

@@ -1,6 +1,6 @@
 import { Form, Link, useNavigation } from "react-router";
-import { Button } from "../../ui/button";
 import { Bob } from "../../ui/bob";
+import { Button } from "../../ui/button";
 import { Field } from "../../ui/field";
 
 /** The door: a plumb line hangs to the floor beside the form. */
@@ -37,7 +37,10 @@ export function SignInPage({
         ) : null}
         <Form method="post" className="grid max-w-md gap-5" aria-label="Sign in">
           {refused ? (
-            <p role="alert" className="border-oxide border-l-4 bg-oxide-wash px-4 py-3 font-medium text-oxide">
+            <p
+              role="alert"
+              className="border-oxide border-l-4 bg-oxide-wash px-4 py-3 font-medium text-oxide"
+            >
               {refused.message}
             </p>
           ) : null}
@@ -70,8 +73,8 @@ export function SignInPage({
         <p className="max-w-md text-concrete-700">
           {demoShop ? (
             <>
-              <b className="font-semibold text-ink">Demo shop.</b> {demoShop} is made up: <b className="font-semibold text-ink">npm start</b>{" "}
-              printed its sign-ins where it was started.
+              <b className="font-semibold text-ink">Demo shop.</b> {demoShop} is made up:{" "}
+              <b className="font-semibold text-ink">npm start</b> printed its sign-ins where it was started.
             </>
           ) : (
             "No way in? Ask the owner of your shop."
@@ -86,7 +89,12 @@ export function SignInPage({
 function HangingBob() {
   return (
     <div className="relative hidden overflow-hidden md:block" aria-hidden="true">
-      <svg viewBox="0 0 600 900" preserveAspectRatio="xMidYMax slice" className="absolute inset-0 h-full w-full">
+      <svg
+        aria-hidden="true"
+        viewBox="0 0 600 900"
+        preserveAspectRatio="xMidYMax slice"
+        className="absolute inset-0 h-full w-full"
+      >
         <g stroke="#dcd9d1" strokeWidth="1.5">
           <path d="M0 700H600M0 560H600M0 840H600M90 0V900M300 0V900M510 0V900" />
         </g>
@@ -105,7 +113,13 @@ function HangingBob() {
         </text>
         <path d="M300 0V560" stroke="#7f540b" strokeWidth="2.4" />
         <path d="M288 560h24l2 12h-28z" fill="#7f540b" />
-        <path d="M280 572h40l4 22-24 112-24-112z" fill="#a8741a" stroke="#7f540b" strokeWidth="2.2" strokeLinejoin="round" />
+        <path
+          d="M280 572h40l4 22-24 112-24-112z"
+          fill="#a8741a"
+          stroke="#7f540b"
+          strokeWidth="2.2"
+          strokeLinejoin="round"
+        />
         <path d="M300 580l12 14-12 84z" fill="#7f540b" opacity=".38" />
       </svg>
     </div>

@@ -34,13 +34,24 @@ export function SpringDrawing({
   }).join("");
   return (
     <svg viewBox={`0 0 ${width} ${HEIGHT_MM}`} className="block h-auto w-full" role="img" aria-label={name}>
-      <path d={`M${width / 2} 8V${HEIGHT_MM - 12}`} className="stroke-concrete-500" strokeWidth="5" strokeDasharray="4 16" strokeLinecap="round" />
+      <path
+        d={`M${width / 2} 8V${HEIGHT_MM - 12}`}
+        className="stroke-concrete-500"
+        strokeWidth="5"
+        strokeDasharray="4 16"
+        strokeLinecap="round"
+      />
       <path d={shorter} className="stroke-brass-ink" strokeOpacity=".45" strokeWidth={LEAF_MM} />
       <path d={`M${left} ${top}H${right}`} className="stroke-brass" strokeWidth={LEAF_MM} />
       {[left, right].map((x) => (
         <circle key={x} cx={x} cy={top} r={EYE_MM} className="fill-chalk stroke-brass-ink" strokeWidth="9" />
       ))}
-      <path d={`M${pin} ${top - 44}V${top + shown * (LEAF_MM + 2) + 24}`} className="stroke-ink" strokeWidth="10" strokeLinecap="round" />
+      <path
+        d={`M${pin} ${top - 44}V${top + shown * (LEAF_MM + 2) + 24}`}
+        className="stroke-ink"
+        strokeWidth="10"
+        strokeLinecap="round"
+      />
     </svg>
   );
 }

@@ -1,7 +1,19 @@
 import { describe, expect, it } from "vitest";
-import { lengthsOf, nextRackNumber, pickSprings, pinWords, readSpringQuery, type SpringRow, springAddress } from "./spring-facts";
+import {
+  lengthsOf,
+  pickSprings,
+  pinWords,
+  readSpringQuery,
+  type SpringRow,
+  springAddress,
+} from "./spring-facts";
 
-const spring = (rackNumber: number, lengthIn: number, frontIn: number, over: Partial<SpringRow> = {}): SpringRow => ({
+const spring = (
+  rackNumber: number,
+  lengthIn: number,
+  frontIn: number,
+  over: Partial<SpringRow> = {},
+): SpringRow => ({
   rackNumber,
   lengthMm: lengthIn * 25.4,
   frontHalfMm: frontIn * 25.4,
@@ -42,9 +54,7 @@ describe("the rack's list", () => {
     expect(readSpringQuery(new URL(springAddress(query), "http://shop").searchParams)).toEqual(query);
   });
 
-  it("offers each length once and the next free number", () => {
+  it("offers each length once", () => {
     expect(lengthsOf(rack)).toHaveLength(2);
-    expect(nextRackNumber(rack)).toBe(23);
-    expect(nextRackNumber([])).toBe(1);
   });
 });

@@ -61,7 +61,11 @@ const VALUE: Record<SpringSort, (spring: SpringRow) => number> = {
 const sameLength = (a: number, b: number) => Math.abs(a - b) < 0.5;
 
 /** The springs that a query asks for, in its order; equal ones stand by rack number. */
-export function pickSprings<S extends SpringRow>(rack: readonly S[], query: SpringQuery, unit: LengthUnit): S[] {
+export function pickSprings<S extends SpringRow>(
+  rack: readonly S[],
+  query: SpringQuery,
+  unit: LengthUnit,
+): S[] {
   const needle = query.q.toLowerCase();
   const text = (spring: S) =>
     `rack ${spring.rackNumber} ${spring.note} ${pinWords(spring.lengthMm, spring.frontHalfMm, unit)}`.toLowerCase();
@@ -82,7 +86,3 @@ export function lengthsOf(rack: readonly SpringRow[]): Millimetres[] {
     if (!lengths.some((known) => sameLength(known, lengthMm))) lengths.push(mm(lengthMm));
   return lengths;
 }
-
-/** The lowest rack number above every one in use. */
-export const nextRackNumber = (rack: readonly SpringRow[]) =>
-  Math.max(0, ...rack.map((spring) => spring.rackNumber)) + 1;

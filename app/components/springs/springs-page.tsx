@@ -5,7 +5,7 @@ import { Button } from "../../ui/button";
 import { Dialog } from "../../ui/dialog";
 import { SortHead } from "../counter/sort-head";
 import { AddSpring } from "./add-spring";
-import { Hangers, type HangerCard } from "./hangers";
+import { type HangerCard, Hangers } from "./hangers";
 import { SpringDrawing } from "./spring-drawing";
 import { pinWords, type SpringQuery, type SpringRow, type SpringSort, springAddress } from "./spring-facts";
 
@@ -50,7 +50,10 @@ export function SpringsPage(props: SpringsPageProps) {
           ) : (
             <p className="py-6 text-lg">
               No spring in the rack is like that.{" "}
-              <Link className="font-medium text-line underline" to={springAddress({ ...query, q: "", length: null })}>
+              <Link
+                className="font-medium text-line underline"
+                to={springAddress({ ...query, q: "", length: null })}
+              >
                 Show the whole rack
               </Link>
             </p>
@@ -98,13 +101,24 @@ function Filters({ query, lengths, unit }: SpringsPageProps) {
         />
       </Form>
       <nav aria-label="Length" className="flex flex-wrap gap-1">
-        <Link replace to={springAddress({ ...query, length: null })} className={chip(query.length === null)} aria-current={query.length === null ? "true" : undefined}>
+        <Link
+          replace
+          to={springAddress({ ...query, length: null })}
+          className={chip(query.length === null)}
+          aria-current={query.length === null ? "true" : undefined}
+        >
           Every length
         </Link>
         {lengths.map((length) => {
           const here = query.length !== null && Math.abs(query.length - length) < 0.5;
           return (
-            <Link key={length} replace to={springAddress({ ...query, length })} className={chip(here)} aria-current={here ? "true" : undefined}>
+            <Link
+              key={length}
+              replace
+              to={springAddress({ ...query, length })}
+              className={chip(here)}
+              aria-current={here ? "true" : undefined}
+            >
               {formatLength(length, unit, { denominator: 16, decimals: 0 })}
             </Link>
           );
@@ -138,7 +152,11 @@ function Rack(props: SpringsPageProps) {
               label={label}
               numeric={numeric}
               state={sort === null ? "none" : query.sort !== sort ? "off" : query.down ? "down" : "up"}
-              to={sort === null ? "" : springAddress({ ...query, sort, down: query.sort === sort && !query.down })}
+              to={
+                sort === null
+                  ? ""
+                  : springAddress({ ...query, sort, down: query.sort === sort && !query.down })
+              }
             />
           ))}
           {mayEdit ? (
@@ -170,7 +188,10 @@ function SpringLine({ spring, unit, longestMm, mayEdit }: SpringsPageProps & { s
   const rear = spring.lengthMm - spring.frontHalfMm;
   return (
     <tr className={LINE}>
-      <th scope="row" className={`${CELL} font-label font-semibold text-2xl max-lg:absolute max-lg:top-3 max-lg:left-0`}>
+      <th
+        scope="row"
+        className={`${CELL} font-label font-semibold text-2xl max-lg:absolute max-lg:top-3 max-lg:left-0`}
+      >
         {spring.rackNumber}
       </th>
       <td className={`${CELL} max-lg:w-full lg:w-[26%] lg:min-w-52 xl:w-[30%]`}>
@@ -197,7 +218,7 @@ function SpringLine({ spring, unit, longestMm, mayEdit }: SpringsPageProps & { s
       </td>
       <td className={`${CELL} text-concrete-700`}>{spring.note}</td>
       {mayEdit ? (
-        <td className={`${CELL} whitespace-nowrap text-right max-lg:ml-auto lg:pr-0`}>
+        <td className={`${CELL} text-right max-lg:ml-auto lg:pr-0`}>
           <TakeOut spring={spring} />
         </td>
       ) : null}
@@ -214,7 +235,14 @@ function TakeOut({ spring }: { spring: Spring }) {
   const refused = fetcher.data && !fetcher.data.ok ? fetcher.data.message : null;
   return (
     <>
-      <Button size="m" tone="quiet" aria-label={`Take spring ${spring.rackNumber} out…`} busy={fetcher.state !== "idle"} onClick={() => setAsked(true)}>
+      <Button
+        size="m"
+        tone="quiet"
+        className="whitespace-nowrap"
+        aria-label={`Take spring ${spring.rackNumber} out…`}
+        busy={fetcher.state !== "idle"}
+        onClick={() => setAsked(true)}
+      >
         Take out…
       </Button>
       {refused ? (
@@ -246,8 +274,8 @@ function TakeOut({ spring }: { spring: Spring }) {
         }
       >
         <p className="text-left">
-          Layouts no longer offer it. Sheets that name it keep their figures, so number {spring.rackNumber} is not given
-          out again.
+          Layouts no longer offer it. Sheets that name it keep their figures, so number {spring.rackNumber} is
+          not given out again.
         </p>
       </Dialog>
     </>

@@ -42,7 +42,12 @@ export function PaperTag({ nickname, code, kind, qr, shape, goesOn, again = fals
       </svg>
       <p className="paper-tag-tape">{nickname}</p>
       <p className="paper-tag-kind">{kind}</p>
-      <QrSvg className="paper-tag-qr" size={qr.size} path={qr.path} name={again ? undefined : `QR code of ${nickname}`} />
+      <QrSvg
+        className="paper-tag-qr"
+        size={qr.size}
+        path={qr.path}
+        name={again ? undefined : `QR code of ${nickname}`}
+      />
       <p className="paper-tag-code">{code}</p>
       <p className="paper-tag-foot">
         <span>Scan or type this code</span>

@@ -64,8 +64,8 @@ function Controls({ buildId, tag, address, size }: Omit<TagPageProps, "qr">) {
       </div>
       <div className="hidden gap-5 lg:grid">
         <p className="text-concrete-700">
-          Print at 100 %, without “fit to page”. Hang it where a hand reaches it: the mirror or the steering wheel, never
-          a part that comes off.
+          Print at 100 %, without “fit to page”. Hang it where a hand reaches it: the mirror or the steering
+          wheel, never a part that comes off.
         </p>
         <p className="text-concrete-700">
           The picture opens <span className="break-all font-medium text-ink">{address}</span>
@@ -129,7 +129,8 @@ function Replace({ code, nickname }: { code: string; nickname: string }) {
         }
       >
         <p>
-          {code} will lead nowhere any more, and no vehicle gets it again. Print the new tag and take every old one off.
+          {code} will lead nowhere any more, and no vehicle gets it again. Print the new tag and take every
+          old one off.
         </p>
       </Dialog>
     </div>

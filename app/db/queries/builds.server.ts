@@ -4,7 +4,8 @@ import type { VehicleKind } from "../../domain/builds/vehicle-kinds";
 import { type Reader, schema } from "../client.server";
 import { OPEN_END } from "../schema";
 
-const { bays, builds, customers, holds, journal, layouts, people, placements, stages, tags, vehicles } = schema;
+const { bays, builds, customers, holds, journal, layouts, people, placements, stages, tags, vehicles } =
+  schema;
 
 const iso = (at: Date) => at.toISOString();
 
@@ -101,7 +102,13 @@ export type BuildStageRow = {
 /** One build with its vehicle and its customer, before anybody's permissions; null when the shop has no such build. */
 export async function readBuild(tx: Reader, shopId: number, buildId: number) {
   const [row] = await tx
-    .select({ build: builds, vehicle: vehicles, customer: customers, code: tags.code, bookedInBy: people.name })
+    .select({
+      build: builds,
+      vehicle: vehicles,
+      customer: customers,
+      code: tags.code,
+      bookedInBy: people.name,
+    })
     .from(builds)
     .innerJoin(vehicles, eq(vehicles.id, builds.vehicleId))
     .innerJoin(customers, eq(customers.id, vehicles.customerId))
@@ -139,7 +146,11 @@ export async function readBuild(tx: Reader, shopId: number, buildId: number) {
 
 /** A build's stages in their order. Fetched by a build that was found in the shop. */
 export async function readStages(tx: Reader, buildId: number): Promise<BuildStageRow[]> {
-  const rows = await tx.select().from(stages).where(eq(stages.buildId, buildId)).orderBy(asc(stages.position));
+  const rows = await tx
+    .select()
+    .from(stages)
+    .where(eq(stages.buildId, buildId))
+    .orderBy(asc(stages.position));
   return rows.map((row) => ({
     id: row.id,
     kind: row.kind,

@@ -1,4 +1,4 @@
-import { and, asc, eq, isNull } from "drizzle-orm";
+import { and, asc, eq, isNull, max } from "drizzle-orm";
 import { type Reader, schema } from "../client.server";
 
 const { hangerHoles, hangers, springs } = schema;
@@ -39,7 +39,20 @@ export async function readRack(tx: Reader, shopId: number): Promise<RackSpring[]
   }));
 }
 
-export type HangerCard = { id: number; name: string; holes: { number: number; aheadMm: number; aheadTyped: string }[] };
+/** The lowest rack number above every one given out, springs that have left included. */
+export async function readNextRackNumber(tx: Reader, shopId: number): Promise<number> {
+  const [row] = await tx
+    .select({ highest: max(springs.rackNumber) })
+    .from(springs)
+    .where(eq(springs.shopId, shopId));
+  return (row?.highest ?? 0) + 1;
+}
+
+export type HangerCard = {
+  id: number;
+  name: string;
+  holes: { number: number; aheadMm: number; aheadTyped: string }[];
+};
 
 /** The hanger patterns of the shop with their holes, from hole 1 on. */
 export async function readHangers(tx: Reader, shopId: number): Promise<HangerCard[]> {

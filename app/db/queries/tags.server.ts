@@ -4,7 +4,13 @@ import { type Reader, schema } from "../client.server";
 
 const { builds, layouts, tags, vehicles } = schema;
 
-export type BuildTag = { code: string; nickname: string; kind: VehicleKind; vehicleId: number; issuedAt: string };
+export type BuildTag = {
+  code: string;
+  nickname: string;
+  kind: VehicleKind;
+  vehicleId: number;
+  issuedAt: string;
+};
 
 /** The tag that hangs on a build's vehicle, with the build; null when the shop has no such build. */
 export async function readBuildTag(tx: Reader, shopId: number, buildId: number): Promise<BuildTag | null> {

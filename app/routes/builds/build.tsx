@@ -58,7 +58,12 @@ export default function Build({ loaderData }: Route.ComponentProps) {
   );
   return (
     <Shell shell={loaderData.shell} live={live}>
-      <BuildPage {...loaderData} now={loaderData.shell.now} timeZone={loaderData.shell.timeZone} unit={loaderData.shell.unit} />
+      <BuildPage
+        {...loaderData}
+        now={loaderData.shell.now}
+        timeZone={loaderData.shell.timeZone}
+        unit={loaderData.shell.unit}
+      />
     </Shell>
   );
 }

@@ -1,7 +1,7 @@
 import { data } from "react-router";
 import { z } from "zod";
-import { TagPage } from "~/components/tag/tag-page";
 import { Shell } from "~/components/frame/shell";
+import { TagPage } from "~/components/tag/tag-page";
 import { appContext } from "~/context";
 import { readBuildTag } from "~/db/queries/tags.server";
 import { env } from "~/env.server";
@@ -38,7 +38,10 @@ export async function loader({ request, params, context }: Route.LoaderArgs) {
 export async function action({ request, params, context }: Route.ActionArgs) {
   const form = await request.formData();
   return answer(form, async () => {
-    const { code } = readForm(form, z.object({ code: z.string({ error: "Which tag?" }).min(1, "Which tag?") }));
+    const { code } = readForm(
+      form,
+      z.object({ code: z.string({ error: "Which tag?" }).min(1, "Which tag?") }),
+    );
     return replaceTag(serviceContext(context), { buildId: idParam(params.buildId), code });
   });
 }

@@ -1,7 +1,7 @@
 import { useRevalidator } from "react-router";
 import { may } from "~/auth/permissions";
-import { CounterPage } from "~/components/counter/counter-page";
 import { countShows, pickRows, readCounterQuery } from "~/components/counter/counter-list";
+import { CounterPage } from "~/components/counter/counter-page";
 import { Shell } from "~/components/frame/shell";
 import { appContext } from "~/context";
 import { readBuildsHere } from "~/db/queries/builds.server";

@@ -32,5 +32,7 @@ export async function remembered<T>(request: Request, name: string, path: string
     if (typeof kept === "string" && kept !== "") throw redirect(`${path}?${kept}`);
     return data(await show());
   }
-  return data(await show(), { headers: { "Set-Cookie": await cookie.serialize(searchParams.toString().slice(0, 400)) } });
+  return data(await show(), {
+    headers: { "Set-Cookie": await cookie.serialize(searchParams.toString().slice(0, 400)) },
+  });
 }

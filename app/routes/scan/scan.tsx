@@ -1,7 +1,7 @@
 import { redirect, useNavigate } from "react-router";
-import { ScanDesk } from "~/components/scan/scan-desk";
-import { readScan } from "~/components/scan/read-scan";
 import { Shell } from "~/components/frame/shell";
+import { readScan } from "~/components/scan/read-scan";
+import { ScanDesk } from "~/components/scan/scan-desk";
 import { requireActor } from "~/http/request.server";
 import { readShell } from "~/http/shell.server";
 import type { Route } from "./+types/scan";

@@ -17,11 +17,19 @@ export async function loader({ params, context }: Route.LoaderArgs) {
   const scanned = readScan(params.code);
   const shell = () => readShell(context, actor);
   if (!scanned.ok)
-    return data({ shell: await shell(), typed: params.code, why: { state: "unreadable" as const, words: scanned.words } }, { status: 404 });
+    return data(
+      {
+        shell: await shell(),
+        typed: params.code,
+        why: { state: "unreadable" as const, words: scanned.words },
+      },
+      { status: 404 },
+    );
   if (scanned.code !== params.code) throw redirect(`/t/${scanned.code}`);
   const found = await lookUpTag(context.get(appContext).db, actor.shopId, scanned.code);
   if (found.state === "here") {
-    if (found.layoutId !== null && may(actor.role, "layouts:measure")) throw redirect(`/layouts/${found.layoutId}`);
+    if (found.layoutId !== null && may(actor.role, "layouts:measure"))
+      throw redirect(`/layouts/${found.layoutId}`);
     throw redirect(`/builds/${found.buildId}`);
   }
   return data({ shell: await shell(), typed: params.code, why: found }, { status: 404 });

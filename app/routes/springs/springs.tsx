@@ -1,19 +1,18 @@
-import { data } from "react-router";
+import { useRevalidator } from "react-router";
 import { z } from "zod";
 import { may } from "~/auth/permissions";
 import { Shell } from "~/components/frame/shell";
-import { lengthsOf, nextRackNumber, pickSprings, readSpringQuery } from "~/components/springs/spring-facts";
+import { lengthsOf, pickSprings, readSpringQuery } from "~/components/springs/spring-facts";
 import { SpringsPage } from "~/components/springs/springs-page";
 import { appContext } from "~/context";
 import { readShop } from "~/db/queries/shop.server";
-import { readHangers, readRack } from "~/db/queries/springs.server";
+import { readHangers, readNextRackNumber, readRack } from "~/db/queries/springs.server";
 import { readForm } from "~/http/form.server";
 import { answer, requireActor, serviceContext } from "~/http/request.server";
 import { readShell } from "~/http/shell.server";
 import { useLiveTouch } from "~/realtime/use-live";
 import { addSpring, takeOutSpring } from "~/services/add-spring.server";
 import { springForm } from "~/validation/spring";
-import { useRevalidator } from "react-router";
 import { remembered } from "../counter/remembered.server";
 import type { Route } from "./+types/springs";
 
@@ -33,7 +32,7 @@ export async function loader({ request, context }: Route.LoaderArgs) {
       rackCount: rack.length,
       lengths: lengthsOf(rack),
       longestMm: Math.max(0, ...rack.map((spring) => spring.lengthMm)),
-      nextRack: nextRackNumber(rack),
+      nextRack: await readNextRackNumber(db, actor.shopId),
       hangers: await readHangers(db, actor.shopId),
       mayEdit: may(actor.role, "springs:edit"),
     };
@@ -47,7 +46,8 @@ export async function action({ request, context }: Route.ActionArgs) {
   const actor = requireActor(context, "springs:edit");
   const form = await request.formData();
   const ctx = serviceContext(context);
-  if (form.get("do") === "take-out") return answer(form, () => takeOutSpring(ctx, readForm(form, TakeOut).springId));
+  if (form.get("do") === "take-out")
+    return answer(form, () => takeOutSpring(ctx, readForm(form, TakeOut).springId));
   const { unit } = await readShop(ctx.db, actor.shopId);
   return answer(form, () => addSpring(ctx, readForm(form, springForm(unit))));
 }

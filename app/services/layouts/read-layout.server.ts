@@ -106,15 +106,9 @@ async function levelView(tx: Reader, { checks, ground, facts, rows }: LoadedLayo
   const check = checks.at(-1);
   if (!check || ground.state === "none") return null;
   const readings = await readLevelReadings(tx, check.id);
-  const redropState = facts.redropWanted
-    ? "wanted"
-    : check.carryOffMm === null || check.carryOffMm === 0
-      ? "none"
-      : check.carriesId !== null
-        ? "stands"
-        : currentReadings(rows).some((row) => !ground.standing.has(row.reading.levelCheckId))
-          ? "void"
-          : "none";
+  const gone = ground.state === "true" && currentReadings(rows).some((row) => !ground.standing.has(row.reading.levelCheckId));
+  const carried = check.carriesId !== null && (check.carryOffMm ?? 0) > 0;
+  const redropState = facts.redropWanted ? "wanted" : gone ? "void" : carried ? "stands" : "none";
   return {
     id: check.id,
     method: check.method,

@@ -123,7 +123,9 @@ export function DropEntry({
           <p className="text-[15px] text-concrete-700">{point?.where}</p>
         )}
       </div>
-      {drop.side === "centre" ? null : <MethodChoice method={method} pick={(to) => edit({ method: to })} />}
+      {drop.side === "centre" || read.fit?.suspect ? null : (
+        <MethodChoice method={method} pick={(to) => edit({ method: to })} />
+      )}
       <EntryFields
         view={view}
         spot={drop}

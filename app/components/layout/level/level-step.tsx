@@ -114,12 +114,12 @@ function LevelCheck({ view, may, done }: Props) {
             {sending.trouble}
           </p>
         ) : null}
-        {may.measure && !isTrue ? (
+        {may.measure && (dirty || !level || level.state === "void") ? (
           <Button
             tone={typed ? "go" : "plain"}
             size="l"
             busy={sending.busy}
-            disabled={!typed || (!dirty && level?.state !== "void")}
+            disabled={!typed}
             onClick={props.check}
           >
             Check level
@@ -127,7 +127,7 @@ function LevelCheck({ view, may, done }: Props) {
         ) : null}
         {isTrue ? <NextAfter view={view} /> : null}
         {may.measure && level && level.state !== "void" ? (
-          <Button size="l" onClick={readAgain}>
+          <Button tone={level.state === "not-true" && !dirty ? "go" : "plain"} size="l" onClick={readAgain}>
             Read again
           </Button>
         ) : null}

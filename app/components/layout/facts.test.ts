@@ -1,0 +1,72 @@
+import { describe, expect, it } from "vitest";
+import { DROP_POINTS } from "../../domain/layout/drops";
+import { stepStates } from "../../domain/layout/steps";
+import type { LayoutView, LevelView } from "../../domain/layout/view";
+import { degrees } from "../../domain/units/angle";
+import { factsOf, wayBack, whyShutIn } from "./facts";
+
+const made = { name: "Wes Tran", initials: "WT", at: "2026-06-01T10:01:00.000Z" };
+const level = (over: Partial<LevelView> = {}): LevelView => ({
+  id: 1,
+  method: "heights",
+  state: "true",
+  noseHighDeg: degrees(0),
+  rightHighDeg: degrees(0),
+  twistMm: null,
+  twistDeg: null,
+  allowedDeg: degrees(0.1),
+  made,
+  voided: null,
+  readings: [],
+  redrop: { state: "none", offMm: null },
+  ...over,
+});
+
+function view(over: Partial<LayoutView>): LayoutView {
+  const drops = DROP_POINTS.flatMap((point) =>
+    point.sides.map((side) => ({
+      point: point.id,
+      side,
+      label: point.label,
+      needed: point.needed,
+      reading: null,
+      superseded: [],
+    })),
+  );
+  const whole = {
+    bay: { id: 5, number: 5, marks: [] },
+    standsInBay: true,
+    stands: made,
+    level: level(),
+    marks: null,
+    drops,
+    axle: null,
+    options: null,
+    choice: null,
+    approval: null,
+    steps: [],
+    ...over,
+  };
+  const made1 = whole as unknown as LayoutView;
+  return { ...made1, steps: stepStates(factsOf(made1)) };
+}
+
+describe("what a layout's steps depend on", () => {
+  it("shuts all after Level while the vehicle is not in its bay", () => {
+    const moved = view({ standsInBay: false });
+    expect(whyShutIn(moved, "drops")).toContain("the vehicle is not in Bay 5");
+    expect(wayBack(moved, "drops")?.id).toBe("level");
+  });
+
+  it("says what broke the level, and the way back", () => {
+    const broken = view({ level: level({ state: "void", voided: { made, reason: "a stand was touched" } }) });
+    expect(whyShutIn(broken, "marks")).toContain("a stand was touched");
+    expect(whyShutIn(broken, "level")).toBeNull();
+  });
+
+  it("leads to the first step that is not done", () => {
+    expect(wayBack(view({ stands: null, level: null }), "drops")?.id).toBe("stands");
+    expect(wayBack(view({}), "drops")?.id).toBe("marks");
+    expect(whyShutIn(view({}), "marks")).toBeNull();
+  });
+});

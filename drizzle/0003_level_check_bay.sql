@@ -1,2 +1,0 @@
-ALTER TABLE `level_checks` ADD `bay_id` bigint unsigned NOT NULL;--> statement-breakpoint
-ALTER TABLE `level_checks` ADD CONSTRAINT `level_checks_bay_id_bays_id_fk` FOREIGN KEY (`bay_id`) REFERENCES `bays`(`id`) ON DELETE no action ON UPDATE no action;
