@@ -1,5 +1,5 @@
 import { and, eq, isNull } from "drizzle-orm";
-import { isDuplicate, schema } from "../db/client.server";
+import { isDuplicate, schema, type Tx } from "../db/client.server";
 import type { SpringEntry } from "../validation/spring";
 import { type Context, change, requirePerson } from "./change.server";
 import { Refusal } from "./errors";
@@ -17,32 +17,7 @@ export async function addSpring(
 ): Promise<{ springId: number; words: string }> {
   const { shopId } = requirePerson(ctx, "springs:edit");
   return change(ctx, async (tx, note) => {
-    const id = await (async () => {
-      try {
-        const [row] = await tx
-          .insert(springs)
-          .values({
-            shopId,
-            rackNumber: what.rackNumber,
-            lengthMm: what.length.mm,
-            lengthTyped: what.length.typed,
-            frontHalfMm: what.frontHalf.mm,
-            frontHalfTyped: what.frontHalf.typed,
-            leaves: what.leaves,
-            leafWidthMm: what.leafWidth.mm,
-            leafWidthTyped: what.leafWidth.typed,
-            note: what.note,
-            addedAt: ctx.now(),
-          })
-          .$returningId();
-        return row?.id;
-      } catch (error) {
-        if (!isDuplicate(error)) throw error;
-        const words = await takenWords(ctx, shopId, what.rackNumber);
-        throw new Refusal("invalid", words, { rackNumber: words });
-      }
-    })();
-    if (id === undefined) throw new Error("The spring was not inserted");
+    const id = await insertSpring(tx, ctx, shopId, what);
     const words = `Spring into rack ${what.rackNumber}: ${what.length.typed}, front half ${what.frontHalf.typed}`;
     note({
       verb: "add-spring",
@@ -53,6 +28,34 @@ export async function addSpring(
     });
     return { springId: id, words };
   });
+}
+
+async function insertSpring(tx: Tx, ctx: Context, shopId: number, what: SpringEntry): Promise<number> {
+  const { rackNumber, length, frontHalf, leaves, leafWidth, note } = what;
+  try {
+    const [row] = await tx
+      .insert(springs)
+      .values({
+        shopId,
+        rackNumber,
+        lengthMm: length.mm,
+        lengthTyped: length.typed,
+        frontHalfMm: frontHalf.mm,
+        frontHalfTyped: frontHalf.typed,
+        leaves,
+        leafWidthMm: leafWidth.mm,
+        leafWidthTyped: leafWidth.typed,
+        note,
+        addedAt: ctx.now(),
+      })
+      .$returningId();
+    if (!row) throw new Error("The spring was not inserted");
+    return row.id;
+  } catch (error) {
+    if (!isDuplicate(error)) throw error;
+    const words = await takenWords(ctx, shopId, rackNumber);
+    throw new Refusal("invalid", words, { rackNumber: words });
+  }
 }
 
 async function takenWords(ctx: Context, shopId: number, rackNumber: number): Promise<string> {

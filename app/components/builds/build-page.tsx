@@ -1,54 +1,16 @@
 import { Link, useSearchParams } from "react-router";
-import { VEHICLE_KIND, type VehicleKind } from "../../domain/builds/vehicle-kinds";
-import type { BoardBay, BoardVehicle } from "../../domain/floor/board";
-import { formatFeet, type LengthUnit, mm } from "../../domain/units/length";
+import { VEHICLE_KIND } from "../../domain/builds/vehicle-kinds";
+import { formatFeet, mm } from "../../domain/units/length";
 import { buttonClass } from "../../ui/button";
 import { Sign } from "../../ui/sign";
 import { Tape } from "../../ui/tape";
 import { spanInWords, whenInWords } from "../time";
 import { VehiclePlan } from "../vehicle-plan";
-import { type Asked, AskedFor } from "./asked-for";
-import { StageLine, type StageRow } from "./stage-line";
+import { AskedFor } from "./asked-for";
+import type { BuildPageProps } from "./build-view";
+import { StageLine } from "./stage-line";
 import { Standing } from "./standing";
-import { Story, type StoryRow } from "./story";
-
-export type BuildPageProps = {
-  build: {
-    id: number;
-    state: "here" | "gone";
-    wanted: string;
-    nickname: string;
-    code: string;
-    kind: VehicleKind;
-    lengthMm: number;
-    widthMm: number;
-    asked: Asked;
-    promisedAt: string | null;
-    bookedInAt: string;
-    bookedInBy: string;
-    leftAt: string | null;
-  };
-  /** Null: not for this role. */
-  customer: { name: string; phone: string; email: string } | null;
-  stages: StageRow[];
-  holds: {
-    id: number;
-    words: string;
-    kind: string;
-    placedBy: string;
-    placedAt: string;
-    dueAt: string | null;
-  }[];
-  /** Null: it stands nowhere any more. */
-  standing: BoardVehicle | null;
-  bay: BoardBay | null;
-  story: StoryRow[];
-  mayPrint: boolean;
-  mayMeasure: boolean;
-  now: string;
-  timeZone: string;
-  unit: LengthUnit;
-};
+import { Story } from "./story";
 
 /** One build: the vehicle, where it stands, what was asked for, its stages and its story. */
 export function BuildPage(props: BuildPageProps) {

@@ -6,7 +6,7 @@ import type { BoardLevel } from "../../domain/floor/board";
 import { Button, buttonClass } from "../../ui/button";
 import { Sign } from "../../ui/sign";
 import { ageInWords, whenInWords } from "../time";
-import type { BuildPageProps } from "./build-page";
+import type { BuildPageProps } from "./build-view";
 
 /** Where the vehicle stands and since when, what holds it, and its layout. */
 export function Standing(props: BuildPageProps) {

@@ -9,6 +9,9 @@ import { levelWords } from "./level-words";
 import { unsentWords } from "./unsent";
 import type { Outbox } from "./use-unsent";
 
+/** A number of upright strokes only: a bridge down the middle would take it away. */
+const STROKES = /^1+$/;
+
 type Props = { view: LayoutView; person: string; now: number; live: LiveStatus; outbox: Outbox };
 
 /** Whose layout this is, how the level stands, and whether everything typed has reached the shop. */
@@ -18,7 +21,7 @@ export function LayoutHead({ view, person, now, live, outbox }: Props) {
     <header className="layout-head">
       <div className="layout-bay">
         <span className="sr-only">Bay</span>
-        <Stencil n={bay.number} size={40} />
+        <Stencil n={bay.number} size={40} cut={STROKES.test(String(bay.number)) ? "h" : "v"} />
       </div>
       <div className="min-w-0 py-1.5">
         <h1 className="flex items-baseline gap-2.5">

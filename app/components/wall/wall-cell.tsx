@@ -1,10 +1,16 @@
-import type { BayCard, BoardBay, BoardVehicle } from "../../domain/floor/board";
+import type { BayCard, BoardBay, BoardVehicle, NextCard } from "../../domain/floor/board";
 import { Sign } from "../../ui/sign";
 import { Stencil } from "../../ui/stencil";
 import { ToolCheck } from "../../ui/tool-check";
 import { whenInWords } from "../time";
 import { VehicleGlyph } from "../vehicle-plan";
 import { endWords, levelLine, PLACE_WORDS, piecesWords, stageWords } from "./wall-words";
+
+/** Letters of the second line that leave room for the vehicle's picture. */
+const ROOM_BESIDE_GLYPH = 26;
+
+const secondWords = (vehicle: BoardVehicle, now: number) =>
+  (vehicle.hold && vehicle.hold.kind !== "level-void" ? vehicle.hold.words : levelLine(vehicle, now)?.words) ?? "";
 
 const TONE = { true: "text-moss", stop: "text-oxide", quiet: "text-concrete-500" } as const;
 
@@ -16,9 +22,11 @@ type Props = {
   live: boolean;
   now: number;
   zone: string;
+  /** The next stint planned here. */
+  next: NextCard | null;
 };
 
-export function WallCell({ card, side, last, live, now, zone }: Props) {
+export function WallCell({ card, side, last, live, now, zone, next }: Props) {
   const { bay, vehicle } = card;
   return (
     <section
@@ -28,13 +36,23 @@ export function WallCell({ card, side, last, live, now, zone }: Props) {
       <div className="wall-number">
         <Stencil n={bay.number} size="calc(168 * var(--u))" cut={[1, 4, 7].includes(bay.number) ? "h" : "v"} />
       </div>
-      {vehicle ? live ? <LiveLines card={card} now={now} zone={zone} /> : <StaleLines card={card} /> : <EmptyLines live={live} />}
+      {vehicle ? live ? <LiveLines card={card} now={now} zone={zone} /> : <StaleLines card={card} /> : <EmptyLines next={live ? next : null} live={live} now={now} zone={zone} />}
     </section>
   );
 }
 
-function EmptyLines({ live }: { live: boolean }) {
-  return <p className="wall-79 font-medium text-concrete-500">{live ? "Empty" : "was empty"}</p>;
+function EmptyLines({ live, next, now, zone }: { live: boolean; next: NextCard | null; now: number; zone: string }) {
+  return (
+    <>
+      <p className="wall-79 font-medium text-concrete-500">{live ? "Empty" : "was empty"}</p>
+      {next ? (
+        <p className="wall-line second wall-46 text-concrete-500">
+          <Sign name="bay" size="calc(46 * var(--u))" />
+          Next: {next.nickname}, {whenInWords(next.at, new Date(now), zone)}
+        </p>
+      ) : null}
+    </>
+  );
 }
 
 function StaleLines({ card }: { card: BayCard }) {
@@ -77,7 +95,7 @@ function LiveLines({ card, now, zone }: { card: BayCard; now: number; zone: stri
       <p className="wall-line third wall-46">
         {vehicle.crew.length === 0 && !ends ? <span className="text-concrete-500">Nobody on it</span> : null}
         {vehicle.crew.slice(0, 3).map((person) => (
-          <ToolCheck key={person.personId} initials={person.initials} state="on" size="calc(64 * var(--u))" letters={0.62} title={person.name} />
+          <ToolCheck key={person.personId} initials={person.initials} state="on" size="calc(56 * var(--u))" letters={0.66} title={person.name} />
         ))}
         <span className="wall-line ml-auto">
           {ends ? <span className={ends.late ? "font-semibold text-oxide" : ""}>{ends.words}</span> : null}
@@ -91,9 +109,11 @@ function LiveLines({ card, now, zone }: { card: BayCard; now: number; zone: stri
           ) : null}
         </span>
       </p>
-      <div className="wall-glyph">
-        <VehicleGlyph kind={vehicle.kind} />
-      </div>
+      {secondWords(vehicle, now).length + (hold ? 8 : 0) > ROOM_BESIDE_GLYPH ? null : (
+        <div className="wall-glyph">
+          <VehicleGlyph kind={vehicle.kind} />
+        </div>
+      )}
     </>
   );
 }

@@ -319,7 +319,7 @@ export async function readCrew(tx: Reader, shopId: number): Promise<CrewCard[]> 
 }
 
 /** The stints that start next. */
-export async function readNext(tx: Reader, shopId: number, now: Date, limit = 4): Promise<NextCard[]> {
+export async function readNext(tx: Reader, shopId: number, now: Date, limit = 8): Promise<NextCard[]> {
   const rows = await tx
     .select({ stint: stints, stage: stages.kind, nickname: vehicles.nickname, bayNumber: bays.number })
     .from(stints)

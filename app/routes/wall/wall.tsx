@@ -33,6 +33,8 @@ export async function loader({ context }: Route.LoaderArgs) {
 export const shouldRevalidate = () => false;
 
 const PAGE_MS = 12_000;
+/** As many as the last line holds. */
+const NEXT_SHOWN = 3;
 
 export default function Wall({ loaderData }: Route.ComponentProps) {
   const { timeZone, isDemo } = loaderData;
@@ -62,6 +64,7 @@ export default function Wall({ loaderData }: Route.ComponentProps) {
                 live={live}
                 now={now}
                 zone={timeZone}
+                next={board.next.find((next) => next.bayNumber === card.bay.number) ?? null}
               />
             )),
           )}
@@ -103,7 +106,7 @@ function LiveHead({ now, zone, status, isDemo, board }: HeadProps & { isDemo: bo
       )}
       <span className="wall-line wall-50 text-moss">
         <Sign name="live" size="calc(52 * var(--u))" />
-        {status.state === "joining" ? "Joining" : "Live"}
+        <span>{status.state === "joining" ? "Joining" : "Live"}</span>
         {heard === null ? null : <small className="wall-46 text-concrete-500">{heard} s ago</small>}
       </span>
     </header>
@@ -129,7 +132,7 @@ function NextMoves({ next, now, zone }: { next: NextCard[]; now: number; zone: s
   return (
     <>
       <span className="text-line">Next</span>
-      {next.map((card) => (
+      {next.slice(0, NEXT_SHOWN).map((card) => (
         <span key={card.stintId}>
           <b className="font-semibold">{whenInWords(card.at, new Date(now), zone)}</b> {card.nickname} {STAGE_LABEL[card.stage].toLowerCase()}, Bay{" "}
           {card.bayNumber}

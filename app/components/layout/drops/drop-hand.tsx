@@ -24,6 +24,7 @@ export type HandProps = {
   setField: (name: string | null) => void;
   onRead: (read: EntryRead) => void;
   onKept: () => void;
+  onSending: (on: boolean) => void;
 };
 
 /** The texts that an entry begins with: tapes that do not meet stand there, so that one can be taped again. */
@@ -51,6 +52,7 @@ export function DropEntry({
   setField,
   onRead,
   onKept,
+  onSending,
 }: HandProps) {
   const point = dropPoint(drop.point);
   const withHeight = point?.withHeight ?? false;
@@ -72,7 +74,9 @@ export function DropEntry({
     onRead(readEntry(view, drop.side, method, { ...draft, ...changes }, withHeight));
   };
   const finish = async (readings: Draft[], suspect: boolean) => {
+    onSending(true);
     const kept = await keep(readings);
+    onSending(false);
     if (kept === null || kept === "refused") return;
     reset(suspect ? draft : { reason: "" });
     if (!suspect) onKept();
@@ -115,17 +119,17 @@ export function DropEntry({
     <>
       <div className="drop-hand-head">
         <h2>{spotLabel(drop)}</h2>
+        {drop.side === "centre" || read.fit?.suspect ? null : (
+          <MethodChoice method={method} pick={(to) => edit({ method: to })} />
+        )}
         {read.fit?.suspect ? (
           <p className="font-label text-lg font-semibold text-oxide">
             the {COUNT[read.ties.length] ?? ""} tapes do not meet
           </p>
         ) : (
-          <p className="text-[15px] text-concrete-700">{point?.where}</p>
+          <p className="w-full text-[15px] text-concrete-700">{point?.where}</p>
         )}
       </div>
-      {drop.side === "centre" || read.fit?.suspect ? null : (
-        <MethodChoice method={method} pick={(to) => edit({ method: to })} />
-      )}
       <EntryFields
         view={view}
         spot={drop}
@@ -207,7 +211,7 @@ function MethodChoice({ method, pick }: { method: Method; pick: (method: Method)
     <div className="level-ways" role="group" aria-label="Measured by">
       {(["ties", "offset"] as const).map((id) => (
         <button key={id} type="button" aria-pressed={method === id} onClick={() => pick(id)}>
-          {id === "ties" ? "Tape ties" : "Along and off the line"}
+          {id === "ties" ? "Tape ties" : "Along and off"}
         </button>
       ))}
     </div>

@@ -90,7 +90,9 @@ type HandProps = {
 };
 
 function Hand({ view, drop, outbox, next, again, setAgain, pick, ...rest }: HandProps) {
-  const mine = unsentOf(outbox.list, subjectOf(drop));
+  // While it is being sent from here the entry stays: a refusal is said beside its fields.
+  const [sending, setSending] = useState(false);
+  const mine = sending ? null : unsentOf(outbox.list, subjectOf(drop));
   const { reading } = drop;
   if (mine && !again)
     return (
@@ -137,6 +139,7 @@ function Hand({ view, drop, outbox, next, again, setAgain, pick, ...rest }: Hand
         usual={usualMethod(view)}
         next={next}
         onKept={() => pick(next)}
+        onSending={setSending}
         {...rest}
       />
     </>

@@ -66,7 +66,7 @@ export function VoidLevel({
               key={words}
               size="l"
               aria-pressed={reason === words}
-              className={reason === words ? "border-brass-ink bg-brass-wash" : ""}
+              className={reason === words ? "border-brass-ink! bg-brass-wash!" : ""}
               onClick={() => setReason(words)}
             >
               {words}
