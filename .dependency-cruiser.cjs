@@ -35,7 +35,7 @@ module.exports = {
     {
       name: "only-db-and-services-touch-drizzle",
       severity: "error",
-      from: { path: "^app/(?!db|services)", pathNot: "\\.test\\.ts$" },
+      from: { path: "^app/(?!db|services|auth/)", pathNot: "\\.test\\.ts$" },
       to: { path: "node_modules/(drizzle-orm|mysql2)/" },
     },
     {

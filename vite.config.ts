@@ -17,8 +17,6 @@ export default defineConfig(
       resolve: { tsconfigPaths: true },
       optimizeDeps: {
         include: [
-          "@conform-to/react",
-          "@conform-to/zod/v4",
           "@date-fns/tz",
           "@dnd-kit/core",
           "barcode-detector/ponyfill",

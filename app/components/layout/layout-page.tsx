@@ -17,6 +17,9 @@ import { StandsStep } from "./stands/stands-step";
 import { StepsRail } from "./steps-rail";
 import { useUnsent } from "./use-unsent";
 import "./layout.css";
+import "./reading.css";
+import "./level/level.css";
+import "./drops/drops.css";
 
 type Props = {
   view: LayoutView;

@@ -68,7 +68,7 @@ const CELL = "py-2 pr-4 align-middle max-lg:py-0 max-lg:pr-0";
 const NUMBER = `${CELL} whitespace-nowrap text-right`;
 /** Below a table's width a spring is a drawing with its figures in a line under it. */
 const LINE =
-  "border-concrete-200 border-b max-lg:relative max-lg:flex max-lg:flex-wrap max-lg:items-center max-lg:gap-x-5 max-lg:py-3 max-lg:pl-14";
+  "border-concrete-200 border-b max-lg:relative max-lg:flex max-lg:flex-wrap max-lg:items-center max-lg:gap-x-5 max-lg:py-3 max-lg:pl-14 sm:max-lg:pr-28";
 
 function SpringLine({
   spring,
@@ -112,7 +112,9 @@ function SpringLine({
       </td>
       <td className={`${CELL} text-concrete-700`}>{spring.note}</td>
       {mayEdit ? (
-        <td className={`${CELL} text-right max-lg:ml-auto lg:pr-0`}>
+        <td
+          className={`${CELL} text-right max-lg:ml-auto sm:max-lg:absolute sm:max-lg:top-3 sm:max-lg:right-0 lg:pr-0`}
+        >
           <TakeOut spring={spring} />
         </td>
       ) : null}

@@ -26,12 +26,13 @@ export async function remembered<T>(request: Request, name: string, path: string
   const cookie = cookieOf(name, path);
   const { searchParams } = new URL(request.url);
   searchParams.delete("_routes");
-  searchParams.delete("new");
   if (searchParams.size === 0) {
     const kept: unknown = await cookie.parse(request.headers.get("cookie"));
     if (typeof kept === "string" && kept !== "") throw redirect(`${path}?${kept}`);
     return data(await show());
   }
+  // What was searched for is over with the search; how the list stands is not.
+  searchParams.delete("q");
   return data(await show(), {
     headers: { "Set-Cookie": await cookie.serialize(searchParams.toString().slice(0, 400)) },
   });

@@ -1,5 +1,5 @@
 import { DROP_POINTS, type DropPoint, type DropPointId, type DropSide } from "../../../domain/layout/drops";
-import type { DropView } from "../../../domain/layout/view";
+import type { DropView, LayoutView } from "../../../domain/layout/view";
 import type { LengthUnit } from "../../../domain/units/length";
 import type { SignName } from "../../../ui/sign";
 import { offLine, onTape } from "../lengths";
@@ -26,8 +26,11 @@ export type Cell = {
   detail: string;
 };
 
-/** What a cell of the list says of its drop. What is kept on this tablet counts before what the shop has. */
-export function cellOf(drop: DropView, unsent: readonly Unsent[], unit: LengthUnit): Cell {
+/**
+ * What a cell of the list says of its drop. What is kept on this tablet counts before what the shop has.
+ * @param gone the level stands, and old drops are not carried over to it any more
+ */
+export function cellOf(drop: DropView, unsent: readonly Unsent[], unit: LengthUnit, gone = false): Cell {
   const mine = unsentOf(unsent, subjectOf(drop));
   if (mine?.refused) return { state: "not-taken", sign: "off", words: "not taken", detail: mine.refused };
   if (mine) return { state: "kept-here", sign: "unsent", words: "kept here", detail: "not sent" };
@@ -36,7 +39,13 @@ export function cellOf(drop: DropView, unsent: readonly Unsent[], unit: LengthUn
     return { state: "to-drop", sign: "todo", words: "to drop", detail: drop.needed ? "" : "if wanted" };
   const words = onTape(reading.at.x, unit);
   const detail = offLine(reading.at.y, unit);
-  if (!reading.stands) return { state: "waiting", sign: "void", words, detail: "waits for the level" };
+  if (!reading.stands)
+    return {
+      state: "waiting",
+      sign: "void",
+      words,
+      detail: gone ? "void: drop it again" : "waits for the level",
+    };
   if (reading.suspect) return { state: "not-meeting", sign: "off", words, detail: "tapes do not meet" };
   return { state: "kept", sign: "drop", words, detail: reading.checked ? detail : `${detail}, unchecked` };
 }
@@ -75,3 +84,7 @@ export function nextSpot(
     order.find((drop) => !isSettled(drop, unsent));
   return found ? { point: found.point, side: found.side } : null;
 }
+
+/** Old drops are void for good: the level stands without them, and no re-drop can bring them back. */
+export const oldDropsGone = ({ level, standsInBay }: Pick<LayoutView, "level" | "standsInBay">): boolean =>
+  standsInBay && level?.state === "true" && level.redrop.state !== "wanted";

@@ -31,7 +31,7 @@ export type HandProps = {
 function firstTexts(drop: DropView, redrop: boolean): Draft {
   const { reading } = drop;
   if (!reading) return { reason: "" };
-  if (redrop && !reading.stands) return { reason: "First point under the new level" };
+  if (!reading.stands) return { reason: redrop ? "First point under the new level" : "Under the new level" };
   if (!reading.suspect) return { reason: "Measured again" };
   return {
     reason: "Taped again",

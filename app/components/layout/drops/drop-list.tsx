@@ -2,7 +2,7 @@ import { Fragment, type KeyboardEvent } from "react";
 import type { DropView, LayoutView } from "../../../domain/layout/view";
 import { Sign } from "../../../ui/sign";
 import type { Unsent } from "../unsent";
-import { cellOf, rowsOf, type Spot, sameSpot, spotLabel } from "./cells";
+import { cellOf, oldDropsGone, rowsOf, type Spot, sameSpot, spotLabel } from "./cells";
 
 type Props = {
   view: LayoutView;
@@ -51,6 +51,7 @@ export function DropList({ view, unsent, inHand, onPick }: Props) {
                   drop={drop}
                   unsent={unsent}
                   unit={view.unit}
+                  gone={oldDropsGone(view)}
                   isInHand={sameSpot(drop, inHand)}
                   onPick={onPick}
                 />
@@ -70,12 +71,13 @@ type CellProps = {
   drop: DropView;
   unsent: readonly Unsent[];
   unit: LayoutView["unit"];
+  gone: boolean;
   isInHand: boolean;
   onPick: (spot: Spot) => void;
 };
 
-function DropCell({ drop, unsent, unit, isInHand, onPick }: CellProps) {
-  const cell = cellOf(drop, unsent, unit);
+function DropCell({ drop, unsent, unit, gone, isInHand, onPick }: CellProps) {
+  const cell = cellOf(drop, unsent, unit, gone);
   const fresh = isInHand && cell.state === "to-drop";
   return (
     <button
