@@ -3,6 +3,7 @@ import { ACCESS, type Need } from "../auth/access";
 import type { Actor } from "../auth/actor";
 import { may, type Permission } from "../auth/permissions";
 import { actorContext, appContext } from "../context";
+import { env } from "../env.server";
 import type { Context } from "../services/change.server";
 import { Refusal } from "../services/errors";
 
@@ -123,3 +124,6 @@ export function idParam(value: string | undefined): number {
   if (!Number.isSafeInteger(id) || id <= 0) throw data({ message: "There is no such page." }, { status: 404 });
   return id;
 }
+
+/** The address that tags and sheets carry: the one set for the shop, or the one this request came to. */
+export const publicOrigin = (request: Request): string => env().PUBLIC_ORIGIN || new URL(request.url).origin;

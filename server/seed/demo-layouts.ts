@@ -6,7 +6,7 @@ import { frameFromDatums, toFloor } from "../../app/domain/layout/frame";
 import { framePoint } from "../../app/domain/geometry/point";
 import { optionKey } from "../../app/domain/layout/options";
 import type { Role } from "../../app/domain/people/roles";
-import { inches, parseLength, toInches } from "../../app/domain/units/length";
+import { formatInches, inches, type Millimetres, mm, parseLength } from "../../app/domain/units/length";
 import type { Context } from "../../app/services/change.server";
 import { acknowledgeStands } from "../../app/services/layouts/acknowledge-stands.server";
 import { approveOption } from "../../app/services/layouts/approve-option.server";
@@ -51,7 +51,7 @@ function demoFrame() {
 /** A point at a station of the frame, as somebody would read it off the floor: to a sixteenth. */
 function onFrame(point: DropPointId, side: DropSide, station: number, offset: number, height?: string): Drop {
   const p = toFloor(demoFrame(), framePoint(inches(station), inches(offset)));
-  const sixteenths = (value: number) => String(Math.round(Math.abs(toInches(value as ReturnType<typeof inches>)) * 16) / 16);
+  const sixteenths = (value: Millimetres) => formatInches(mm(Math.abs(value)));
   return { point, side, station: sixteenths(p.x), offset: side === "centre" ? "0" : sixteenths(p.y), height };
 }
 

@@ -21,7 +21,7 @@ export function ShutStep({ view, step, why }: { view: LayoutView; step: StepId; 
             ? "Nothing that was read is lost: it waits until its ground is true again."
             : undefined
         }
-        live
+        live={!isVoid}
       />
       {back ? (
         <div className="p-4">

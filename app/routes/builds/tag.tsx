@@ -23,7 +23,7 @@ export async function loader({ request, params, context }: Route.LoaderArgs) {
   const tag = await readBuildTag(context.get(appContext).db, actor.shopId, buildId);
   if (!tag) throw data({ message: "There is no such build in this shop." }, { status: 404 });
   const url = new URL(request.url);
-  const address = `${env().PUBLIC_ORIGIN || url.origin}/t/${tag.code}`;
+  const address = `${publicOrigin(request)}/t/${tag.code}`;
   return {
     shell: await readShell(context, actor),
     buildId,

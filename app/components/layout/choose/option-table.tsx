@@ -61,7 +61,7 @@ export function OptionTable({ view, options, inHand, looked, pinned, sort, onSor
               <SortButton label="Hole" by="spring" sort={sort} onSort={onSort} />
             </th>
             <th scope="col" className={`${HEAD} hidden text-left md:table-cell`}>
-              stock <span className="text-concrete-500">·</span> <span className="text-line">centre</span>
+              <span className="text-line">centre</span> <span className="text-concrete-500">ahead →</span>
             </th>
             <th scope="col" className={HEAD}>
               Axle line

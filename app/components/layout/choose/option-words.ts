@@ -25,13 +25,19 @@ export const shortName = (option: Option): string => {
   return `${formatInches(option.spring.length)} in ${spring}${option.turned ? " (turned)" : ""}, hole ${option.hole.number}`;
 };
 
+/** Room by the whole tyre's reach in plan: at the lip, which is higher, there is more. */
+const roomSentence = (atLock: Millimetres): string =>
+  atLock >= 0
+    ? `${formatDecimalInches(atLock)} in left in front at lock`
+    : `${formatDecimalInches(mm(-atLock))} in short in front at lock by the whole tyre: measure the lip`;
+
 /** What the option in hand changes, in one line. */
 export function inHandDetail(option: Option): string {
   const parts = [
     `${formatDecimalInches(mm(Math.abs(option.shift)))} ${option.shift >= 0 ? "ahead of" : "behind"} the centre`,
     option.approach === null ? null : `approach ${formatDegrees(option.approach)}`,
     option.wheelbase === null ? null : `wheelbase ${formatDecimalInches(option.wheelbase)}`,
-    option.frontRoom === null ? null : `${formatDecimalInches(option.frontRoom.atLock)} in left in front at lock`,
+    option.frontRoom === null ? null : roomSentence(option.frontRoom.atLock),
   ];
   return `${parts.filter((part) => part !== null).join("; ")}.`;
 }

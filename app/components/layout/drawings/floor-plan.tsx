@@ -48,7 +48,7 @@ export function FloorPlan({ view, inHand, onPick, previewReading, optionKey = nu
       >
         <PlanDrawing {...drawing} />
       </div>
-      <div className="no-print absolute right-2 bottom-2 flex gap-1">
+      <div className="no-print absolute top-2 right-2 flex gap-1">
         {(
           [
             ["−", "Zoom out", zoomOut],

@@ -228,7 +228,7 @@ function ReadWords({ view, read }: { view: LayoutView; read: EntryRead }) {
     residual === null || read.fit?.suspect ? null : `The tapes meet within ${smallLength(residual, unit)}.`;
   return (
     <div role="status" className="grid gap-1">
-      {read.at ? (
+      {read.at && !read.fit?.suspect ? (
         <p className="text-[17px]">
           Falls <b className="font-semibold">{withUnit(read.at.x, unit)}</b> ahead of A,{" "}
           <b className="font-semibold">{offLine(read.at.y, unit)}</b>. {meets}
