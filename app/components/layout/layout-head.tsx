@@ -18,7 +18,7 @@ type Props = { view: LayoutView; person: string; now: number; live: LiveStatus; 
 export function LayoutHead({ view, person, now, live, outbox }: Props) {
   const { vehicle, bay, fixedEye } = view;
   return (
-    <header className="layout-head">
+    <section className="layout-head" aria-label="This layout">
       <div className="layout-bay">
         <span className="sr-only">Bay</span>
         <Stencil n={bay.number} size={40} cut={STROKES.test(String(bay.number)) ? "h" : "v"} />
@@ -38,7 +38,7 @@ export function LayoutHead({ view, person, now, live, outbox }: Props) {
         <LevelFact view={view} now={now} />
         <SentFact view={view} live={live} outbox={outbox} />
       </div>
-    </header>
+    </section>
   );
 }
 

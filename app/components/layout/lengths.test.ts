@@ -1,6 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { inches, mm } from "../../domain/units/length";
-import { lengthIn, offLine, onTape, smallLength, understood, withUnit } from "./lengths";
+import { lengthIn, offLine, onTape, smallLength, understood, withinLength, withUnit } from "./lengths";
 
 describe("lengths in words", () => {
   it("stand as on the tape, in the shop's unit", () => {
@@ -14,6 +14,11 @@ describe("lengths in words", () => {
     expect(offLine(inches(-14), "in")).toBe("14 right");
     expect(offLine(mm(0.2), "in")).toBe("on the line");
     expect(offLine(mm(0.2), "mm")).toBe("on the line");
+  });
+
+  it("meet within a thirty-second at best", () => {
+    expect(withinLength(mm(0.1), "in")).toBe("1/32 in");
+    expect(withinLength(mm(0.8), "mm")).toBe("0.8 mm");
   });
 
   it("are finer where two are compared", () => {

@@ -25,6 +25,10 @@ export function smallLength(length: Millimetres, unit: LengthUnit): string {
   return words === "0" ? "under 1/32 in" : `${words} in`;
 }
 
+/** How closely something meets, for after "within": never finer than 1/32 in or 0.1 mm. */
+export const withinLength = (length: Millimetres, unit: LengthUnit): string =>
+  smallLength(length, unit).replace(/^under /, "");
+
 /** A place across the vehicle: "30 1/4 left", "on the line". */
 export function offLine(y: Millimetres, unit: LengthUnit): string {
   const words = onTape(mm(Math.abs(y)), unit);

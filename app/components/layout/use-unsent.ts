@@ -1,4 +1,4 @@
-import { useCallback, useEffect, useRef, useSyncExternalStore } from "react";
+import { useCallback, useEffect, useMemo, useRef, useSyncExternalStore } from "react";
 import { type Posted, post } from "./post";
 import {
   dropUnsent,
@@ -61,16 +61,8 @@ export type Outbox = {
  * @param confirmed called after the shop took something
  */
 export function useUnsent(layoutId: number, person: string, linked: boolean, confirmed: () => void): Outbox {
-  const store = useRef<ReturnType<typeof storeOf> | null>(null);
-  const stored = useCallback(() => {
-    store.current ??= storeOf(layoutId);
-    return store.current;
-  }, [layoutId]);
-  const list = useSyncExternalStore(
-    subscribe,
-    () => stored().read(),
-    () => NONE,
-  );
+  const store = useMemo(() => storeOf(layoutId), [layoutId]);
+  const list = useSyncExternalStore(subscribe, store.read, () => NONE);
   const told = useRef(confirmed);
   told.current = confirmed;
   const onTheWay = useRef(new Set<string>());
@@ -81,7 +73,7 @@ export function useUnsent(layoutId: number, person: string, linked: boolean, con
       const posted = await post(reading.to, { ...reading.fields, clientKey: reading.clientKey });
       onTheWay.current.delete(reading.clientKey);
       if (posted.state === "answered") {
-        const { read, write } = stored();
+        const { read, write } = store;
         write(
           posted.answer.ok
             ? dropUnsent(read(), reading.clientKey)
@@ -91,7 +83,7 @@ export function useUnsent(layoutId: number, person: string, linked: boolean, con
       }
       return posted;
     },
-    [stored],
+    [store],
   );
 
   const retrying = useRef(false);
@@ -99,14 +91,14 @@ export function useUnsent(layoutId: number, person: string, linked: boolean, con
     if (retrying.current) return;
     retrying.current = true;
     try {
-      for (const reading of sendable(stored().read(), person)) {
+      for (const reading of sendable(store.read(), person)) {
         if (onTheWay.current.has(reading.clientKey)) continue;
         if ((await send(reading)).state !== "answered") break;
       }
     } finally {
       retrying.current = false;
     }
-  }, [person, send, stored]);
+  }, [person, send, store]);
 
   useEffect(() => {
     if (linked) void retry();
@@ -121,19 +113,19 @@ export function useUnsent(layoutId: number, person: string, linked: boolean, con
 
   const keep = useCallback<Outbox["keep"]>(
     async (reading) => {
-      const { read, write } = stored();
+      const { read, write } = store;
       const whole = { ...reading, by: person, keptAt: new Date().toISOString(), refused: null };
       write(keepUnsent(read(), whole));
       return send(whole);
     },
-    [person, send, stored],
+    [person, send, store],
   );
   const letGo = useCallback(
     (clientKey: string) => {
-      const { read, write } = stored();
+      const { read, write } = store;
       write(dropUnsent(read(), clientKey));
     },
-    [stored],
+    [store],
   );
   return { list, keep, retry: () => void retry(), letGo };
 }

@@ -67,6 +67,7 @@ export default function StepPage({ loaderData }: Route.ComponentProps) {
   return (
     <Shell shell={shell} live={live}>
       <LayoutPage
+        key={view.id}
         view={view}
         step={step}
         may={loaderData.may}

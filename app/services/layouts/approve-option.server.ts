@@ -3,6 +3,7 @@ import { schema } from "../../db/client.server";
 import { formatDecimalInches, mm } from "../../domain/units/length";
 import { change, type Context } from "../change.server";
 import { Refusal } from "../errors";
+import { advanceStages } from "./advance-stages.server";
 import { layoutTouches, measurer, openStep } from "./step-guard.server";
 
 const { approvals, layouts } = schema;
@@ -24,6 +25,7 @@ export async function approveOption(ctx: Context, layoutId: number, expectedKey:
     const sheetRevision = head.layout.sheetRevision + 1;
     await tx.update(layouts).set({ sheetRevision }).where(eq(layouts.id, layoutId));
     await tx.insert(approvals).values({ shopId: actor.shopId, choiceId: choice.choice.id, sheetRevision, approvedBy: actor.personId, approvedAt: ctx.now() });
+    await advanceStages(tx, head.build.id, ctx.now(), { done: ["level", "layout", "approval"], begun: null });
     const station = formatDecimalInches(mm(choice.choice.axleStationMm));
     note({
       verb: "approve-option",

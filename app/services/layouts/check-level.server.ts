@@ -7,6 +7,7 @@ import { type Degrees, degrees } from "../../domain/units/angle";
 import { change, type Context } from "../change.server";
 import { Refusal } from "../errors";
 import { voidApprovals } from "../void-level.server";
+import { advanceStages } from "./advance-stages.server";
 import { layoutTouches, measurer, openStep } from "./step-guard.server";
 
 const { layouts, levelChecks, levelReadings } = schema;
@@ -62,6 +63,7 @@ export async function checkLevel(ctx: Context, layoutId: number, entry: LevelEnt
     if (!made) throw new Error("The level was not inserted");
     await tx.insert(levelReadings).values(readingRows(entry).map((row) => ({ ...row, shopId: actor.shopId, levelCheckId: made.id })));
     if (!carries) await voidApprovals(tx, ctx, layoutId, isTrue ? "Levelled anew" : "Not level any more");
+    if (isTrue) await advanceStages(tx, head.build.id, ctx.now(), { done: ["level"], begun: "layout" });
     note({
       verb: "check-level",
       subject: { kind: "layout", id: layoutId },

@@ -3,6 +3,7 @@ import { isDuplicate, schema, type Tx } from "../../db/client.server";
 import { readMarks } from "../../db/queries/layouts.server";
 import { distance, type FloorPoint, floorPoint } from "../../domain/geometry/point";
 import { type DropPointId, type DropSide, dropPoint, pointFromOffset, pointFromTies, type Suggestion } from "../../domain/layout/drops";
+import { carrierOf } from "../../domain/layout/level-chain";
 import type { TypedLength } from "../../domain/layout/view";
 import { type LengthUnit, mm } from "../../domain/units/length";
 import { change, type Context } from "../change.server";
@@ -47,7 +48,7 @@ export async function keepDrop(ctx: Context, layoutId: number, entry: DropEntry)
   try {
     return await change(ctx, async (tx, note) => {
       const loaded = await openStep(tx, ctx, layoutId, "drops");
-      const { head, ground, rows, shop } = loaded;
+      const { head, rounds, ground, rows, shop } = loaded;
       const level = ground.newest;
       if (!level) throw new Refusal("conflict", "Level first: everything after depends on it.");
       const place = await placeOf(tx, loaded, entry, shop.unit);
@@ -60,7 +61,7 @@ export async function keepDrop(ctx: Context, layoutId: number, entry: DropEntry)
       if (redrop)
         await tx
           .update(levelChecks)
-          .set({ carriesId: redrop.stands ? (ground.carryable?.id ?? null) : null, carryOffMm: redrop.off })
+          .set({ carriesId: redrop.stands && old ? (carrierOf(rounds, level, old.reading.levelCheckId)?.id ?? null) : null, carryOffMm: redrop.off })
           .where(eq(levelChecks.id, level.id));
 
       const dropId = old?.drop.id ?? (await dropIdFor(tx, actor.shopId, layoutId, entry));

@@ -50,7 +50,8 @@ export async function loadLayout(tx: Reader, shopId: number, layoutId: number) {
   if (!head) throw new Refusal("not-found", "There is no such layout.");
   const shop = await readShop(tx, shopId);
   const checks = await readLevelChecks(tx, layoutId);
-  const ground = levelGround(checks.map(asRound));
+  const rounds = checks.map(asRound);
+  const ground = levelGround(rounds);
   const rows = await readDrops(tx, layoutId);
   const holes = await readHoles(tx, head.layout.hangerId);
   const rack: LeafSpring[] = (await readRack(tx, shopId)).map((spring) => ({
@@ -92,6 +93,6 @@ export async function loadLayout(tx: Reader, shopId: number, layoutId: number) {
     optionChosen: choice !== null && !changed,
     approval: approvalRow ? (approvalRow.approval.voidedAt ? "void" : "approved") : "none",
   };
-  return { head, shop, checks, ground, rows, geometry, holes, rack, choice, option, changed, approvalRow, facts };
+  return { head, shop, checks, rounds, ground, rows, geometry, holes, rack, choice, option, changed, approvalRow, facts };
 }
 export type LoadedLayout = Awaited<ReturnType<typeof loadLayout>>;

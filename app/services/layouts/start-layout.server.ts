@@ -3,6 +3,7 @@ import { schema } from "../../db/client.server";
 import { readBayOfBuild, readLayoutOfBuild, readMarks } from "../../db/queries/layouts.server";
 import { change, type Context } from "../change.server";
 import { Refusal } from "../errors";
+import { advanceStages } from "./advance-stages.server";
 import { layoutTouches, measurer } from "./step-guard.server";
 
 const { builds, hangers, layouts } = schema;
@@ -45,6 +46,7 @@ export async function startLayout(ctx: Context, what: { buildId: number; fixedEy
       })
       .$returningId();
     if (!made) throw new Error("The layout was not inserted");
+    await advanceStages(tx, what.buildId, ctx.now(), { done: [], begun: "level" });
     note({
       verb: "start-layout",
       subject: { kind: "layout", id: made.id },

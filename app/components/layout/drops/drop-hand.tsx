@@ -4,7 +4,7 @@ import type { DropView, LayoutView } from "../../../domain/layout/view";
 import { mm } from "../../../domain/units/length";
 import { Button } from "../../../ui/button";
 import { EntryDock } from "../entry-dock";
-import { offLine, smallLength, withUnit } from "../lengths";
+import { offLine, withinLength, withUnit } from "../lengths";
 import { type Draft, useDraft } from "../use-draft";
 import type { Outbox } from "../use-unsent";
 import { type Spot, spotLabel, subjectOf } from "./cells";
@@ -225,7 +225,7 @@ function ReadWords({ view, read }: { view: LayoutView; read: EntryRead }) {
     ? mm(Math.max(...read.fit.residuals.map((one) => Math.abs(one.residual))))
     : null;
   const meets =
-    residual === null || read.fit?.suspect ? null : `The tapes meet within ${smallLength(residual, unit)}.`;
+    residual === null || read.fit?.suspect ? null : `The tapes meet within ${withinLength(residual, unit)}.`;
   return (
     <div role="status" className="grid gap-1">
       {read.at && !read.fit?.suspect ? (

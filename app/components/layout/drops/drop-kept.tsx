@@ -2,7 +2,7 @@ import type { DropView, LayoutView } from "../../../domain/layout/view";
 import { Button } from "../../../ui/button";
 import { Verdict } from "../../../ui/verdict";
 import { dayAndClock } from "../../time";
-import { offLine, smallLength, withUnit } from "../lengths";
+import { offLine, withinLength, withUnit } from "../lengths";
 import { spotLabel } from "./cells";
 
 /** A drop that stands: its reading, who read it, and what it took the place of. */
@@ -33,7 +33,7 @@ export function DropKept({
         tone="true"
         sign="drop"
         title={`${spotLabel(drop)}: ${withUnit(reading.at.x, unit)} ahead of A, ${offLine(reading.at.y, unit)}.`}
-        detail={`${reading.made.name}, ${dayAndClock(reading.made.at, shop.timeZone)}.${off === null ? "" : ` Tapes meet within ${smallLength(off as typeof reading.at.x, unit)}.`}`}
+        detail={`${reading.made.name}, ${dayAndClock(reading.made.at, shop.timeZone)}.${off === null ? "" : ` Tapes meet within ${withinLength(off as typeof reading.at.x, unit)}.`}`}
       />
       <dl className="grid grid-cols-[auto_1fr] gap-x-4 gap-y-1 text-[16px]">
         <dt className="text-concrete-500">As read</dt>

@@ -43,7 +43,7 @@ export function DropList({ view, unsent, inHand, onPick }: Props) {
       {rowsOf(view.drops).map(({ point, drops }) => (
         <Fragment key={point.id}>
           <div className="drop-row">
-            <h3>{point.label}</h3>
+            <h2>{point.label}</h2>
             <div className="grid flex-1 grid-cols-2">
               {drops.map((drop) => (
                 <DropCell

@@ -127,9 +127,15 @@ function LevelCheck({ view, may, done }: Props) {
         ) : null}
         {isTrue ? <NextAfter view={view} /> : null}
         {may.measure && level && level.state !== "void" ? (
-          <Button tone={level.state === "not-true" && !dirty ? "go" : "plain"} size="l" onClick={readAgain}>
-            Read again
-          </Button>
+          dirty ? (
+            <Button size="l" onClick={() => reset(first)}>
+              Back to the last reading
+            </Button>
+          ) : (
+            <Button tone={level.state === "not-true" ? "go" : "plain"} size="l" onClick={readAgain}>
+              Read again
+            </Button>
+          )
         ) : null}
         {may.measure && level?.state === "true" ? (
           <VoidLevel

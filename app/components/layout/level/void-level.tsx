@@ -69,7 +69,7 @@ export function VoidLevel({
               className={reason === words ? "border-brass-ink! bg-brass-wash!" : ""}
               onClick={() => setReason(words)}
             >
-              {words}
+              {words.charAt(0).toUpperCase() + words.slice(1)}
             </Button>
           ))}
         </div>

@@ -20,7 +20,7 @@ export function MarksPlan({ marks, spread }: { marks: readonly Mark[]; spread: s
   return (
     <svg
       viewBox={`0 0 640 ${height}`}
-      className="block w-full"
+      className="mx-auto block max-h-[44dvh] w-full"
       role="img"
       aria-label="The control marks of this bay, from above"
     >
@@ -51,7 +51,7 @@ export function MarksPlan({ marks, spread }: { marks: readonly Mark[]; spread: s
             <circle cx={x} cy={y} r={1.6} className="fill-ink" />
             <text
               x={x}
-              y={y - 22}
+              y={inHand ? y - 22 : y + 36}
               textAnchor="middle"
               fontSize={30}
               fontWeight={800}

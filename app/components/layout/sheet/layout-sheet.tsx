@@ -80,7 +80,7 @@ export function LayoutSheet({ view, option, qr, printedAt }: Props) {
           </p>
           {level ? (
             <p>
-              {levelWords(level)} Allowed {formatDegrees(level.allowedDeg)}. Read {when(level.made.at)} by {level.made.name}. {kept} drops by {crew.join(", ")}.
+              {levelWords(level)}. Allowed {formatDegrees(level.allowedDeg)}. Read {when(level.made.at)} by {level.made.name}. {kept} drops by {crew.join(", ")}.
             </p>
           ) : null}
         </div>
