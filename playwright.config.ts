@@ -26,7 +26,14 @@ export default defineConfig({
   forbidOnly: true,
   retries: 0,
   reporter: [["list"]],
-  use: { baseURL: `http://127.0.0.1:${port}`, launchOptions: CHROMIUM, actionTimeout: 15_000, trace: "off", video: "off", screenshot: "only-on-failure" },
+  use: {
+    baseURL: `http://127.0.0.1:${port}`,
+    launchOptions: CHROMIUM,
+    actionTimeout: 15_000,
+    trace: "off",
+    video: "off",
+    screenshot: "only-on-failure",
+  },
   webServer: {
     command: "node server/launch.js",
     url: `http://127.0.0.1:${port}/healthz`,

@@ -61,7 +61,10 @@ export default function App() {
 export function ErrorBoundary() {
   const error = useRouteError();
   if (isRouteErrorResponse(error)) {
-    const words = typeof error.data === "object" && error.data && "message" in error.data ? String(error.data.message) : null;
+    const words =
+      typeof error.data === "object" && error.data && "message" in error.data
+        ? String(error.data.message)
+        : null;
     return <FaultPage status={error.status} words={words} />;
   }
   return <FaultPage status={500} words={null} />;

@@ -26,9 +26,15 @@ export async function createApp({ io, migrationsDir, loadBuild }: Options) {
   const { db, pool } = openDatabase(settings.DATABASE_URL);
   if (!(await isUpToDate(pool, migrationsDir))) {
     await pool.end();
-    throw new Error("The database is behind this version of the shop. Start it with `npm start`, which brings it up to date.");
+    throw new Error(
+      "The database is behind this version of the shop. Start it with `npm start`, which brings it up to date.",
+    );
   }
-  const realtime = startRealtime(io, { db, now, onFault: (error, what) => log.error({ err: error, what }, "live channel") });
+  const realtime = startRealtime(io, {
+    db,
+    now,
+    onFault: (error, what) => log.error({ err: error, what }, "live channel"),
+  });
   const production = settings.NODE_ENV === "production";
 
   const app = express();
@@ -104,7 +110,11 @@ function securityHeaders(production: boolean, https: boolean): RequestHandler {
       directives: {
         "default-src": ["'self'"],
         // The tag reader is WebAssembly.
-        "script-src": ["'self'", "'wasm-unsafe-eval'", (_req, res) => `'nonce-${(res as express.Response).locals.nonce}'`],
+        "script-src": [
+          "'self'",
+          "'wasm-unsafe-eval'",
+          (_req, res) => `'nonce-${(res as express.Response).locals.nonce}'`,
+        ],
         // Dragging and drawings to scale set style attributes.
         "style-src": ["'self'", "'unsafe-inline'"],
         "img-src": ["'self'", "data:", "blob:"],

@@ -47,14 +47,18 @@ if (development) {
   shop = await createApp({ io, migrationsDir });
   outer.use(compression());
   const client = join(root, "build/client");
-  outer.use("/assets", express.static(join(client, "assets"), { immutable: true, maxAge: "1y", fallthrough: false }));
+  outer.use(
+    "/assets",
+    express.static(join(client, "assets"), { immutable: true, maxAge: "1y", fallthrough: false }),
+  );
   outer.use(express.static(client, { maxAge: "1h", index: false }));
 }
 allowSocket = shop.allowSocket;
 outer.use(shop.handler);
 
 http.on("error", (error) => {
-  if (error.code === "EADDRINUSE") console.error(`Port ${port} is taken. Choose another:  PORT=${port + 1} npm start`);
+  if (error.code === "EADDRINUSE")
+    console.error(`Port ${port} is taken. Choose another:  PORT=${port + 1} npm start`);
   else console.error(error.message);
   process.exit(1);
 });

@@ -9,7 +9,9 @@ if (!url) {
 }
 try {
   const count = await bringUpToDate(url, folder);
-  console.log(count === 0 ? "Tables: up to date" : `Tables: ${count} change${count === 1 ? "" : "s"} applied`);
+  console.log(
+    count === 0 ? "Tables: up to date" : `Tables: ${count} change${count === 1 ? "" : "s"} applied`,
+  );
 } catch (error) {
   if (error instanceof HalfAppliedMigration) {
     console.error(`${error.message}
@@ -19,6 +21,8 @@ or finish the change by hand and then run:  update migration_runs set ended_at =
     process.exit(3);
   }
   const cause = (error as { cause?: { sqlMessage?: string } }).cause?.sqlMessage;
-  console.error(`The database's tables could not be brought up to date: ${cause ?? (error as Error).message}`);
+  console.error(
+    `The database's tables could not be brought up to date: ${cause ?? (error as Error).message}`,
+  );
   process.exit(1);
 }

@@ -20,7 +20,10 @@ function originMatches(origin: string, host: string | undefined): boolean {
 export const sameOrigin: RequestHandler = (req, res, next) => {
   if (SAFE.has(req.method)) return next();
   const origin = req.get("origin");
-  const allowed = origin !== undefined ? originMatches(origin, req.get("host")) : req.get("sec-fetch-site") === "same-origin";
+  const allowed =
+    origin !== undefined
+      ? originMatches(origin, req.get("host"))
+      : req.get("sec-fetch-site") === "same-origin";
   if (allowed) return next();
   res.status(403).json({ message: "This request came from another site and was refused." });
 };

@@ -17,7 +17,9 @@ const file = process.env.DEMO_SIGN_INS_FILE ?? ".data/demo-sign-ins.json";
 const url = process.env.DATABASE_URL;
 
 if (process.argv.includes("--sign-ins")) {
-  const known: SignIns = existsSync(file) ? JSON.parse(readFileSync(file, "utf8")) : { shop: "", signIns: [] };
+  const known: SignIns = existsSync(file)
+    ? JSON.parse(readFileSync(file, "utf8"))
+    : { shop: "", signIns: [] };
   console.log(JSON.stringify(known));
 } else if (!url) {
   console.error("DATABASE_URL is missing.");

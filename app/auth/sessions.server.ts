@@ -66,7 +66,8 @@ export async function actorFromSecret(db: Db, secret: string | null, now: Date):
   if (now.getTime() - session.lastSeenAt.getTime() > TOUCH_EVERY)
     await db.update(sessions).set({ lastSeenAt: now }).where(eq(sessions.idHash, idHash));
   const base = { shopId: session.shopId, deviceId: session.deviceId, sessionHash: idHash };
-  if (person) return { ...base, role: person.role, personId: person.id, name: person.name, initials: person.initials };
+  if (person)
+    return { ...base, role: person.role, personId: person.id, name: person.name, initials: person.initials };
   if (device) return { ...base, role: "display", personId: null, name: device.name, initials: "" };
   return null;
 }

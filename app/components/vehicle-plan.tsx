@@ -11,12 +11,17 @@ function lookOf(ink: Ink, tone: VehicleTone): Look {
   const edge = tone === "hand" || tone === "ghost" ? "var(--brass-ink)" : "var(--ink)";
   const detail = tone === "hand" ? "var(--brass-ink)" : "var(--concrete-500)";
   const fill = tone === "hand" ? "var(--brass-wash)" : "var(--chalk)";
-  if (tone === "ghost") return { fill: "none", stroke: ink === "body" ? edge : "var(--concrete-300)", width: 1.4, dash: "5 4" };
+  if (tone === "ghost")
+    return { fill: "none", stroke: ink === "body" ? edge : "var(--concrete-300)", width: 1.4, dash: "5 4" };
   switch (ink) {
     case "body":
       return { fill, stroke: edge, width: tone === "hand" ? 2.2 : 1.4 };
     case "wheel":
-      return { fill: tone === "wall" ? "var(--concrete-500)" : "var(--concrete-700)", stroke: "none", width: 0 };
+      return {
+        fill: tone === "wall" ? "var(--concrete-500)" : "var(--concrete-700)",
+        stroke: "none",
+        width: 0,
+      };
     case "glass":
       return { fill: "var(--concrete-300)", stroke: detail, width: 1, opacity: 0.8 };
     case "detail":
@@ -84,7 +89,12 @@ export function VehicleGlyph({ kind }: { kind: VehicleKind }) {
   const { lengthIn, widthIn } = VEHICLE_KIND[kind];
   const [length, width] = [lengthIn / 12, widthIn / 12];
   return (
-    <svg viewBox={`-0.1 -0.3 ${length + 0.2} ${width + 0.6}`} className="block h-full w-auto" aria-hidden="true" focusable="false">
+    <svg
+      viewBox={`-0.1 -0.3 ${length + 0.2} ${width + 0.6}`}
+      className="block h-full w-auto"
+      aria-hidden="true"
+      focusable="false"
+    >
       {planOf(kind, length, width).map((stroke, i) => {
         const look = lookOf(stroke.ink, "wall");
         return (

@@ -18,7 +18,8 @@ export function listMigrations(folder: string): { tag: string; when: number }[] 
   for (const entry of file.entries) {
     if (entry.when <= last) throw new Error(`Migration ${entry.tag} is dated before the one ahead of it.`);
     last = entry.when;
-    if (!readdirSync(folder).includes(`${entry.tag}.sql`)) throw new Error(`drizzle/${entry.tag}.sql is missing.`);
+    if (!readdirSync(folder).includes(`${entry.tag}.sql`))
+      throw new Error(`drizzle/${entry.tag}.sql is missing.`);
   }
   return file.entries;
 }
@@ -61,7 +62,9 @@ export async function bringUpToDate(url: string, folder: string): Promise<number
     const before = await applied(pool);
     const todo = listMigrations(folder).slice(before);
     if (todo.length === 0) return 0;
-    await guard.query("insert into migration_runs (began_at, first_tag) values (utc_timestamp(3), ?)", [todo[0]?.tag]);
+    await guard.query("insert into migration_runs (began_at, first_tag) values (utc_timestamp(3), ?)", [
+      todo[0]?.tag,
+    ]);
     await migrate(db as unknown as Parameters<typeof migrate>[0], { migrationsFolder: folder });
     await guard.query("update migration_runs set ended_at = utc_timestamp(3) where ended_at is null");
     return todo.length;

@@ -5,7 +5,11 @@ import { Refusal } from "../services/errors";
  * Reads a form by a schema. Repeated names become lists only where the schema's caller asks for them.
  * @throws Refusal invalid, with one sentence beside each field that is wrong
  */
-export function readForm<S extends z.ZodType>(form: FormData, schema: S, lists: readonly string[] = []): z.output<S> {
+export function readForm<S extends z.ZodType>(
+  form: FormData,
+  schema: S,
+  lists: readonly string[] = [],
+): z.output<S> {
   const raw: Record<string, unknown> = {};
   for (const name of new Set(form.keys())) {
     raw[name] = lists.includes(name) ? form.getAll(name).map(String) : String(form.get(name));

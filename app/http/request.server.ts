@@ -1,4 +1,4 @@
-import { data, matchPath, redirect, type RouterContextProvider } from "react-router";
+import { data, matchPath, type RouterContextProvider, redirect } from "react-router";
 import { ACCESS, type Need } from "../auth/access";
 import type { Actor } from "../auth/actor";
 import { may, type Permission } from "../auth/permissions";
@@ -121,7 +121,8 @@ export async function orErrorPage<T>(work: () => Promise<T>): Promise<T> {
 /** A number from a route's path. @throws 404 */
 export function idParam(value: string | undefined): number {
   const id = Number(value);
-  if (!Number.isSafeInteger(id) || id <= 0) throw data({ message: "There is no such page." }, { status: 404 });
+  if (!Number.isSafeInteger(id) || id <= 0)
+    throw data({ message: "There is no such page." }, { status: 404 });
   return id;
 }
 

@@ -36,8 +36,14 @@ export function makePublisher(db: Db, now: () => Date, emit: Emit, onFault: OnFa
       const touched: TouchEvent[] = from === undefined ? [] : await readTouchesSince(tx, shopId, from);
       const all = from === undefined;
       const has = (kind: string) => all || touched.some((touch) => touch.kind === kind);
-      const bayIds = [...new Set(touched.flatMap((t) => (t.kind === "bay" && t.id !== undefined ? [t.id] : [])))];
-      const patch: BoardPatch = { from: from ?? 0, revision, bays: await readBayCards(tx, shopId, all ? "all" : bayIds) };
+      const bayIds = [
+        ...new Set(touched.flatMap((t) => (t.kind === "bay" && t.id !== undefined ? [t.id] : []))),
+      ];
+      const patch: BoardPatch = {
+        from: from ?? 0,
+        revision,
+        bays: await readBayCards(tx, shopId, all ? "all" : bayIds),
+      };
       if (has("yard")) patch.yard = await readYard(tx, shopId);
       if (has("crew")) patch.crew = await readCrew(tx, shopId);
       if (has("bay") || has("yard") || has("plan")) patch.next = await readNext(tx, shopId, now());

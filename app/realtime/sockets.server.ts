@@ -1,8 +1,8 @@
 import type { Server, Socket } from "socket.io";
-import { sessionSecret } from "../auth/cookie.server";
-import { actorFromSecret } from "../auth/sessions.server";
 import type { Actor } from "../auth/actor";
+import { sessionSecret } from "../auth/cookie.server";
 import { may } from "../auth/permissions";
+import { actorFromSecret } from "../auth/sessions.server";
 import type { Db } from "../db/client.server";
 import { BEAT_MS, CatchUp, type ClientEvents, type ServerEvents } from "./events";
 import { makePublisher, type Publisher } from "./publisher.server";
@@ -14,7 +14,11 @@ type LiveSocket = Socket<ClientEvents, ServerEvents, Record<string, never>, { ac
 /** A session is looked at again this often while its socket stays open. */
 const RECHECK_MS = 60_000;
 
-export type Realtime = { publish: Publisher["publish"]; dropSession: (hash: string) => void; close: () => Promise<void> };
+export type Realtime = {
+  publish: Publisher["publish"];
+  dropSession: (hash: string) => void;
+  close: () => Promise<void>;
+};
 
 /**
  * Opens the live channel on a socket server: the handshake carries the page's own session, rooms follow from what

@@ -51,7 +51,11 @@ export function useLiveBoard(served: Board, held = false): { board: Board; statu
  * Calls back when something that matters to this page was touched, at most once in a short while: a burst of changes
  * is one look, and nothing is looked at while held.
  */
-export function useLiveTouch(matters: (touch: TouchEvent) => boolean, look: () => void, held = false): LiveStatus {
+export function useLiveTouch(
+  matters: (touch: TouchEvent) => boolean,
+  look: () => void,
+  held = false,
+): LiveStatus {
   const status = useLiveStatus();
   const latest = useRef({ matters, look, held });
   latest.current = { matters, look, held };

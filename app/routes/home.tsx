@@ -1,6 +1,6 @@
 import { redirect } from "react-router";
-import type { ActorRole } from "~/domain/people/roles";
 import { actorContext } from "~/context";
+import type { ActorRole } from "~/domain/people/roles";
 import type { Route } from "./+types/home";
 
 /** The page each role works on. */

@@ -48,13 +48,15 @@ export default function Pair({ loaderData }: Route.ComponentProps) {
     <main className="wall grid min-h-dvh content-center justify-items-center gap-10 bg-concrete-100 p-8 text-center text-ink">
       <Bob />
       <h1 className="font-label text-5xl font-semibold">Pair this display</h1>
-      <p aria-label="Pairing code" className="flex gap-8 font-label text-7xl font-bold tracking-widest">
+      <p className="flex gap-8 font-label text-7xl font-bold tracking-widest">
+        <span className="sr-only">Pairing code: </span>
         {groups.map((group) => (
           <span key={group}>{group}</span>
         ))}
       </p>
       <p className="max-w-2xl text-2xl text-concrete-700">
-        A foreman opens <b>Setup, Displays</b> on their own screen and types this code. It is good for ten minutes.
+        A foreman opens <b>Setup, Displays</b> on their own screen and types this code. It is good for ten
+        minutes.
       </p>
     </main>
   );

@@ -3,7 +3,7 @@ import { isDuplicate, schema, type Tx } from "../db/client.server";
 import { readBayCards, readCrew, readStanding } from "../db/queries/board.server";
 import { OPEN_END, type Touch } from "../db/schema";
 import { checkAssign } from "../domain/floor/move-check";
-import { change, type Context, requirePerson } from "./change.server";
+import { type Context, change, requirePerson } from "./change.server";
 import { Refusal } from "./errors";
 import { releaseCrew } from "./floor-moves.server";
 
@@ -50,7 +50,10 @@ export async function assignPerson(ctx: Context, what: Assignment): Promise<{ wo
       const standing = await readStanding(tx, shopId, what.toBuildId);
       if (!standing) throw new Refusal("not-found", "That vehicle does not stand in this shop.");
       if (standing.bayId === null)
-        throw new Refusal("conflict", `${standing.vehicle.nickname} stands in the yard: put it in a bay first.`);
+        throw new Refusal(
+          "conflict",
+          `${standing.vehicle.nickname} stands in the yard: put it in a bay first.`,
+        );
       const [target] = await readBayCards(tx, shopId, [standing.bayId]);
       if (!target) throw new Refusal("not-found", "There is no such bay.");
       const check = checkAssign(person, target, ctx.now());
@@ -71,7 +74,8 @@ export async function assignPerson(ctx: Context, what: Assignment): Promise<{ wo
           untilAt: OPEN_END,
         });
       } catch (error) {
-        if (isDuplicate(error)) throw new Refusal("conflict", `${person.name} was put elsewhere a moment ago.`);
+        if (isDuplicate(error))
+          throw new Refusal("conflict", `${person.name} was put elsewhere a moment ago.`);
         throw error;
       }
     }
@@ -81,7 +85,11 @@ export async function assignPerson(ctx: Context, what: Assignment): Promise<{ wo
       words,
       before: { buildId: fromBuildId, place: person.on?.nickname ?? "free" },
       after: { buildId: what.toBuildId, place },
-      touches: [{ kind: "crew" }, ...(await bayTouch(tx, fromBuildId)), ...(await bayTouch(tx, what.toBuildId))],
+      touches: [
+        { kind: "crew" },
+        ...(await bayTouch(tx, fromBuildId)),
+        ...(await bayTouch(tx, what.toBuildId)),
+      ],
     });
     return { words };
   });

@@ -1,7 +1,7 @@
 import { eq } from "drizzle-orm";
 import { schema } from "../db/client.server";
 import { readShop } from "../db/queries/shop.server";
-import { change, type Context, requirePerson } from "./change.server";
+import { type Context, change, requirePerson } from "./change.server";
 
 const { shops, shopSettings } = schema;
 

@@ -29,7 +29,8 @@ export type JournalEntry = {
  */
 export function requirePerson(ctx: Context, permission: Permission): PersonActor {
   const { actor } = ctx;
-  if (!may(actor.role, permission)) throw new Refusal("forbidden", "This is not for your role. Ask the foreman.");
+  if (!may(actor.role, permission))
+    throw new Refusal("forbidden", "This is not for your role. Ask the foreman.");
   if (actor.personId === null) throw new Refusal("forbidden", "A person has to sign in for this.");
   return { ...actor, personId: actor.personId };
 }

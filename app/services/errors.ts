@@ -6,7 +6,13 @@
  *   conflict   somebody was faster, or the state of things forbids it (409)
  *   ask-first  possible, but it costs something that must be confirmed (409)
  */
-export const REFUSAL_STATUS = { invalid: 400, forbidden: 403, "not-found": 404, conflict: 409, "ask-first": 409 } as const;
+export const REFUSAL_STATUS = {
+  invalid: 400,
+  forbidden: 403,
+  "not-found": 404,
+  conflict: 409,
+  "ask-first": 409,
+} as const;
 export type RefusalKind = keyof typeof REFUSAL_STATUS;
 
 /** An expected refusal, in words for the person. Anything else that is thrown is a fault of ours and is logged. */

@@ -14,7 +14,12 @@ const { bays, placements, spells } = schema;
 export async function lockBays(tx: Tx, ids: (number | null)[]): Promise<void> {
   const wanted = ids.filter((id): id is number => id !== null);
   if (wanted.length > 0)
-    await tx.select({ id: bays.id }).from(bays).where(inArray(bays.id, wanted)).orderBy(asc(bays.id)).for("update");
+    await tx
+      .select({ id: bays.id })
+      .from(bays)
+      .where(inArray(bays.id, wanted))
+      .orderBy(asc(bays.id))
+      .for("update");
 }
 
 /** A moment not before `now` at which both a standing can end and the next can begin in that bay. */
@@ -40,7 +45,12 @@ export type Move = {
   /** What the move costs was asked and answered. */
   confirmed: boolean;
 };
-export type Moved = { vehicle: BoardVehicle; fromBay: BayCard["bay"] | null; toBay: BayCard["bay"] | null; voided: boolean };
+export type Moved = {
+  vehicle: BoardVehicle;
+  fromBay: BayCard["bay"] | null;
+  toBay: BayCard["bay"] | null;
+  voided: boolean;
+};
 
 /**
  * Moves a vehicle within a running change: checks the rules, ends its standing, begins the next, voids a level that
@@ -58,7 +68,13 @@ export async function moveInside(
   const [open] = await tx
     .select()
     .from(placements)
-    .where(and(eq(placements.shopId, shopId), eq(placements.buildId, move.buildId), eq(placements.untilAt, OPEN_END)));
+    .where(
+      and(
+        eq(placements.shopId, shopId),
+        eq(placements.buildId, move.buildId),
+        eq(placements.untilAt, OPEN_END),
+      ),
+    );
   if (!open) throw new Refusal("not-found", "That vehicle does not stand in this shop.");
   await lockBays(tx, [open.bayId, move.toBayId]);
   const [locked] = await tx
@@ -69,10 +85,16 @@ export async function moveInside(
   const standing = await readStanding(tx, shopId, move.buildId);
   if (!locked || !standing) throw new Refusal("not-found", "That vehicle does not stand in this shop.");
   const { vehicle } = standing;
-  const fromBay = standing.bayId === null ? null : (await readBayCards(tx, shopId, [standing.bayId]))[0]?.bay ?? null;
+  const fromBay =
+    standing.bayId === null ? null : ((await readBayCards(tx, shopId, [standing.bayId]))[0]?.bay ?? null);
   if (locked.id !== move.placementId || vehicle.placementId !== move.placementId) {
     const where = fromBay ? `to Bay ${fromBay.number}` : "to the yard";
-    throw new Refusal("conflict", `${vehicle.movedBy} has just moved ${vehicle.nickname} ${where}.`, {}, { moved: true });
+    throw new Refusal(
+      "conflict",
+      `${vehicle.movedBy} has just moved ${vehicle.nickname} ${where}.`,
+      {},
+      { moved: true },
+    );
   }
   const target = move.toBayId === null ? "yard" : (await readBayCards(tx, shopId, [move.toBayId]))[0];
   if (!target) throw new Refusal("not-found", "There is no such bay.");
@@ -128,7 +150,8 @@ export async function releaseCrew(tx: Tx, buildId: number, at: Date, personId?: 
 /** What a move touched, for the journal. */
 export function touchedByMove(moved: Moved, layoutId: number | null): Touch[] {
   const touches: Touch[] = [{ kind: "crew" }, { kind: "build", id: moved.vehicle.buildId }];
-  for (const bay of [moved.fromBay, moved.toBay]) touches.push(bay ? { kind: "bay", id: bay.id } : { kind: "yard" });
+  for (const bay of [moved.fromBay, moved.toBay])
+    touches.push(bay ? { kind: "bay", id: bay.id } : { kind: "yard" });
   if (layoutId !== null) touches.push({ kind: "layout", id: layoutId });
   return touches;
 }

@@ -2,7 +2,7 @@ import { and, eq, isNull } from "drizzle-orm";
 import { schema } from "../db/client.server";
 import { readStanding } from "../db/queries/board.server";
 import type { HoldKind } from "../domain/builds/stages";
-import { change, type Context, requirePerson } from "./change.server";
+import { type Context, change, requirePerson } from "./change.server";
 import { Refusal } from "./errors";
 
 const { holds } = schema;
@@ -23,7 +23,8 @@ export async function holdBuild(
       { kind: "build", id: what.buildId } as const,
     ];
     if (what.place) {
-      if (vehicle.hold) throw new Refusal("conflict", `${vehicle.nickname} is on hold already: ${vehicle.hold.words}`);
+      if (vehicle.hold)
+        throw new Refusal("conflict", `${vehicle.nickname} is on hold already: ${vehicle.hold.words}`);
       await tx.insert(holds).values({
         shopId,
         buildId: what.buildId,
@@ -38,7 +39,9 @@ export async function holdBuild(
         .set({ liftedAt: ctx.now(), liftedBy: actor.personId })
         .where(and(eq(holds.buildId, what.buildId), isNull(holds.liftedAt)));
     }
-    const words = what.place ? `${vehicle.nickname} on hold: ${what.place.words}` : `${vehicle.nickname}: hold lifted`;
+    const words = what.place
+      ? `${vehicle.nickname} on hold: ${what.place.words}`
+      : `${vehicle.nickname}: hold lifted`;
     note({
       verb: what.place ? "place-hold" : "lift-hold",
       subject: { kind: "build", id: what.buildId },

@@ -1,4 +1,4 @@
-import { change, type Context, requirePerson } from "./change.server";
+import { type Context, change, requirePerson } from "./change.server";
 import { type Move, moveInside, placeWords, touchedByMove } from "./floor-moves.server";
 
 /**

@@ -3,7 +3,7 @@ import { and, desc, eq, gt, isNull } from "drizzle-orm";
 import { endSession, hashOf, newSecret, startSession } from "../auth/sessions.server";
 import { type Db, isDuplicate, schema } from "../db/client.server";
 import { CODE_ALPHABET } from "../domain/tags/short-code";
-import { change, type Context, requirePerson } from "./change.server";
+import { type Context, change, requirePerson } from "./change.server";
 import { Refusal } from "./errors";
 
 const { devicePairings, devices, sessions } = schema;
@@ -17,7 +17,10 @@ const pairingCode = () =>
 const plain = (code: string) => code.toUpperCase().replace(/[^A-Z0-9]/g, "");
 
 /** A display asks to be paired. @returns the code to show and the claim for its cookie */
-export async function askForPairing(db: Db, now: Date): Promise<{ code: string; claim: string; expiresAt: Date }> {
+export async function askForPairing(
+  db: Db,
+  now: Date,
+): Promise<{ code: string; claim: string; expiresAt: Date }> {
   const claim = newSecret();
   const expiresAt = new Date(now.getTime() + PAIRING_MS);
   for (;;) {
@@ -34,7 +37,12 @@ export async function askForPairing(db: Db, now: Date): Promise<{ code: string; 
 }
 
 /** A display with a claim asks whether somebody has confirmed it. @returns a session's secret, once; else null */
-export async function collectPairing(db: Db, claim: string, userAgent: string, now: Date): Promise<string | null> {
+export async function collectPairing(
+  db: Db,
+  claim: string,
+  userAgent: string,
+  now: Date,
+): Promise<string | null> {
   const [row] = await db
     .select()
     .from(devicePairings)
@@ -73,7 +81,13 @@ export async function confirmPairing(
       });
     const [device] = await tx
       .insert(devices)
-      .values({ shopId: actor.shopId, kind: what.kind, name: what.name, pairedBy: actor.personId, pairedAt: now })
+      .values({
+        shopId: actor.shopId,
+        kind: what.kind,
+        name: what.name,
+        pairedBy: actor.personId,
+        pairedAt: now,
+      })
       .$returningId();
     if (!device) throw new Error("The device was not inserted");
     await tx
@@ -92,7 +106,10 @@ export async function confirmPairing(
 }
 
 /** Takes a display's trust back. @returns the hashes of its sessions, to cut their live channels */
-export async function revokeDevice(ctx: Context, deviceId: number): Promise<{ words: string; sessionHashes: string[] }> {
+export async function revokeDevice(
+  ctx: Context,
+  deviceId: number,
+): Promise<{ words: string; sessionHashes: string[] }> {
   const actor = requirePerson(ctx, "devices:pair");
   return change(ctx, async (tx, note) => {
     const [device] = await tx

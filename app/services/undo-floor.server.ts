@@ -3,7 +3,7 @@ import { schema } from "../db/client.server";
 import { readCrew, readStanding } from "../db/queries/board.server";
 import { readLastChange, readUndoable } from "../db/queries/undo.server";
 import { OPEN_END, type Touch } from "../db/schema";
-import { change, type Context, requirePerson } from "./change.server";
+import { type Context, change, requirePerson } from "./change.server";
 import { Refusal } from "./errors";
 import { moveInside, placeWords, releaseCrew, touchedByMove } from "./floor-moves.server";
 
@@ -22,7 +22,8 @@ export async function undoFloor(ctx: Context): Promise<{ words: string }> {
     if (!entry) throw new Refusal("conflict", "You have nothing to undo.");
     const subject = { kind: entry.subjectKind, id: entry.subjectId };
     const last = await readLastChange(tx, shopId, subject);
-    if (last && last.id !== entry.id) throw new Refusal("conflict", `Not undone: ${last.words} came after it.`);
+    if (last && last.id !== entry.id)
+      throw new Refusal("conflict", `Not undone: ${last.words} came after it.`);
 
     let touches: Touch[];
     let words = `Undone: ${entry.words}.`;
@@ -31,7 +32,10 @@ export async function undoFloor(ctx: Context): Promise<{ words: string }> {
       if (!standing) throw new Refusal("conflict", "Not undone: the vehicle has left.");
       const { level } = standing.vehicle;
       if (level.state === "true" || level.state === "not-true")
-        throw new Refusal("conflict", `Not undone: ${standing.vehicle.nickname} was levelled since. Move it if you must.`);
+        throw new Refusal(
+          "conflict",
+          `Not undone: ${standing.vehicle.nickname} was levelled since. Move it if you must.`,
+        );
       const moved = await moveInside(
         tx,
         ctx,
@@ -56,7 +60,9 @@ export async function undoFloor(ctx: Context): Promise<{ words: string }> {
       const backTo = (entry.before?.buildId as number | null) ?? null;
       if ((person.on?.buildId ?? null) !== nowOn)
         throw new Refusal("conflict", `Not undone: ${person.name} is elsewhere by now.`);
-      const at = new Date(Math.max(ctx.now().getTime(), person.on ? new Date(person.on.since).getTime() + 1 : 0));
+      const at = new Date(
+        Math.max(ctx.now().getTime(), person.on ? new Date(person.on.since).getTime() + 1 : 0),
+      );
       touches = [{ kind: "crew" }];
       for (const buildId of [nowOn, backTo]) {
         if (buildId === null) continue;

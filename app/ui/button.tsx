@@ -23,13 +23,38 @@ const SIZE: Record<ButtonSize, string> = {
 export const buttonClass = (tone: ButtonTone = "plain", size: ButtonSize = "m") =>
   `inline-flex items-center justify-center gap-2 rounded border-[1.5px] text-center leading-tight no-underline select-none disabled:cursor-not-allowed disabled:opacity-50 ${TONE[tone]} ${SIZE[size]}`;
 
-type Props = ButtonHTMLAttributes<HTMLButtonElement> & { tone?: ButtonTone; size?: ButtonSize; busy?: boolean; sign?: SignName };
+type Props = ButtonHTMLAttributes<HTMLButtonElement> & {
+  tone?: ButtonTone;
+  size?: ButtonSize;
+  busy?: boolean;
+  sign?: SignName;
+};
 
 /** A plate to press. While busy it keeps its width, swings the bob and takes no second press. */
-export function Button({ tone = "plain", size = "m", busy = false, sign, className = "", children, disabled, type = "button", ...rest }: Props) {
+export function Button({
+  tone = "plain",
+  size = "m",
+  busy = false,
+  sign,
+  className = "",
+  children,
+  disabled,
+  type = "button",
+  ...rest
+}: Props) {
   return (
-    <button type={type} className={`${buttonClass(tone, size)} ${className}`} disabled={disabled || busy} aria-busy={busy || undefined} {...rest}>
-      {busy ? <Bob size={24} swinging /> : sign ? <Sign name={sign} size={size === "s" ? 16 : size === "xl" ? 32 : 20} /> : null}
+    <button
+      type={type}
+      className={`${buttonClass(tone, size)} ${className}`}
+      disabled={disabled || busy}
+      aria-busy={busy || undefined}
+      {...rest}
+    >
+      {busy ? (
+        <Bob size={24} swinging />
+      ) : sign ? (
+        <Sign name={sign} size={size === "s" ? 16 : size === "xl" ? 32 : 20} />
+      ) : null}
       {children}
     </button>
   );

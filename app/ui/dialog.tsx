@@ -1,7 +1,15 @@
 import { type ReactNode, useEffect, useId, useRef } from "react";
 import { Sign, type SignName } from "./sign";
 
-type Props = { open: boolean; onClose: () => void; title: string; sign?: SignName; tone?: "plain" | "ask" | "stop"; children?: ReactNode; actions: ReactNode };
+type Props = {
+  open: boolean;
+  onClose: () => void;
+  title: string;
+  sign?: SignName;
+  tone?: "plain" | "ask" | "stop";
+  children?: ReactNode;
+  actions: ReactNode;
+};
 
 const TONE = { plain: "text-ink", ask: "text-brass-ink", stop: "text-oxide" } as const;
 

@@ -5,6 +5,8 @@ type TapeProps = { value: string; onChange: (text: string) => void; disabled: bo
 
 const gcd = (a: number, b: number): number => (b === 0 ? a : gcd(b, a % b));
 
+const TENTHS = [0, 1, 2, 3, 4, 5, 6, 7, 8, 9] as const;
+
 type Cell = { steps: number; label: string; rank: number };
 
 /** The cells of one inch; rank 0 is the half and the even inch, then quarters, eighths … */
@@ -19,7 +21,14 @@ function cellsOf(denominator: number): Cell[] {
 
 /** Steps along the tape by arrows, to its ends by Home and End. */
 function stepByKey(event: KeyboardEvent, now: number, last: number, set: (n: number) => void) {
-  const to = { ArrowLeft: now - 1, ArrowDown: now - 1, ArrowRight: now + 1, ArrowUp: now + 1, Home: 0, End: last }[event.key];
+  const to = {
+    ArrowLeft: now - 1,
+    ArrowDown: now - 1,
+    ArrowRight: now + 1,
+    ArrowUp: now + 1,
+    Home: 0,
+    End: last,
+  }[event.key];
   if (to === undefined) return;
   event.preventDefault();
   set(Math.min(last, Math.max(0, to)));
@@ -33,7 +42,12 @@ function slideTo(event: PointerEvent<HTMLDivElement>, set: (n: number) => void) 
 }
 
 /** One inch of tape: a cell for each sixteenth (or thirty-second); the inch typed stands left, the next one right. */
-export function FractionTape({ value, onChange, denominator, disabled }: TapeProps & { denominator: 16 | 32 }) {
+export function FractionTape({
+  value,
+  onChange,
+  denominator,
+  disabled,
+}: TapeProps & { denominator: 16 | 32 }) {
   const now = fractionSteps(value, denominator);
   const { whole } = readPad(value);
   const set = (steps: number) => {
@@ -52,7 +66,10 @@ export function FractionTape({ value, onChange, denominator, disabled }: TapePro
         aria-valuetext={cells[now]?.label ?? "even"}
         aria-disabled={disabled}
         className="relative grid h-24 touch-pan-x"
-        style={{ gridTemplateColumns: `repeat(${denominator}, minmax(48px, 1fr))`, minWidth: denominator === 32 ? 32 * 48 : undefined }}
+        style={{
+          gridTemplateColumns: `repeat(${denominator}, minmax(48px, 1fr))`,
+          minWidth: denominator === 32 ? 32 * 48 : undefined,
+        }}
         onKeyDown={(event) => stepByKey(event, now, denominator - 1, set)}
         onPointerMove={(event) => slideTo(event, set)}
         onPointerUp={(event) => slideTo(event, set)}
@@ -60,14 +77,28 @@ export function FractionTape({ value, onChange, denominator, disabled }: TapePro
         {cells.map((cell) => {
           const chosen = cell.steps === now;
           return (
-            <span key={cell.steps} data-step={cell.steps} className={`relative flex flex-col items-center justify-end pb-2 ${chosen ? "bg-brass-ink text-chalk" : "text-ink"}`}>
-              <span aria-hidden="true" className={`absolute top-0 w-0.5 ${chosen ? "bg-chalk" : "bg-ink"}`} style={{ height: Math.max(20, 56 - cell.rank * 12) }} />
-              <span className={`font-label ${cell.rank === 0 ? "text-xl font-bold" : "text-base font-semibold"} ${cell.steps === 0 ? "" : "fr"}`}>{cell.label}</span>
+            <span
+              key={cell.steps}
+              data-step={cell.steps}
+              className={`relative flex flex-col items-center justify-end pb-2 ${chosen ? "bg-brass-ink text-chalk" : "text-ink"}`}
+            >
+              <span
+                aria-hidden="true"
+                className={`absolute top-0 w-0.5 ${chosen ? "bg-chalk" : "bg-ink"}`}
+                style={{ height: Math.max(20, 56 - cell.rank * 12) }}
+              />
+              <span
+                className={`font-label ${cell.rank === 0 ? "text-xl font-bold" : "text-base font-semibold"} ${cell.steps === 0 ? "" : "fr"}`}
+              >
+                {cell.label}
+              </span>
             </span>
           );
         })}
         <b className="pointer-events-none absolute top-8 left-1 font-label text-xl">{whole || "0"}</b>
-        <b className="pointer-events-none absolute top-8 right-1 font-label text-xl">{Number(whole || 0) + 1}</b>
+        <b className="pointer-events-none absolute top-8 right-1 font-label text-xl">
+          {Number(whole || 0) + 1}
+        </b>
       </div>
     </div>
   );
@@ -95,12 +126,19 @@ export function CentimetreTape({ value, onChange, disabled }: TapeProps) {
         onPointerMove={(event) => slideTo(event, set)}
         onPointerUp={(event) => slideTo(event, set)}
       >
-        {Array.from({ length: 10 }, (_, tenth) => {
+        {TENTHS.map((tenth) => {
           const chosen = tenthOf(value) === tenth;
           return (
-            // biome-ignore lint/suspicious/noArrayIndexKey: ten cells, never reordered
-            <span key={tenth} data-step={tenth} className={`relative flex flex-col items-center justify-end pb-2 ${chosen ? "bg-brass-ink text-chalk" : "text-ink"}`}>
-              <span aria-hidden="true" className={`absolute top-0 w-0.5 ${chosen ? "bg-chalk" : "bg-ink"}`} style={{ height: tenth === 0 ? 56 : tenth === 5 ? 40 : 28 }} />
+            <span
+              key={tenth}
+              data-step={tenth}
+              className={`relative flex flex-col items-center justify-end pb-2 ${chosen ? "bg-brass-ink text-chalk" : "text-ink"}`}
+            >
+              <span
+                aria-hidden="true"
+                className={`absolute top-0 w-0.5 ${chosen ? "bg-chalk" : "bg-ink"}`}
+                style={{ height: tenth === 0 ? 56 : tenth === 5 ? 40 : 28 }}
+              />
               <span className="font-label text-xl font-semibold">{tenth}</span>
             </span>
           );

@@ -29,7 +29,9 @@ const gcd = (a: number, b: number): number => (b === 0 ? a : gcd(b, a % b));
 export function typeDigit(text: string, digit: number, unit: PadUnit): string {
   if (unit === "mm") {
     const { whole, tenth } = readCm(text);
-    return tenth !== null || whole.length >= MAX_DIGITS ? writeCm(String(digit), null) : writeCm(`${whole}${digit}`.replace(/^0+(?=\d)/, ""), null);
+    return tenth !== null || whole.length >= MAX_DIGITS
+      ? writeCm(String(digit), null)
+      : writeCm(`${whole}${digit}`.replace(/^0+(?=\d)/, ""), null);
   }
   const entry = readPad(text);
   if (entry.numerator > 0) return write({ ...EMPTY, whole: String(digit) });
@@ -76,7 +78,9 @@ function readCm(text: string): { whole: string; tenth: number | null } {
   return { whole: match[1] ?? "", tenth: match[2] === undefined ? null : Number(match[2]) };
 }
 const writeCm = (whole: string, tenth: number | null): string =>
-  whole === "" && tenth === null ? "" : `${whole === "" ? "0" : whole}${tenth === null ? "" : `.${tenth}`} cm`;
+  whole === "" && tenth === null
+    ? ""
+    : `${whole === "" ? "0" : whole}${tenth === null ? "" : `.${tenth}`} cm`;
 
 /** Sets the tenths of a centimetre. */
 export const setTenth = (text: string, tenth: number): string => writeCm(readCm(text).whole, tenth);

@@ -1,7 +1,7 @@
 import { useState } from "react";
 import { Button } from "./button";
-import { asFeet, type PadUnit, typeDigit, wipe } from "./number-pad-text";
 import { CentimetreTape, FractionTape } from "./number-pad-tape";
+import { asFeet, type PadUnit, typeDigit, wipe } from "./number-pad-text";
 import { Sign } from "./sign";
 
 type Props = {
@@ -27,11 +27,29 @@ const KEYS = [1, 2, 3, 4, 5, 6, 7, 8, 9] as const;
  * asked. It edits the caller's text and keeps nothing of its own, so a keyboard can type beside it.
  */
 export function NumberPad(props: Props) {
-  const { value, onChange, onKeep, unit, onUnit, keepLabel, keepDetail, caution, disabled = false, busy = false, compact = false } = props;
+  const {
+    value,
+    onChange,
+    onKeep,
+    unit,
+    onUnit,
+    keepLabel,
+    keepDetail,
+    caution,
+    disabled = false,
+    busy = false,
+    compact = false,
+  } = props;
   const [fine, setFine] = useState(false);
   const key = `min-h-16 rounded border-[1.5px] border-paint-edge border-b-4 bg-chalk ${compact ? "text-2xl" : "text-4xl"} font-semibold text-ink active:bg-brass-wash`;
   const keyFor = (digit: number) => (
-    <button key={digit} type="button" className={key} onClick={() => onChange(typeDigit(value, digit, unit))} disabled={disabled}>
+    <button
+      key={digit}
+      type="button"
+      className={key}
+      onClick={() => onChange(typeDigit(value, digit, unit))}
+      disabled={disabled}
+    >
       {digit}
     </button>
   );
@@ -42,16 +60,28 @@ export function NumberPad(props: Props) {
       ) : (
         <CentimetreTape value={value} onChange={onChange} disabled={disabled} />
       )}
-      <div className={`grid gap-2 p-3 ${compact ? "grid-cols-[minmax(0,1fr)_minmax(0,1fr)]" : "grid-cols-[minmax(0,7fr)_minmax(0,6fr)]"}`}>
+      <div
+        className={`grid gap-2 p-3 ${compact ? "grid-cols-[minmax(0,1fr)_minmax(0,1fr)]" : "grid-cols-[minmax(0,7fr)_minmax(0,6fr)]"}`}
+      >
         <div className="grid grid-cols-3 gap-2">
           {KEYS.map(keyFor)}
-          <button type="button" className={`${key} flex items-center justify-center gap-2 text-lg`} onClick={() => onChange(wipe(value, unit))} disabled={disabled}>
+          <button
+            type="button"
+            className={`${key} flex items-center justify-center gap-2 text-lg`}
+            onClick={() => onChange(wipe(value, unit))}
+            disabled={disabled}
+          >
             <Sign name="wipe" size={22} />
             Wipe
           </button>
           {keyFor(0)}
           {unit === "in" ? (
-            <button type="button" className={`${key} text-lg`} onClick={() => onChange(asFeet(value))} disabled={disabled}>
+            <button
+              type="button"
+              className={`${key} text-lg`}
+              onClick={() => onChange(asFeet(value))}
+              disabled={disabled}
+            >
               feet ′
             </button>
           ) : (
@@ -59,7 +89,14 @@ export function NumberPad(props: Props) {
           )}
         </div>
         <div className="grid content-start gap-2">
-          <Button tone="go" size="xl" className="flex-col gap-1" onClick={onKeep} disabled={disabled || value.trim() === ""} busy={busy}>
+          <Button
+            tone="go"
+            size="xl"
+            className="flex-col gap-1"
+            onClick={onKeep}
+            disabled={disabled || value.trim() === ""}
+            busy={busy}
+          >
             <span>{keepLabel}</span>
             {keepDetail ? <span className="text-base font-medium">{keepDetail}</span> : null}
           </Button>

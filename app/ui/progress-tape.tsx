@@ -3,7 +3,13 @@ export function ProgressTape({ of, done, width = 88 }: { of: number; done: numbe
   const ticks = Math.min(Math.max(1, of), 12);
   const at = (Math.min(done, of) / Math.max(1, of)) * width;
   return (
-    <svg width={width + 8} height="15" viewBox={`0 0 ${width + 8} 15`} aria-hidden="true" className="flex-none">
+    <svg
+      width={width + 8}
+      height="15"
+      viewBox={`0 0 ${width + 8} 15`}
+      aria-hidden="true"
+      className="flex-none"
+    >
       <path d={`M1 10H${width + 1}`} stroke="var(--concrete-500)" />
       {Array.from({ length: ticks + 1 }, (_, i) => (i / ticks) * width + 1).map((x, i) => (
         <path key={x} d={`M${x} ${i === 0 || i === ticks ? 3 : 5}V10`} stroke="var(--concrete-500)" />

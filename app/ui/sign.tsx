@@ -18,10 +18,27 @@ export function SignSprite() {
 }
 
 /** A sign beside its word. Hidden from screen readers unless it is given a title of its own. */
-export function Sign({ name, size = 20, className = "", title }: { name: SignName; size?: number | string; className?: string; title?: string }) {
+export function Sign({
+  name,
+  size = 20,
+  className = "",
+  title,
+}: {
+  name: SignName;
+  size?: number | string;
+  className?: string;
+  title?: string;
+}) {
   const box = { width: size, height: size };
   return (
-    <svg className={`inline-block flex-none ${className}`} style={box} role={title ? "img" : undefined} aria-label={title} aria-hidden={title ? undefined : true} focusable="false">
+    <svg
+      className={`inline-block flex-none ${className}`}
+      style={box}
+      role={title ? "img" : undefined}
+      aria-label={title}
+      aria-hidden={title ? undefined : true}
+      focusable="false"
+    >
       <use href={`#sg-${name}`} />
     </svg>
   );

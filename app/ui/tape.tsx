@@ -5,7 +5,17 @@ const SIZE = {
 } as const;
 
 /** A name on masking tape, with the tag's short code. */
-export function Tape({ name, code, size = "s", className = "" }: { name: string; code?: string; size?: keyof typeof SIZE; className?: string }) {
+export function Tape({
+  name,
+  code,
+  size = "s",
+  className = "",
+}: {
+  name: string;
+  code?: string;
+  size?: keyof typeof SIZE;
+  className?: string;
+}) {
   return (
     <span className={`tape ${SIZE[size]} ${className}`}>
       <span>{name}</span>

@@ -1,7 +1,17 @@
 import type { ReactNode } from "react";
 import { Sign, type SignName } from "./sign";
 
-export type VerdictTone = "true" | "not-true" | "void" | "in-hand" | "waiting" | "approved" | "hold" | "empty" | "kept" | "unsent";
+export type VerdictTone =
+  | "true"
+  | "not-true"
+  | "void"
+  | "in-hand"
+  | "waiting"
+  | "approved"
+  | "hold"
+  | "empty"
+  | "kept"
+  | "unsent";
 
 const GROUND: Record<VerdictTone, string> = {
   true: "bg-moss-wash text-moss",
@@ -20,11 +30,18 @@ const GROUND: Record<VerdictTone, string> = {
 function Edge({ tone }: { tone: VerdictTone }) {
   const line = { stroke: "currentColor", fill: "none", vectorEffect: "non-scaling-stroke" } as const;
   return (
-    <svg className="absolute inset-x-0 bottom-0 h-3 w-full" viewBox="0 0 100 12" preserveAspectRatio="none" aria-hidden="true">
+    <svg
+      className="absolute inset-x-0 bottom-0 h-3 w-full"
+      viewBox="0 0 100 12"
+      preserveAspectRatio="none"
+      aria-hidden="true"
+    >
       {tone === "not-true" ? <path d="M0 11L100 2" strokeWidth="3" {...line} /> : null}
       {tone === "void" ? <path d="M0 10.500H46L49 5M53 8L56 2.500H100" strokeWidth="3" {...line} /> : null}
       {tone === "true" || tone === "approved" ? <path d="M0 10.500H100" strokeWidth="3" {...line} /> : null}
-      {tone === "hold" ? <path d="M0 10.500H100M94 10.500C96 9 97 7 97.500 5" strokeWidth="3" {...line} /> : null}
+      {tone === "hold" ? (
+        <path d="M0 10.500H100M94 10.500C96 9 97 7 97.500 5" strokeWidth="3" {...line} />
+      ) : null}
       {tone === "in-hand" ? <path d="M0 9.500H100" strokeWidth="5" {...line} /> : null}
       {tone === "empty" ? <path d="M0 10.500H100" strokeWidth="2" strokeDasharray="9 7" {...line} /> : null}
       {tone === "waiting" || tone === "kept" || tone === "unsent" ? (
@@ -34,7 +51,14 @@ function Edge({ tone }: { tone: VerdictTone }) {
   );
 }
 
-type Props = { tone: VerdictTone; sign: SignName; title: ReactNode; detail?: ReactNode; size?: "m" | "l"; live?: boolean };
+type Props = {
+  tone: VerdictTone;
+  sign: SignName;
+  title: ReactNode;
+  detail?: ReactNode;
+  size?: "m" | "l";
+  live?: boolean;
+};
 
 /** What the shop's numbers say, in words: sign, sentence, what it costs. A turn to not true is announced at once. */
 export function Verdict({ tone, sign, title, detail, size = "m", live = false }: Props) {
@@ -46,8 +70,12 @@ export function Verdict({ tone, sign, title, detail, size = "m", live = false }:
     >
       <Sign name={sign} size={big ? 52 : 36} />
       <div className="min-w-0">
-        <p className={`font-semibold text-ink ${big ? "text-[27px] leading-tight" : "text-xl leading-snug"}`}>{title}</p>
-        {detail ? <p className={`text-concrete-700 ${big ? "mt-1 text-base" : "text-[15px]"}`}>{detail}</p> : null}
+        <p className={`font-semibold text-ink ${big ? "text-[27px] leading-tight" : "text-xl leading-snug"}`}>
+          {title}
+        </p>
+        {detail ? (
+          <p className={`text-concrete-700 ${big ? "mt-1 text-base" : "text-[15px]"}`}>{detail}</p>
+        ) : null}
       </div>
       <Edge tone={tone} />
     </div>

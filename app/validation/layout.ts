@@ -30,49 +30,73 @@ class Faults {
 /** Reads one length; a fault is added and 0 answered when it cannot be. */
 function length(form: FormData, name: string, unit: LengthUnit, faults: Faults, most = 20_000): Typed {
   const typed = String(form.get(name) ?? "").trim();
-  const read = typed.length > MAX_TYPED ? ({ ok: false, problem: "That is too long for a length." } as const) : parseLength(typed, unit);
+  const read =
+    typed.length > MAX_TYPED
+      ? ({ ok: false, problem: "That is too long for a length." } as const)
+      : parseLength(typed, unit);
   if (!read.ok) faults.add(name, read.problem);
-  else if (Math.abs(read.value) > most) faults.add(name, "That is further than any shop floor: read the tape again.");
+  else if (Math.abs(read.value) > most)
+    faults.add(name, "That is further than any shop floor: read the tape again.");
   return { mm: read.ok ? read.value : mm(0), typed };
 }
 
 function angle(form: FormData, name: string, faults: Faults) {
-  const typed = String(form.get(name) ?? "").trim().replace(",", ".").replace("−", "-");
+  const typed = String(form.get(name) ?? "")
+    .trim()
+    .replace(",", ".")
+    .replace("−", "-");
   const value = Number(typed);
-  if (typed === "" || !Number.isFinite(value)) faults.add(name, "Type the gauge's reading in degrees, for example 0.35 or -0.1.");
+  if (typed === "" || !Number.isFinite(value))
+    faults.add(name, "Type the gauge's reading in degrees, for example 0.35 or -0.1.");
   else if (Math.abs(value) > 15) faults.add(name, "More than 15°: is the gauge set to degrees?");
   return degrees(Number.isFinite(value) ? value : 0);
 }
 
 /** The places of a field that is repeated as `name.place`. */
-const placesOf = (form: FormData, name: string) => [...new Set([...form.keys()].filter((key) => key.startsWith(`${name}.`)).map((key) => key.slice(name.length + 1)))];
+const placesOf = (form: FormData, name: string) => [
+  ...new Set(
+    [...form.keys()].filter((key) => key.startsWith(`${name}.`)).map((key) => key.slice(name.length + 1)),
+  ),
+];
 
 const GAUGE_PLACES: readonly GaugePlace[] = ["leftRail", "rightRail", "frontCross", "rearCross"];
 const MAX_STANDS = 12;
 
 export type LevelForm =
   | { method: "heights"; stands: { place: string; x: Typed; y: Typed; height: Typed }[] }
-  | { method: "gauge"; readings: Record<GaugePlace, { first: ReturnType<typeof degrees>; turned: ReturnType<typeof degrees> }> };
+  | {
+      method: "gauge";
+      readings: Record<GaugePlace, { first: ReturnType<typeof degrees>; turned: ReturnType<typeof degrees> }>;
+    };
 
 /** Heights at stands (`x.`, `y.`, `height.` and the place) or gauge readings (`first.`, `turned.` and the place). */
 export function readLevelForm(form: FormData, unit: LengthUnit): FormRead<LevelForm> {
   const faults = new Faults();
   if (form.get("method") === "gauge") {
-    const at = (place: GaugePlace) => ({ first: angle(form, `first.${place}`, faults), turned: angle(form, `turned.${place}`, faults) });
+    const at = (place: GaugePlace) => ({
+      first: angle(form, `first.${place}`, faults),
+      turned: angle(form, `turned.${place}`, faults),
+    });
     const [leftRail, rightRail, frontCross, rearCross] = GAUGE_PLACES.map(at);
-    if (faults.any || !leftRail || !rightRail || !frontCross || !rearCross) return { ok: false, fields: faults.fields };
+    if (faults.any || !leftRail || !rightRail || !frontCross || !rearCross)
+      return { ok: false, fields: faults.fields };
     return { ok: true, value: { method: "gauge", readings: { leftRail, rightRail, frontCross, rearCross } } };
   }
   const places = placesOf(form, "height").slice(0, MAX_STANDS);
-  if (places.length < 3) faults.add("form", "Heights at three stands or more make a level; a fourth shows twist.");
+  if (places.length < 3)
+    faults.add("form", "Heights at three stands or more make a level; a fourth shows twist.");
   const stands = places.map((place) => ({
     place: place.slice(0, 20),
     x: length(form, `x.${place}`, unit, faults),
     y: length(form, `y.${place}`, unit, faults),
     height: length(form, `height.${place}`, unit, faults, 3000),
   }));
-  for (const stand of stands) if (stand.height.mm < 0) faults.add(`height.${stand.place}`, "A height is measured up from the level line: no minus.");
-  return faults.any ? { ok: false, fields: faults.fields } : { ok: true, value: { method: "heights", stands } };
+  for (const stand of stands)
+    if (stand.height.mm < 0)
+      faults.add(`height.${stand.place}`, "A height is measured up from the level line: no minus.");
+  return faults.any
+    ? { ok: false, fields: faults.fields }
+    : { ok: true, value: { method: "heights", stands } };
 }
 
 export function readMarksForm(form: FormData, unit: LengthUnit): FormRead<Typed> {
@@ -84,7 +108,13 @@ export function readMarksForm(form: FormData, unit: LengthUnit): FormRead<Typed>
 
 const UUID = /^[0-9a-f]{8}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{12}$/i;
 
-export type DropForm = { point: DropPointId; side: (typeof DROP_SIDES)[number]; clientKey: string; height: Typed | null; reason: string | null } & (
+export type DropForm = {
+  point: DropPointId;
+  side: (typeof DROP_SIDES)[number];
+  clientKey: string;
+  height: Typed | null;
+  reason: string | null;
+} & (
   | { method: "offset"; station: Typed; offset: Typed }
   | { method: "ties"; ties: { mark: string; distance: Typed }[] }
 );
@@ -99,34 +129,64 @@ export function readDropForm(form: FormData, unit: LengthUnit): FormRead<DropFor
   else if (!side || !point.sides.includes(side)) faults.add("side", "Choose the side.");
   const clientKey = text("clientKey").toLowerCase();
   if (!UUID.test(clientKey)) faults.add("form", "The reading has no key of its own: load the page again.");
-  const height = point?.withHeight || text("height") !== "" ? length(form, "height", unit, faults, 5000) : null;
+  const height =
+    point?.withHeight || text("height") !== "" ? length(form, "height", unit, faults, 5000) : null;
   if (height && height.mm < 0) faults.add("height", "A height above the ground has no minus.");
   const reason = text("reason").slice(0, 160) || null;
-  const common = { point: point?.id ?? "opening-front", side: side ?? "left", clientKey, height, reason } as const;
+  const common = {
+    point: point?.id ?? "opening-front",
+    side: side ?? "left",
+    clientKey,
+    height,
+    reason,
+  } as const;
   if (text("method") === "ties") {
     const ties = placesOf(form, "tape")
       .filter((mark) => text(`tape.${mark}`) !== "")
       .map((mark) => ({ mark: mark.slice(0, 2), distance: length(form, `tape.${mark}`, unit, faults) }));
     if (ties.length < 2) faults.add("form", "Tape from two marks at least; a third checks the other two.");
-    for (const tie of ties) if (tie.distance.mm <= 0) faults.add(`tape.${tie.mark}`, "A tape reads more than nothing.");
-    return faults.any ? { ok: false, fields: faults.fields } : { ok: true, value: { ...common, method: "ties", ties } };
+    for (const tie of ties)
+      if (tie.distance.mm <= 0) faults.add(`tape.${tie.mark}`, "A tape reads more than nothing.");
+    return faults.any
+      ? { ok: false, fields: faults.fields }
+      : { ok: true, value: { ...common, method: "ties", ties } };
   }
   const station = length(form, "station", unit, faults);
   const offset = length(form, "offset", unit, faults);
-  return faults.any ? { ok: false, fields: faults.fields } : { ok: true, value: { ...common, method: "offset", station, offset } };
+  return faults.any
+    ? { ok: false, fields: faults.fields }
+    : { ok: true, value: { ...common, method: "offset", station, offset } };
 }
 
-export function readAxleForm(form: FormData, unit: LengthUnit): FormRead<{ method: (typeof AXLE_METHODS)[number]; asked: Typed | null }> {
+export function readAxleForm(
+  form: FormData,
+  unit: LengthUnit,
+): FormRead<{ method: (typeof AXLE_METHODS)[number]; asked: Typed | null }> {
   const faults = new Faults();
   const method = AXLE_METHODS.find((one) => one === form.get("method"));
   if (!method) faults.add("method", "Choose one of the three ways.");
   const asked = method === "asked" ? length(form, "asked", unit, faults, 1500) : null;
-  return faults.any || !method ? { ok: false, fields: faults.fields } : { ok: true, value: { method, asked } };
+  return faults.any || !method
+    ? { ok: false, fields: faults.fields }
+    : { ok: true, value: { method, asked } };
 }
 
 export const VoidForm = z.object({
-  reason: z.string().trim().min(3, "Say in a few words what happened: stand 3 touched, engine lifted out …").max(160, "Keep it under 160 letters."),
+  reason: z
+    .string()
+    .trim()
+    .min(3, "Say in a few words what happened: stand 3 touched, engine lifted out …")
+    .max(160, "Keep it under 160 letters."),
 });
-export const OptionForm = z.object({ key: z.string().regex(/^\d+:[01]:\d+$/, "Choose an option from the table.") });
+export const OptionForm = z.object({
+  key: z.string().regex(/^\d+:[01]:\d+$/, "Choose an option from the table."),
+});
 export const ApproveForm = z.object({ key: z.string().optional() });
-export const StartLayoutForm = z.object({ fixedEye: z.enum(["ahead", "behind"], "Which eye of the spring is fixed: the one ahead of the axle or the one behind?").default("ahead") });
+export const StartLayoutForm = z.object({
+  fixedEye: z
+    .enum(
+      ["ahead", "behind"],
+      "Which eye of the spring is fixed: the one ahead of the axle or the one behind?",
+    )
+    .default("ahead"),
+});

@@ -55,6 +55,10 @@ export const SetupForm = (unit: LengthUnit) =>
 
 export const PairForm = z.object({
   code: z.string().trim().min(1, "Type the code that the display shows."),
-  name: z.string().trim().min(1, "Give the display a name, such as Wall by the door.").max(60, "Keep it under 60 letters."),
+  name: z
+    .string()
+    .trim()
+    .min(1, "Give the display a name, such as Wall by the door.")
+    .max(60, "Keep it under 60 letters."),
   kind: z.enum(["wall", "post"], "Choose what it is."),
 });

@@ -1,9 +1,8 @@
 import { addMinutes } from "date-fns";
 import type { Db } from "../../app/db/client.server";
+import { floorPoint, framePoint } from "../../app/domain/geometry/point";
 import type { DropPointId, DropSide } from "../../app/domain/layout/drops";
-import { floorPoint } from "../../app/domain/geometry/point";
 import { frameFromDatums, toFloor } from "../../app/domain/layout/frame";
-import { framePoint } from "../../app/domain/geometry/point";
 import { optionKey } from "../../app/domain/layout/options";
 import type { Role } from "../../app/domain/people/roles";
 import { formatInches, inches, type Millimetres, mm, parseLength } from "../../app/domain/units/length";
@@ -43,7 +42,12 @@ const at = (x: number, y: number) => floorPoint(inches(x), inches(y));
 
 /** The frame that the demo's datums make, to lay other points by their station on it. */
 function demoFrame() {
-  const frame = frameFromDatums({ frontLeft: at(100, 16), frontRight: at(100, -16.25), rearLeft: at(20, 16.25), rearRight: at(20, -16) });
+  const frame = frameFromDatums({
+    frontLeft: at(100, 16),
+    frontRight: at(100, -16.25),
+    rearLeft: at(20, 16.25),
+    rearRight: at(20, -16),
+  });
   if (!frame.ok) throw new Error(frame.problem);
   return frame.value;
 }
@@ -101,7 +105,12 @@ export async function demoLayouts(input: DemoLayoutsInput): Promise<void> {
   const level = (who: Context, layoutId: number, heights: string[]) =>
     checkLevel(who, layoutId, {
       method: "heights",
-      stands: STANDS.map((place, i) => ({ place, x: length(PLACES[place][0]), y: length(PLACES[place][1]), height: length(heights[i] ?? "24") })),
+      stands: STANDS.map((place, i) => ({
+        place,
+        x: length(PLACES[place][0]),
+        y: length(PLACES[place][1]),
+        height: length(heights[i] ?? "24"),
+      })),
     });
   const dropAll = async (who: Context, layoutId: number, drops: Drop[]) => {
     for (const { point, side, station, offset, height } of drops)

@@ -1,11 +1,22 @@
-import { addDays, addHours, addMinutes, startOfDay } from "date-fns";
 import { TZDate } from "@date-fns/tz";
+import { addDays, addHours, addMinutes, startOfDay } from "date-fns";
 import { hashPassword } from "../../app/auth/authenticator.server";
 import { type Db, schema } from "../../app/db/client.server";
 import type { StageKind } from "../../app/domain/builds/stages";
 import type { Role, Skill } from "../../app/domain/people/roles";
 import { demoLayouts } from "./demo-layouts";
-import { makeBay, makeBuild, makeHanger, makePerson, makeShop, makeSpring, makeStint, type MadeBuild, PAD_MARKS, putOn } from "./factories";
+import {
+  type MadeBuild,
+  makeBay,
+  makeBuild,
+  makeHanger,
+  makePerson,
+  makeShop,
+  makeSpring,
+  makeStint,
+  PAD_MARKS,
+  putOn,
+} from "./factories";
 
 /*
  * The demo shop: made up from the ground to the people, and marked as demo on every screen. Vehicles by kind and
@@ -58,10 +69,21 @@ const PEOPLE: readonly { key: string; name: string; role: Role; skills?: readonl
 export type SignIn = { role: Role; name: string; email: string };
 
 /** Fills an empty database. @returns who can sign in, all with the password given */
-export async function makeDemoShop(db: Db, password: string, now = new Date()): Promise<{ shop: string; signIns: SignIn[] }> {
+export async function makeDemoShop(
+  db: Db,
+  password: string,
+  now = new Date(),
+): Promise<{ shop: string; signIns: SignIn[] }> {
   const name = "Juniper Flat Chassis";
   const zone = demoZone(now);
-  const shopId = await makeShop(db, { name, isDemo: true, timeZone: zone, now, lengthFt: 89.7, widthFt: 52.6 });
+  const shopId = await makeShop(db, {
+    name,
+    isDemo: true,
+    timeZone: zone,
+    now,
+    lengthFt: 89.7,
+    widthFt: 52.6,
+  });
   const today = startOfDay(new TZDate(now.getTime(), zone));
   /** A time of the shop's day, some days from today. */
   const at = (day: number, hour: number, minute = 0) =>
@@ -79,7 +101,8 @@ export async function makeDemoShop(db: Db, password: string, now = new Date()): 
       passwordHash,
       ...(person.key === "sam" ? { awayUntil: at(2, 7) } : {}),
     });
-    if (["nell", "ida", "rosa", "wes"].includes(person.key)) signIns.push({ role: person.role, name: person.name, email });
+    if (["nell", "ida", "rosa", "wes"].includes(person.key))
+      signIns.push({ role: person.role, name: person.name, email });
   }
   const id = (key: string) => {
     const found = who[key];
@@ -94,9 +117,38 @@ export async function makeDemoShop(db: Db, password: string, now = new Date()): 
     { number: 3, kind: "lift", xFt: 4.54, yFt: 27.6, lengthFt: 24, widthFt: 12, mouth: "east" },
     { number: 4, kind: "general", xFt: 10.54, yFt: 40.15, lengthFt: 18, widthFt: 12, mouth: "east" },
     { number: 5, kind: "level-pad", xFt: 57.7, yFt: 0.54, lengthFt: 32, widthFt: 18, mouth: "west" },
-    { number: 6, kind: "weld", xFt: 57.7, yFt: 19.08, lengthFt: 28, widthFt: 17.3, mouth: "west", rated: true, marks: PAD_MARKS },
-    { number: 7, kind: "general", xFt: 57.7, yFt: 36.9, lengthFt: 26, widthFt: 15, mouth: "west", rated: true, marks: PAD_MARKS },
-    { number: 8, kind: "apron", xFt: 0, yFt: 54.5, lengthFt: 22.5, widthFt: 9.2, mouth: "east", outside: true },
+    {
+      number: 6,
+      kind: "weld",
+      xFt: 57.7,
+      yFt: 19.08,
+      lengthFt: 28,
+      widthFt: 17.3,
+      mouth: "west",
+      rated: true,
+      marks: PAD_MARKS,
+    },
+    {
+      number: 7,
+      kind: "general",
+      xFt: 57.7,
+      yFt: 36.9,
+      lengthFt: 26,
+      widthFt: 15,
+      mouth: "west",
+      rated: true,
+      marks: PAD_MARKS,
+    },
+    {
+      number: 8,
+      kind: "apron",
+      xFt: 0,
+      yFt: 54.5,
+      lengthFt: 22.5,
+      widthFt: 9.2,
+      mouth: "east",
+      outside: true,
+    },
   ] as const;
   for (const row of bays) bay[row.number] = await makeBay(db, shopId, row);
   const bayId = (number: number) => {
@@ -121,49 +173,138 @@ export async function makeDemoShop(db: Db, password: string, now = new Date()): 
   const build = (b: Omit<Parameters<typeof makeBuild>[2], "by">) => makeBuild(db, shopId, { by, ...b });
   const vehicles: Record<string, MadeBuild> = {
     mule: await build({
-      nickname: "Old Mule", code: "M3XF", kind: "long-bed-pickup", lengthIn: 230, customer: "R. Castellane",
-      wanted: "Front axle ahead for a steeper bank, 35 in tyres, no rub at lock.", bookedInAt: at(-8, 9),
-      promisedAt: at(3, 15), bayId: bayId(5), standsSince: ago(400), at: "layout", tyre, wheelbaseIn: 133, approachAskedDeg: 40,
+      nickname: "Old Mule",
+      code: "M3XF",
+      kind: "long-bed-pickup",
+      lengthIn: 230,
+      customer: "R. Castellane",
+      wanted: "Front axle ahead for a steeper bank, 35 in tyres, no rub at lock.",
+      bookedInAt: at(-8, 9),
+      promisedAt: at(3, 15),
+      bayId: bayId(5),
+      standsSince: ago(400),
+      at: "layout",
+      tyre,
+      wheelbaseIn: 133,
+      approachAskedDeg: 40,
     }),
     biscuit: await build({
-      nickname: "Biscuit", code: "K7RD", kind: "short-bed-pickup", customer: "T. Abernathy", bookedInAt: at(-9, 10),
-      promisedAt: at(2, 12), bayId: bayId(1), standsSince: at(-2, 7), at: "mock-up", tyre, wheelbaseIn: 118,
+      nickname: "Biscuit",
+      code: "K7RD",
+      kind: "short-bed-pickup",
+      customer: "T. Abernathy",
+      bookedInAt: at(-9, 10),
+      promisedAt: at(2, 12),
+      bayId: bayId(1),
+      standsSince: at(-2, 7),
+      at: "mock-up",
+      tyre,
+      wheelbaseIn: 118,
       pieces: { done: 2, of: 4, word: "hangers" },
     }),
     pelican: await build({
-      nickname: "Pelican", code: "7HTW", kind: "two-door-utility", customer: "M. Dufrane", template: "springs-only",
-      bookedInAt: at(-4, 8), promisedAt: at(1, 12), bayId: bayId(2), standsSince: at(-1, 7), at: "torque",
-      pieces: { done: 14, of: 22, word: "bolts" }, wanted: "Rear springs and shackles renewed.",
+      nickname: "Pelican",
+      code: "7HTW",
+      kind: "two-door-utility",
+      customer: "M. Dufrane",
+      template: "springs-only",
+      bookedInAt: at(-4, 8),
+      promisedAt: at(1, 12),
+      bayId: bayId(2),
+      standsSince: at(-1, 7),
+      at: "torque",
+      pieces: { done: 14, of: 22, word: "bolts" },
+      wanted: "Rear springs and shackles renewed.",
     }),
     gravy: await build({
-      nickname: "Gravy Boat", code: "9KNC", kind: "wagon", customer: "L. Okafor", template: "springs-only",
-      bookedInAt: at(-5, 11), promisedAt: at(2, 10), bayId: bayId(3), standsSince: at(-1, 13), at: "fit",
-      pieces: { done: 1, of: 5, word: "springs" }, wanted: "Sagging rear, one leaf cracked.",
+      nickname: "Gravy Boat",
+      code: "9KNC",
+      kind: "wagon",
+      customer: "L. Okafor",
+      template: "springs-only",
+      bookedInAt: at(-5, 11),
+      promisedAt: at(2, 10),
+      bayId: bayId(3),
+      standsSince: at(-1, 13),
+      at: "fit",
+      pieces: { done: 1, of: 5, word: "springs" },
+      wanted: "Sagging rear, one leaf cracked.",
     }),
     hatchet: await build({
-      nickname: "Hatchet", code: "W3GX", kind: "bare-chassis", customer: "Pine Street Hauling", bookedInAt: at(-14, 9),
-      promisedAt: at(2, 16, 30), bayId: bayId(6), standsSince: at(-1, 7), at: "weld",
-      pieces: { done: 4, of: 10, word: "brackets" }, wanted: "All hangers new on a repaired frame.",
+      nickname: "Hatchet",
+      code: "W3GX",
+      kind: "bare-chassis",
+      customer: "Pine Street Hauling",
+      bookedInAt: at(-14, 9),
+      promisedAt: at(2, 16, 30),
+      bayId: bayId(6),
+      standsSince: at(-1, 7),
+      at: "weld",
+      pieces: { done: 4, of: 10, word: "brackets" },
+      wanted: "All hangers new on a repaired frame.",
     }),
     sunday: await build({
-      nickname: "Sunday", code: "6QPM", kind: "open-top", customer: "E. Marchetti", bookedInAt: at(-6, 9),
-      promisedAt: at(6, 12), bayId: bayId(7), standsSince: at(-1, 9), at: "approval", tyre, wheelbaseIn: 93.5,
+      nickname: "Sunday",
+      code: "6QPM",
+      kind: "open-top",
+      customer: "E. Marchetti",
+      bookedInAt: at(-6, 9),
+      promisedAt: at(6, 12),
+      bayId: bayId(7),
+      standsSince: at(-1, 9),
+      at: "approval",
+      tyre,
+      wheelbaseIn: 93.5,
     }),
     copper: await build({
-      nickname: "Copper", code: "T6WR", kind: "flatbed", customer: "J. Whitlock", bookedInAt: at(-15, 9),
-      promisedAt: at(0, 15, 30), bayId: bayId(8), standsSince: ago(200), at: "hand-over", tyre, wheelbaseIn: 140,
+      nickname: "Copper",
+      code: "T6WR",
+      kind: "flatbed",
+      customer: "J. Whitlock",
+      bookedInAt: at(-15, 9),
+      promisedAt: at(0, 15, 30),
+      bayId: bayId(8),
+      standsSince: ago(200),
+      at: "hand-over",
+      tyre,
+      wheelbaseIn: 140,
     }),
     dusty: await build({
-      nickname: "Dusty Anne", code: "H4KE", kind: "crew-pickup", customer: "S. Ibarra", bookedInAt: at(-1, 9),
-      promisedAt: at(7, 12), bayId: null, standsSince: at(-1, 9), at: "level", atState: "open", tyre, wheelbaseIn: 156,
+      nickname: "Dusty Anne",
+      code: "H4KE",
+      kind: "crew-pickup",
+      customer: "S. Ibarra",
+      bookedInAt: at(-1, 9),
+      promisedAt: at(7, 12),
+      bayId: null,
+      standsSince: at(-1, 9),
+      at: "level",
+      atState: "open",
+      tyre,
+      wheelbaseIn: 156,
     }),
     moth: await build({
-      nickname: "Moth", code: "7CXJ", kind: "buggy", customer: "Cold Creek Racing", bookedInAt: at(-1, 15),
-      promisedAt: at(3, 10), bayId: null, standsSince: at(-1, 15), template: "weld-repair", wanted: "Link bracket torn off.",
+      nickname: "Moth",
+      code: "7CXJ",
+      kind: "buggy",
+      customer: "Cold Creek Racing",
+      bookedInAt: at(-1, 15),
+      promisedAt: at(3, 10),
+      bayId: null,
+      standsSince: at(-1, 15),
+      template: "weld-repair",
+      wanted: "Link bracket torn off.",
     }),
     plow: await build({
-      nickname: "Little Plow", code: "R4YA", kind: "two-door-utility", customer: "D. Finch", bookedInAt: ago(90),
-      promisedAt: null, bayId: null, standsSince: ago(90), wanted: "Wants the front axle an inch ahead; asks for a price first.",
+      nickname: "Little Plow",
+      code: "R4YA",
+      kind: "two-door-utility",
+      customer: "D. Finch",
+      bookedInAt: ago(90),
+      promisedAt: null,
+      bayId: null,
+      standsSince: ago(90),
+      wanted: "Wants the front axle an inch ahead; asks for a price first.",
     }),
   };
   const made = (key: string) => {
@@ -173,13 +314,30 @@ export async function makeDemoShop(db: Db, password: string, now = new Date()): 
   };
 
   for (const [person, vehicle, minutes] of [
-    ["wes", "mule", 116], ["pilar", "mule", 50], ["bram", "hatchet", 160], ["cato", "hatchet", 160], ["june", "pelican", 72], ["mina", "biscuit", 130],
+    ["wes", "mule", 116],
+    ["pilar", "mule", 50],
+    ["bram", "hatchet", 160],
+    ["cato", "hatchet", 160],
+    ["june", "pelican", 72],
+    ["mina", "biscuit", 130],
   ] as const)
     await putOn(db, shopId, id(person), made(vehicle).buildId, ago(minutes));
 
-  const hold = (key: string, kind: "parts" | "customer" | "level-void", words: string, minutes: number, dueAt: Date | null = null) =>
+  const hold = (
+    key: string,
+    kind: "parts" | "customer" | "level-void",
+    words: string,
+    minutes: number,
+    dueAt: Date | null = null,
+  ) =>
     db.insert(schema.holds).values({
-      shopId, buildId: made(key).buildId, kind, words, dueAt, placedBy: id("ida"), placedAt: ago(minutes),
+      shopId,
+      buildId: made(key).buildId,
+      kind,
+      words,
+      dueAt,
+      placedBy: id("ida"),
+      placedAt: ago(minutes),
     });
   await hold("gravy", "parts", "4 U-bolts short", 300, at(1, 8));
   await hold("sunday", "customer", "Option sent, no answer yet", 142);

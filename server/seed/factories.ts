@@ -2,9 +2,9 @@ import { sql } from "drizzle-orm";
 import { hashPassword } from "../../app/auth/authenticator.server";
 import { type Db, schema } from "../../app/db/client.server";
 import { OPEN_END } from "../../app/db/schema";
-import type { BayKind, BayMouth } from "../../app/domain/floor/bays";
 import { BUILD_TEMPLATES, type BuildTemplateId, type StageKind } from "../../app/domain/builds/stages";
 import { VEHICLE_KIND, type VehicleKind } from "../../app/domain/builds/vehicle-kinds";
+import type { BayKind, BayMouth } from "../../app/domain/floor/bays";
 import type { Role, Skill } from "../../app/domain/people/roles";
 
 /*
@@ -23,7 +23,15 @@ const one = <T>(rows: T[]): T => {
 
 export async function makeShop(
   db: Db,
-  shop: { name?: string; isDemo?: boolean; timeZone?: string; unit?: "in" | "mm"; now?: Date; lengthFt?: number; widthFt?: number } = {},
+  shop: {
+    name?: string;
+    isDemo?: boolean;
+    timeZone?: string;
+    unit?: "in" | "mm";
+    now?: Date;
+    lengthFt?: number;
+    widthFt?: number;
+  } = {},
 ): Promise<number> {
   const now = shop.now ?? new Date();
   const { id } = one(
@@ -64,7 +72,8 @@ export async function makePerson(
     awayUntil?: Date;
   },
 ): Promise<number> {
-  const hash = person.passwordHash ?? (person.password === undefined ? null : await hashPassword(person.password));
+  const hash =
+    person.passwordHash ?? (person.password === undefined ? null : await hashPassword(person.password));
   const { id } = one(
     await db
       .insert(schema.people)
@@ -86,7 +95,9 @@ export async function makePerson(
       .$returningId(),
   );
   if (person.skills?.length)
-    await db.insert(schema.personSkills).values(person.skills.map((skill) => ({ shopId, personId: id, skill })));
+    await db
+      .insert(schema.personSkills)
+      .values(person.skills.map((skill) => ({ shopId, personId: id, skill })));
   return id;
 }
 
@@ -126,17 +137,35 @@ export async function makeBay(
       .$returningId(),
   );
   const marks = bay.marks ?? (kind === "level-pad" ? PAD_MARKS : {});
-  const rows = Object.entries(marks).map(([label, [x, y]]) => ({ shopId, bayId: id, label, xMm: x * IN, yMm: y * IN }));
+  const rows = Object.entries(marks).map(([label, [x, y]]) => ({
+    shopId,
+    bayId: id,
+    label,
+    xMm: x * IN,
+    yMm: y * IN,
+  }));
   if (rows.length > 0) await db.insert(schema.controlMarks).values(rows);
   return id;
 }
 /** Four marks: A and B on the centre line ten feet apart, C and D four feet to the right of them. */
-export const PAD_MARKS: Record<string, [number, number]> = { A: [0, 0], B: [120, 0], C: [120, -48], D: [0, -48] };
+export const PAD_MARKS: Record<string, [number, number]> = {
+  A: [0, 0],
+  B: [120, 0],
+  C: [120, -48],
+  D: [0, -48],
+};
 
 export async function makeSpring(
   db: Db,
   shopId: number,
-  spring: { rackNumber: number; lengthIn: number; frontHalfIn: number; leaves?: number; widthIn?: number; note?: string },
+  spring: {
+    rackNumber: number;
+    lengthIn: number;
+    frontHalfIn: number;
+    leaves?: number;
+    widthIn?: number;
+    note?: string;
+  },
 ): Promise<number> {
   const { id } = one(
     await db
@@ -180,7 +209,12 @@ export async function makeHanger(
   return { hangerId: id, holes };
 }
 
-export type MadeBuild = { buildId: number; vehicleId: number; placementId: number; stages: Map<StageKind, number> };
+export type MadeBuild = {
+  buildId: number;
+  vehicleId: number;
+  placementId: number;
+  stages: Map<StageKind, number>;
+};
 
 export async function makeBuild(
   db: Db,
@@ -312,7 +346,13 @@ export async function makeBuild(
   return { buildId, vehicleId, placementId, stages };
 }
 
-export async function putOn(db: Db, shopId: number, personId: number, buildId: number, fromAt: Date): Promise<void> {
+export async function putOn(
+  db: Db,
+  shopId: number,
+  personId: number,
+  buildId: number,
+  fromAt: Date,
+): Promise<void> {
   await db.insert(schema.spells).values({ shopId, personId, buildId, fromAt, untilAt: OPEN_END });
 }
 

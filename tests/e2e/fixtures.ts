@@ -1,4 +1,4 @@
-import { type Browser, type BrowserContext, expect, type Page, test as base } from "@playwright/test";
+import { type Browser, type BrowserContext, test as base, expect, type Page } from "@playwright/test";
 import { createCookie } from "react-router";
 import { makeTestShop, type TestPerson, type TestShop } from "#tests/factories";
 import { startSession } from "~/auth/sessions.server";
@@ -54,7 +54,13 @@ export const test = base.extend<Fixtures & { faults: string[] }>({
         const [anybody] = await db.select({ id: schema.people.id }).from(schema.people).limit(1);
         const [device] = await db
           .insert(schema.devices)
-          .values({ shopId: who.shopId, kind: "wall", name: who.name, pairedBy: anybody?.id ?? 0, pairedAt: new Date() })
+          .values({
+            shopId: who.shopId,
+            kind: "wall",
+            name: who.name,
+            pairedBy: anybody?.id ?? 0,
+            pairedAt: new Date(),
+          })
           .$returningId();
         deviceId = device?.id ?? null;
       }
@@ -66,7 +72,13 @@ export const test = base.extend<Fixtures & { faults: string[] }>({
       const cookie = createCookie("plumbay_session", { secrets: [need("SESSION_SECRET")] });
       const [pair] = (await cookie.serialize(secret)).split(";");
       const [name, value] = (pair ?? "").split("=", 2);
-      await context.addCookies([{ name: name ?? "", value: (pair ?? "").slice((name ?? "").length + 1) || (value ?? ""), url: baseURL ?? "" }]);
+      await context.addCookies([
+        {
+          name: name ?? "",
+          value: (pair ?? "").slice((name ?? "").length + 1) || (value ?? ""),
+          url: baseURL ?? "",
+        },
+      ]);
     });
   },
   as: async ({ browser, signIn, faults, baseURL }, use) => {

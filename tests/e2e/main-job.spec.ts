@@ -23,7 +23,8 @@ const AS_FOUND = ["24 1/16", "24 5/16", "23 13/16", "24 3/16"];
 const RAISED = ["24 3/8", "24 5/16", "24 5/16", "24 3/8"];
 
 async function typeHeights(page: Page, heights: string[]) {
-  for (const [i, stand] of STANDS.entries()) await page.getByLabel(`${stand} stand height`).fill(heights[i] ?? "");
+  for (const [i, stand] of STANDS.entries())
+    await page.getByLabel(`${stand} stand height`).fill(heights[i] ?? "");
 }
 
 /** Drops the point in hand by offset, as typed on the tape. */
@@ -33,21 +34,30 @@ async function dropPoint(page: Page, title: string, entries: Record<string, stri
   const way = hand.getByRole("button", { name: /^Along and off/ });
   // A point on the centre has only one way.
   if ((await way.count()) > 0 && (await way.getAttribute("aria-pressed")) !== "true") await way.click();
-  for (const [label, value] of Object.entries(entries)) await hand.getByLabel(label, { exact: true }).fill(value);
+  for (const [label, value] of Object.entries(entries))
+    await hand.getByLabel(label, { exact: true }).fill(value);
   await hand.getByRole("button", { name: /^Keep this drop/ }).click();
   await expect(hand.getByRole("heading", { name: title })).toBeHidden();
 }
 
 const frame = (() => {
   const at = (x: number, y: number) => floorPoint(inches(x), inches(y));
-  const made = frameFromDatums({ frontLeft: at(100, 16), frontRight: at(100, -16.25), rearLeft: at(20, 16.25), rearRight: at(20, -16) });
+  const made = frameFromDatums({
+    frontLeft: at(100, 16),
+    frontRight: at(100, -16.25),
+    rearLeft: at(20, 16.25),
+    rearRight: at(20, -16),
+  });
   if (!made.ok) throw new Error(made.problem);
   return made.value;
 })();
 /** A place on the frame as floor entries, in decimal inches. */
 function entriesAt(station: number, offset: number) {
   const p = toFloor(frame, framePoint(inches(station), inches(offset)));
-  return { "Ahead of A": formatDecimalInches(p.x, 4), "Off the line": formatDecimalInches(mm(Math.abs(p.y)), 4) };
+  return {
+    "Ahead of A": formatDecimalInches(p.x, 4),
+    "Off the line": formatDecimalInches(mm(Math.abs(p.y)), 4),
+  };
 }
 
 async function drag(page: Page, what: Locator, to: Locator) {
@@ -60,7 +70,13 @@ async function drag(page: Page, what: Locator, to: Locator) {
   await page.mouse.up();
 }
 
-test("from booking in to the layout sheet, with the wall showing each change", async ({ as, shop, signIn, faults, baseURL }, info) => {
+test("from booking in to the layout sheet, with the wall showing each change", async ({
+  as,
+  shop,
+  signIn,
+  faults,
+  baseURL,
+}, info) => {
   test.setTimeout(180_000);
 
   // The counter books a vehicle in and prints its tag.
@@ -92,10 +108,18 @@ test("from booking in to the layout sheet, with the wall showing each change", a
   // The foreman drags it from the yard into Bay 1 and puts Tess on it.
   const foreman = await as(shop.people.foreman, { viewport: { width: 1440, height: 900 } });
   await foreman.goto("/floor");
-  await drag(foreman, foreman.getByRole("button", { name: /^Old Mule, \w+, Yard/ }), foreman.getByRole("region", { name: /^Bay 1\b/ }));
+  await drag(
+    foreman,
+    foreman.getByRole("button", { name: /^Old Mule, \w+, Yard/ }),
+    foreman.getByRole("region", { name: /^Bay 1\b/ }),
+  );
   await expect(foreman.getByRole("button", { name: /^Old Mule, \w+, Bay 1/ })).toBeVisible();
   await expect(onWall).toContainText("Old Mule");
-  await drag(foreman, foreman.getByRole("button", { name: /^Tess Tech, free/ }), foreman.getByRole("region", { name: /^Bay 1\b/ }));
+  await drag(
+    foreman,
+    foreman.getByRole("button", { name: /^Tess Tech, free/ }),
+    foreman.getByRole("region", { name: /^Bay 1\b/ }),
+  );
   await expect(onWall.getByRole("img", { name: "Tess Tech" })).toBeVisible();
   await foreman.getByRole("button", { name: /^Old Mule, \w+, Bay 1/ }).click();
   await foreman.getByRole("button", { name: "Start layout" }).click();
@@ -115,7 +139,12 @@ test("from booking in to the layout sheet, with the wall showing each change", a
       `--use-file-for-fake-video-capture=${film}`,
     ],
   });
-  const context = await tablet.newContext({ baseURL, viewport: { width: 768, height: 1024 }, hasTouch: true, permissions: ["camera"] });
+  const context = await tablet.newContext({
+    baseURL,
+    viewport: { width: 768, height: 1024 },
+    hasTouch: true,
+    permissions: ["camera"],
+  });
   await signIn(context, shop.people.tech);
   const tech = await context.newPage();
   watchConsole(tech, faults);
@@ -153,21 +182,33 @@ test("from booking in to the layout sheet, with the wall showing each change", a
   await expect(tech.getByRole("link", { name: "Go to Drops" })).toBeVisible();
   await tech.goto(`${layout}/step/drops`);
   await dropPoint(tech, "Opening, front edge, left", { "Ahead of A": "82 3/8", "Off the line": "30 1/4" });
-  await dropPoint(tech, "Opening, front edge, right", { "Ahead of A": "6' 10 1/8\"", "Off the line": "30 3/8" });
+  await dropPoint(tech, "Opening, front edge, right", {
+    "Ahead of A": "6' 10 1/8\"",
+    "Off the line": "30 3/8",
+  });
   await dropPoint(tech, "Opening, rear edge, left", { "Ahead of A": "46 5/8", "Off the line": "30-1/8" });
   await dropPoint(tech, "Opening, rear edge, right", { "Ahead of A": "46.5", "Off the line": "30 3/16" });
   await dropPoint(tech, "Frame datum, front, left", { "Ahead of A": "100", "Off the line": "16" });
-  await dropPoint(tech, "Frame datum, front, right", { "Ahead of A": "2540 mm", "Off the line": "412.75 mm" });
+  await dropPoint(tech, "Frame datum, front, right", {
+    "Ahead of A": "2540 mm",
+    "Off the line": "412.75 mm",
+  });
   await dropPoint(tech, "Frame datum, rear, left", { "Ahead of A": "20", "Off the line": "16 1/4" });
   await dropPoint(tech, "Frame datum, rear, right", { "Ahead of A": "20", "Off the line": "16" });
   await expect(onWall).toContainText("8 drops");
-  const cell = (row: string, side: "left" | "right") => tech.getByRole("region", { name: "Drops", exact: true }).getByRole("button", { name: new RegExp(`${row}.*${side}`, "i") });
+  const cell = (row: string, side: "left" | "right") =>
+    tech
+      .getByRole("region", { name: "Drops", exact: true })
+      .getByRole("button", { name: new RegExp(`${row}.*${side}`, "i") });
   await cell("Hanger hole 1", "left").click();
   await dropPoint(tech, "Hanger hole 1, left", entriesAt(70.5, 15.5));
   await cell("Hanger hole 1", "right").click();
   await dropPoint(tech, "Hanger hole 1, right", entriesAt(70.5, -15.5));
   const low = toFloor(frame, framePoint(inches(76), inches(0)));
-  await tech.getByRole("region", { name: "Drops", exact: true }).getByRole("button", { name: /Lowest point in front/i }).click();
+  await tech
+    .getByRole("region", { name: "Drops", exact: true })
+    .getByRole("button", { name: /Lowest point in front/i })
+    .click();
   await dropPoint(tech, "Lowest point in front", {
     "Ahead of A": formatDecimalInches(low.x, 4),
     "Off the line": formatDecimalInches(low.y, 4).replace("−", "-"),
@@ -186,7 +227,9 @@ test("from booking in to the layout sheet, with the wall showing each change", a
     ["46.50", "43.92°"],
     ["48.50", "47.35°"],
   ] as const)
-    await expect(tech.getByRole("row").filter({ hasText: station }).filter({ hasText: approach }).first()).toBeVisible();
+    await expect(
+      tech.getByRole("row").filter({ hasText: station }).filter({ hasText: approach }).first(),
+    ).toBeVisible();
   await expect(tech.getByText("Approach 38.40°, asked at least 40°.")).toBeVisible();
   await tech.getByRole("button", { name: /^Hole 1, axle line 46\.50/ }).click();
   await tech.getByRole("button", { name: "Put in hand: 46.50, hole 1" }).click();
@@ -213,6 +256,10 @@ test("from booking in to the layout sheet, with the wall showing each change", a
   await foreman.getByRole("button", { name: "Move and void" }).click();
   await expect(onWall).toContainText("Empty");
   await tech.goto(`${layout}/step/approval`);
-  await expect(tech.getByText(/The level is void: rolled out to the yard\. Level again, then drop one old point again\./).first()).toBeVisible();
+  await expect(
+    tech
+      .getByText(/The level is void: rolled out to the yard\. Level again, then drop one old point again\./)
+      .first(),
+  ).toBeVisible();
   await tablet.close();
 });

@@ -3,11 +3,23 @@ import { hashPassword } from "~/auth/authenticator.server";
 import type { Db } from "~/db/client.server";
 import type { ActorRole } from "~/domain/people/roles";
 import type { Context } from "~/services/change.server";
-import { makeBay, makeHanger, makePerson, makeShop as makeEmptyShop, makeSpring } from "../../server/seed/factories";
+import {
+  makeBay,
+  makeShop as makeEmptyShop,
+  makeHanger,
+  makePerson,
+  makeSpring,
+} from "../../server/seed/factories";
 
 export * from "../../server/seed/factories";
 
-export type TestPerson = { personId: number | null; shopId: number; role: ActorRole; name: string; email: string };
+export type TestPerson = {
+  personId: number | null;
+  shopId: number;
+  role: ActorRole;
+  name: string;
+  email: string;
+};
 
 export type TestShop = {
   shopId: number;
@@ -24,9 +36,16 @@ export type TestShop = {
 let serial = 0;
 
 /** A shop with people in every role, five bays, two springs and a three-hole hanger. */
-export async function makeTestShop(db: Db, options: { password?: string; timeZone?: string; unit?: "in" | "mm" } = {}): Promise<TestShop> {
+export async function makeTestShop(
+  db: Db,
+  options: { password?: string; timeZone?: string; unit?: "in" | "mm" } = {},
+): Promise<TestShop> {
   const mark = `${process.pid}-${Date.now().toString(36)}-${++serial}`;
-  const shopId = await makeEmptyShop(db, { name: `Test shop ${mark}`, timeZone: options.timeZone ?? "Etc/UTC", unit: options.unit });
+  const shopId = await makeEmptyShop(db, {
+    name: `Test shop ${mark}`,
+    timeZone: options.timeZone ?? "Etc/UTC",
+    unit: options.unit,
+  });
   const passwordHash = options.password === undefined ? undefined : await hashPassword(options.password);
   const person = async (
     name: string,
@@ -50,8 +69,24 @@ export async function makeTestShop(db: Db, options: { password?: string; timeZon
     1: await makeBay(db, shopId, { number: 1, kind: "level-pad", yFt: 0.5, lengthFt: 28, widthFt: 14 }),
     2: await makeBay(db, shopId, { number: 2, kind: "level-pad", yFt: 15, lengthFt: 28, widthFt: 14 }),
     3: await makeBay(db, shopId, { number: 3, yFt: 30, lengthFt: 12, widthFt: 12 }),
-    4: await makeBay(db, shopId, { number: 4, kind: "lift", xFt: 60, yFt: 0.5, lengthFt: 24, widthFt: 12, mouth: "west" }),
-    5: await makeBay(db, shopId, { number: 5, kind: "weld", xFt: 60, yFt: 15, lengthFt: 28, widthFt: 14, mouth: "west" }),
+    4: await makeBay(db, shopId, {
+      number: 4,
+      kind: "lift",
+      xFt: 60,
+      yFt: 0.5,
+      lengthFt: 24,
+      widthFt: 12,
+      mouth: "west",
+    }),
+    5: await makeBay(db, shopId, {
+      number: 5,
+      kind: "weld",
+      xFt: 60,
+      yFt: 15,
+      lengthFt: 28,
+      widthFt: 14,
+      mouth: "west",
+    }),
   };
   return {
     shopId,

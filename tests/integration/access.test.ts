@@ -32,11 +32,21 @@ const cookies: Partial<Record<Who, string>> = {};
 beforeAll(async () => {
   const db = await testDatabase();
   shop = await makeTestShop(db);
-  const build = await makeBuild(db, shop.shopId, { nickname: "Walked", code: "WXK3", by: shop.people.foreman.personId ?? 0 });
+  const build = await makeBuild(db, shop.shopId, {
+    nickname: "Walked",
+    code: "WXK3",
+    by: shop.people.foreman.personId ?? 0,
+  });
   ids = { buildId: String(build.buildId), layoutId: "999999", code: "WXK3", step: "level" };
   const [device] = await db
     .insert(schema.devices)
-    .values({ shopId: shop.shopId, kind: "wall", name: "Wall", pairedBy: shop.people.foreman.personId ?? 0, pairedAt: new Date() })
+    .values({
+      shopId: shop.shopId,
+      kind: "wall",
+      name: "Wall",
+      pairedBy: shop.people.foreman.personId ?? 0,
+      pairedAt: new Date(),
+    })
     .$returningId();
   cookies.owner = await cookieFor(db, shop.people.owner);
   cookies.foreman = await cookieFor(db, shop.people.foreman);
@@ -54,7 +64,9 @@ const ask = (method: string, path: string, who: Who) =>
     headers: {
       accept: "text/html",
       ...(cookies[who] ? { cookie: cookies[who] } : {}),
-      ...(method === "POST" ? { origin: server.origin, "content-type": "application/x-www-form-urlencoded" } : {}),
+      ...(method === "POST"
+        ? { origin: server.origin, "content-type": "application/x-www-form-urlencoded" }
+        : {}),
     },
     body: method === "POST" ? "" : undefined,
   });
@@ -72,7 +84,12 @@ function verdict(need: Need | undefined, who: Who): "none" | "sign-in" | "forbid
 
 const cells = ACCESS.flatMap((row) =>
   (["GET", "POST"] as const).flatMap((method) =>
-    ([...ACTOR_ROLES, "nobody"] as Who[]).map((who) => ({ row, method, who, want: verdict(row[method], who) })),
+    ([...ACTOR_ROLES, "nobody"] as Who[]).map((who) => ({
+      row,
+      method,
+      who,
+      want: verdict(row[method], who),
+    })),
   ),
 ).filter(
   // Signing out ends the session that the other cells need; it has its own test.
@@ -81,7 +98,9 @@ const cells = ACCESS.flatMap((row) =>
 
 describe("every route × method × role", () => {
   it.each(cells)("$method $row.path as $who: $want", async ({ row, method, who, want }) => {
-    const path = row.path.replace(/:(\w+)/g, (_, name: string) => ids[name] ?? "1").replace("*", "no/such/page");
+    const path = row.path
+      .replace(/:(\w+)/g, (_, name: string) => ids[name] ?? "1")
+      .replace("*", "no/such/page");
     const response = await ask(method, path, who);
     await response.arrayBuffer();
     expect(response.status).toBeLessThan(500);
@@ -111,7 +130,11 @@ describe("requests from elsewhere", () => {
     fetch(`${server.origin}${path}`, {
       method: "POST",
       redirect: "manual",
-      headers: { cookie: cookies.foreman ?? "", "content-type": "application/x-www-form-urlencoded", ...headers },
+      headers: {
+        cookie: cookies.foreman ?? "",
+        "content-type": "application/x-www-form-urlencoded",
+        ...headers,
+      },
       body: "",
     });
 
@@ -126,7 +149,10 @@ describe("requests from elsewhere", () => {
   );
 
   it.each(["PUT", "PATCH", "DELETE"])("%s is guarded too", async (method) => {
-    const response = await fetch(`${server.origin}/floor`, { method, headers: { cookie: cookies.foreman ?? "" } });
+    const response = await fetch(`${server.origin}/floor`, {
+      method,
+      headers: { cookie: cookies.foreman ?? "" },
+    });
     expect(response.status).toBe(403);
   });
 

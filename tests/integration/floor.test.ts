@@ -1,6 +1,14 @@
 import { and, eq } from "drizzle-orm";
 import { beforeEach, describe, expect, it } from "vitest";
-import { contextFor, makeBuild, type MadeBuild, makeTestShop, putOn, type TestPerson, type TestShop } from "#tests/factories";
+import {
+  contextFor,
+  type MadeBuild,
+  makeBuild,
+  makeTestShop,
+  putOn,
+  type TestPerson,
+  type TestShop,
+} from "#tests/factories";
 import { testDatabase } from "#tests/setup/database";
 import { type Db, schema } from "~/db/client.server";
 import { readBoard } from "~/db/queries/board.server";
@@ -24,13 +32,19 @@ const build = (over: Partial<Parameters<typeof makeBuild>[2]> = {}) =>
 const as = (person: TestPerson) => contextFor(db, person);
 const standing = async (buildId: number) => {
   const board = await readBoard(db, shop.shopId, new Date());
-  for (const card of board.bays) if (card.vehicle?.buildId === buildId) return { bay: card.bay.number, vehicle: card.vehicle };
+  for (const card of board.bays)
+    if (card.vehicle?.buildId === buildId) return { bay: card.bay.number, vehicle: card.vehicle };
   const inYard = board.yard.find((vehicle) => vehicle.buildId === buildId);
   if (!inYard) throw new Error("It stands nowhere");
   return { bay: null, vehicle: inYard };
 };
 const move = async (who: TestPerson, buildId: number, toBayId: number | null, confirmed = false) =>
-  moveVehicle(as(who), { buildId, placementId: (await standing(buildId)).vehicle.placementId, toBayId, confirmed });
+  moveVehicle(as(who), {
+    buildId,
+    placementId: (await standing(buildId)).vehicle.placementId,
+    toBayId,
+    confirmed,
+  });
 /** Rows straight into the tables: a level that stands, with so many drops. */
 async function level(buildId: number, bayId: number, drops: number) {
   const by = shop.people.tech.personId ?? 0;
@@ -38,12 +52,32 @@ async function level(buildId: number, bayId: number, drops: number) {
   const base = { shopId: shop.shopId };
   const [layout] = await db
     .insert(schema.layouts)
-    .values({ ...base, buildId, kind: "front-leaf", fixedEye: "ahead", bayId, hangerId: shop.hangerId, startedBy: by, startedAt: at })
+    .values({
+      ...base,
+      buildId,
+      kind: "front-leaf",
+      fixedEye: "ahead",
+      bayId,
+      hangerId: shop.hangerId,
+      startedBy: by,
+      startedAt: at,
+    })
     .$returningId();
   const layoutId = layout?.id ?? 0;
   const [check] = await db
     .insert(schema.levelChecks)
-    .values({ ...base, layoutId, bayId, method: "heights", noseHighDeg: 0.02, rightHighDeg: 0, allowedDeg: 0.1, isTrue: true, madeBy: by, madeAt: at })
+    .values({
+      ...base,
+      layoutId,
+      bayId,
+      method: "heights",
+      noseHighDeg: 0.02,
+      rightHighDeg: 0,
+      allowedDeg: 0.1,
+      isTrue: true,
+      madeBy: by,
+      madeAt: at,
+    })
     .$returningId();
   for (let i = 0; i < drops; i++) {
     const [drop] = await db
@@ -73,17 +107,21 @@ beforeEach(async () => {
 
 describe("moving a vehicle", () => {
   it("puts it in the bay and tells who moved it", async () => {
-    expect(await move(shop.people.foreman, mule.buildId, shop.bays[1])).toEqual({ words: "Old Mule to Bay 1", voided: false });
+    expect(await move(shop.people.foreman, mule.buildId, shop.bays[1])).toEqual({
+      words: "Old Mule to Bay 1",
+      voided: false,
+    });
     expect(await standing(mule.buildId)).toMatchObject({ bay: 1, vehicle: { movedBy: "Fay Foreman" } });
   });
-  it.each([
-    ["a bay that is too short", 3 as const, /^Bay 3 is 12 ft: vehicle is 19 ft 2 in\./],
-  ])("refuses %s", async (_, bay, words) => {
-    await expect(move(shop.people.foreman, mule.buildId, shop.bays[bay], true)).rejects.toMatchObject({
-      kind: "conflict",
-      message: expect.stringMatching(words),
-    });
-  });
+  it.each([["a bay that is too short", 3 as const, /^Bay 3 is 12 ft: vehicle is 19 ft 2 in\./]])(
+    "refuses %s",
+    async (_, bay, words) => {
+      await expect(move(shop.people.foreman, mule.buildId, shop.bays[bay], true)).rejects.toMatchObject({
+        kind: "conflict",
+        message: expect.stringMatching(words),
+      });
+    },
+  );
   it("refuses a taken bay", async () => {
     await build({ nickname: "Sunday", kind: "open-top", bayId: shop.bays[1] });
     await expect(move(shop.people.foreman, mule.buildId, shop.bays[1], true)).rejects.toMatchObject({
@@ -110,11 +148,17 @@ describe("moving a vehicle", () => {
     });
     expect((await standing(mule.buildId)).vehicle.level.state).toBe("true");
     expect(await move(shop.people.foreman, mule.buildId, null, true)).toMatchObject({ voided: true });
-    expect((await standing(mule.buildId)).vehicle.level).toMatchObject({ state: "void", reason: "rolled out to the yard", drops: 6 });
+    expect((await standing(mule.buildId)).vehicle.level).toMatchObject({
+      state: "void",
+      reason: "rolled out to the yard",
+      drops: 6,
+    });
     const [check] = await db.select().from(schema.levelChecks).where(eq(schema.levelChecks.id, levelCheckId));
     expect(check).toMatchObject({ voidedBy: shop.people.foreman.personId });
     // The readings stay in the record as they were.
-    expect(await db.select().from(schema.dropReadings).where(eq(schema.dropReadings.levelCheckId, levelCheckId))).toHaveLength(6);
+    expect(
+      await db.select().from(schema.dropReadings).where(eq(schema.dropReadings.levelCheckId, levelCheckId)),
+    ).toHaveLength(6);
   });
   it("lets its crew go when it leaves for the yard, and keeps them from bay to bay", async () => {
     await move(shop.people.foreman, mule.buildId, shop.bays[1]);
@@ -125,14 +169,23 @@ describe("moving a vehicle", () => {
     expect((await standing(mule.buildId)).vehicle.crew).toEqual([]);
   });
   it.each(["tech", "counter"] as const)("is not for a %s", async (role) => {
-    await expect(move(shop.people[role], mule.buildId, shop.bays[1])).rejects.toMatchObject({ kind: "forbidden" });
+    await expect(move(shop.people[role], mule.buildId, shop.bays[1])).rejects.toMatchObject({
+      kind: "forbidden",
+    });
   });
   it("does not reach into another shop", async () => {
     const other = await makeTestShop(db);
     await expect(
-      moveVehicle(as(other.people.foreman), { buildId: mule.buildId, placementId: mule.placementId, toBayId: other.bays[1], confirmed: true }),
+      moveVehicle(as(other.people.foreman), {
+        buildId: mule.buildId,
+        placementId: mule.placementId,
+        toBayId: other.bays[1],
+        confirmed: true,
+      }),
     ).rejects.toMatchObject({ kind: "not-found" });
-    await expect(move(shop.people.foreman, mule.buildId, other.bays[1], true)).rejects.toMatchObject({ kind: "not-found" });
+    await expect(move(shop.people.foreman, mule.buildId, other.bays[1], true)).rejects.toMatchObject({
+      kind: "not-found",
+    });
   });
 });
 
@@ -167,11 +220,17 @@ describe("assigning a person", () => {
   });
   it("refuses somebody without the weld skill on a weld, even when told to", async () => {
     const weld = await build({ nickname: "Hatchet", kind: "bare-chassis", bayId: shop.bays[5], at: "weld" });
-    await expect(assign(shop.people.foreman, shop.people.tech, weld.buildId, true)).rejects.toMatchObject({ kind: "conflict" });
+    await expect(assign(shop.people.foreman, shop.people.tech, weld.buildId, true)).rejects.toMatchObject({
+      kind: "conflict",
+    });
     await assign(shop.people.foreman, shop.people.welder, weld.buildId);
   });
   it("puts one person in one place, however many foremen try at once", async () => {
-    const others = [mule, await build({ nickname: "B", kind: "open-top", bayId: shop.bays[4] }), await build({ nickname: "C", bayId: shop.bays[5] })];
+    const others = [
+      mule,
+      await build({ nickname: "B", kind: "open-top", bayId: shop.bays[4] }),
+      await build({ nickname: "C", bayId: shop.bays[5] }),
+    ];
     await Promise.allSettled(
       others.flatMap((target) => [
         assign(shop.people.foreman, shop.people.tech, target.buildId, true),
@@ -179,23 +238,33 @@ describe("assigning a person", () => {
       ]),
     );
     const board = await readBoard(db, shop.shopId, new Date());
-    expect(board.bays.flatMap((card) => card.vehicle?.crew ?? []).filter((c) => c.name === "Tess Tech")).toHaveLength(1);
+    expect(
+      board.bays.flatMap((card) => card.vehicle?.crew ?? []).filter((c) => c.name === "Tess Tech"),
+    ).toHaveLength(1);
   });
 });
 
 describe("undo", () => {
   it("takes back one's own last change, one after the other", async () => {
     await move(shop.people.foreman, mule.buildId, shop.bays[1]);
-    await assignPerson(as(shop.people.foreman), { personId: shop.people.tech.personId ?? 0, toBuildId: mule.buildId, confirmed: true });
+    await assignPerson(as(shop.people.foreman), {
+      personId: shop.people.tech.personId ?? 0,
+      toBuildId: mule.buildId,
+      confirmed: true,
+    });
     expect(await undoFloor(as(shop.people.foreman))).toEqual({ words: "Undone: Tess Tech to Bay 1." });
     expect((await standing(mule.buildId)).vehicle.crew).toEqual([]);
     expect(await undoFloor(as(shop.people.foreman))).toEqual({ words: "Old Mule is back in the yard." });
     expect((await standing(mule.buildId)).bay).toBeNull();
-    await expect(undoFloor(as(shop.people.foreman))).rejects.toMatchObject({ message: "You have nothing to undo." });
+    await expect(undoFloor(as(shop.people.foreman))).rejects.toMatchObject({
+      message: "You have nothing to undo.",
+    });
   });
   it("leaves other people's changes alone", async () => {
     await move(shop.people.foreman, mule.buildId, shop.bays[1]);
-    await expect(undoFloor(as(shop.people.foreman2))).rejects.toMatchObject({ message: "You have nothing to undo." });
+    await expect(undoFloor(as(shop.people.foreman2))).rejects.toMatchObject({
+      message: "You have nothing to undo.",
+    });
   });
   it("refuses when somebody built on it, in words", async () => {
     await move(shop.people.foreman, mule.buildId, shop.bays[1]);
@@ -217,7 +286,9 @@ describe("undo", () => {
   it("does not undo a move when the vehicle was levelled since", async () => {
     await move(shop.people.foreman, mule.buildId, shop.bays[1]);
     await level(mule.buildId, shop.bays[1], 0);
-    await expect(undoFloor(as(shop.people.foreman))).rejects.toMatchObject({ message: expect.stringContaining("was levelled since") });
+    await expect(undoFloor(as(shop.people.foreman))).rejects.toMatchObject({
+      message: expect.stringContaining("was levelled since"),
+    });
   });
 });
 
@@ -226,16 +297,27 @@ describe("holds", () => {
     const place = { kind: "parts", words: "4 U-bolts short", dueAt: null } as const;
     await holdBuild(as(shop.people.tech), { buildId: mule.buildId, place });
     expect((await standing(mule.buildId)).vehicle.hold).toMatchObject({ words: "4 U-bolts short" });
-    await expect(holdBuild(as(shop.people.tech), { buildId: mule.buildId, place })).rejects.toMatchObject({ kind: "conflict" });
+    await expect(holdBuild(as(shop.people.tech), { buildId: mule.buildId, place })).rejects.toMatchObject({
+      kind: "conflict",
+    });
     await holdBuild(as(shop.people.foreman), { buildId: mule.buildId, place: null });
-    await expect(holdBuild(as(shop.people.foreman), { buildId: mule.buildId, place: null })).rejects.toMatchObject({ kind: "conflict" });
+    await expect(
+      holdBuild(as(shop.people.foreman), { buildId: mule.buildId, place: null }),
+    ).rejects.toMatchObject({ kind: "conflict" });
   });
   it("are journalled with who and what", async () => {
-    await holdBuild(as(shop.people.tech), { buildId: mule.buildId, place: { kind: "safety", words: "Stand cracked", dueAt: null } });
+    await holdBuild(as(shop.people.tech), {
+      buildId: mule.buildId,
+      place: { kind: "safety", words: "Stand cracked", dueAt: null },
+    });
     const [row] = await db
       .select()
       .from(schema.journal)
       .where(and(eq(schema.journal.shopId, shop.shopId), eq(schema.journal.verb, "place-hold")));
-    expect(row).toMatchObject({ personId: shop.people.tech.personId, before: null, after: { words: "Stand cracked" } });
+    expect(row).toMatchObject({
+      personId: shop.people.tech.personId,
+      before: null,
+      after: { words: "Stand cracked" },
+    });
   });
 });

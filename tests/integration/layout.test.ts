@@ -50,24 +50,64 @@ const RAISED = ["24 3/8", "24 5/16", "24 5/16", "24 3/8"];
 const level = (heights: string[], who = tech()) =>
   checkLevel(who, layoutId, {
     method: "heights",
-    stands: PLACES.map(([place, x, y], i) => ({ place, x: length(x), y: length(y), height: length(heights[i] ?? "") })),
+    stands: PLACES.map(([place, x, y], i) => ({
+      place,
+      x: length(x),
+      y: length(y),
+      height: length(heights[i] ?? ""),
+    })),
   });
 
 const key = () => crypto.randomUUID();
-const offset = (point: DropPointId, side: DropSide, station: string, off: string, over: Partial<DropEntry> = {}) =>
-  ({ point, side, method: "offset", station: length(station), offset: length(off), height: null, reason: null, clientKey: key(), ...over }) as DropEntry;
+const offset = (
+  point: DropPointId,
+  side: DropSide,
+  station: string,
+  off: string,
+  over: Partial<DropEntry> = {},
+) =>
+  ({
+    point,
+    side,
+    method: "offset",
+    station: length(station),
+    offset: length(off),
+    height: null,
+    reason: null,
+    clientKey: key(),
+    ...over,
+  }) as DropEntry;
 const drop = (...args: Parameters<typeof offset>) => keepDrop(tech(), layoutId, offset(...args));
 
 const frame = (() => {
   const at = (x: number, y: number) => floorPoint(inches(x), inches(y));
-  const made = frameFromDatums({ frontLeft: at(100, 16), frontRight: at(100, -16.25), rearLeft: at(20, 16.25), rearRight: at(20, -16) });
+  const made = frameFromDatums({
+    frontLeft: at(100, 16),
+    frontRight: at(100, -16.25),
+    rearLeft: at(20, 16.25),
+    rearRight: at(20, -16),
+  });
   if (!made.ok) throw new Error(made.problem);
   return made.value;
 })();
 /** A point at a station of the frame, typed in decimal inches fine enough for four places. */
-const onFrame = (point: DropPointId, side: DropSide, station: number, off: number, over: Partial<DropEntry> = {}) => {
+const onFrame = (
+  point: DropPointId,
+  side: DropSide,
+  station: number,
+  off: number,
+  over: Partial<DropEntry> = {},
+) => {
   const p = toFloor(frame, framePoint(inches(station), inches(off)));
-  return offset(point, side, formatDecimalInches(p.x, 6), side === "centre" ? formatDecimalInches(p.y, 6).replace("−", "-") : formatDecimalInches(mm(Math.abs(p.y)), 6), over);
+  return offset(
+    point,
+    side,
+    formatDecimalInches(p.x, 6),
+    side === "centre"
+      ? formatDecimalInches(p.y, 6).replace("−", "-")
+      : formatDecimalInches(mm(Math.abs(p.y)), 6),
+    over,
+  );
 };
 
 async function toMarks() {
@@ -88,11 +128,13 @@ async function dropNeeded() {
 async function toOptions() {
   await toMarks();
   await dropNeeded();
-  for (const side of ["left", "right"] as const) await keepDrop(tech(), layoutId, onFrame("hanger-hole", side, 70.5, side === "left" ? 15.5 : -15.5));
+  for (const side of ["left", "right"] as const)
+    await keepDrop(tech(), layoutId, onFrame("hanger-hole", side, 70.5, side === "left" ? 15.5 : -15.5));
   await keepDrop(tech(), layoutId, onFrame("low-front", "centre", 76, 0, { height: length("22") }));
   await chooseAxleLine(tech(), layoutId, { method: "square", asked: null });
 }
-const optionOf = (spring: "centred" | "pinAhead", hole: 1 | 2 | 3) => optionKey(shop.springs[spring], false, shop.holes[hole - 1] ?? 0);
+const optionOf = (spring: "centred" | "pinAhead", hole: 1 | 2 | 3) =>
+  optionKey(shop.springs[spring], false, shop.holes[hole - 1] ?? 0);
 
 beforeEach(async () => {
   db = await testDatabase();
@@ -114,8 +156,15 @@ beforeEach(async () => {
 describe("the measured case, through the shop's own services", () => {
   it("goes from stands to a signed sheet, with the figures worked out beforehand", async () => {
     await acknowledgeStands(tech(), layoutId);
-    expect(await level(AS_FOUND)).toMatchObject({ isTrue: false, headline: "Right side high 0.60°, nose high 0.10°." });
-    expect((await view()).level).toMatchObject({ state: "not-true", noseHighDeg: expect.closeTo(0.0977, 4), rightHighDeg: expect.closeTo(0.5968, 4) });
+    expect(await level(AS_FOUND)).toMatchObject({
+      isTrue: false,
+      headline: "Right side high 0.60°, nose high 0.10°.",
+    });
+    expect((await view()).level).toMatchObject({
+      state: "not-true",
+      noseHighDeg: expect.closeTo(0.0977, 4),
+      rightHighDeg: expect.closeTo(0.5968, 4),
+    });
     expect(await level(RAISED)).toMatchObject({ isTrue: true });
     await confirmMarks(tech(), layoutId, length("120 1/16"));
     await dropNeeded();
@@ -129,7 +178,8 @@ describe("the measured case, through the shop's own services", () => {
     expect(toInches(now.axle?.line.station ?? mm(0))).toBeCloseTo(44.4066, 4);
     expect(now).toMatchObject({ options: null, missing: ["Drop hanger hole 1 on both sides."] });
 
-    for (const side of ["left", "right"] as const) await keepDrop(tech(), layoutId, onFrame("hanger-hole", side, 70.5, side === "left" ? 15.5 : -15.5));
+    for (const side of ["left", "right"] as const)
+      await keepDrop(tech(), layoutId, onFrame("hanger-hole", side, 70.5, side === "left" ? 15.5 : -15.5));
     await keepDrop(tech(), layoutId, onFrame("low-front", "centre", 76, 0, { height: length("22") }));
     now = await view();
     const figures = (spring: "centred" | "pinAhead", hole: 1 | 2 | 3) => {
@@ -148,16 +198,32 @@ describe("the measured case, through the shop's own services", () => {
     }
     await chooseOption(foreman(), layoutId, optionOf("pinAhead", 1));
     expect((await view()).next).toBe("approval");
-    expect(await approveOption(foreman(), layoutId, optionOf("pinAhead", 1))).toMatchObject({ sheetRevision: 1 });
+    expect(await approveOption(foreman(), layoutId, optionOf("pinAhead", 1))).toMatchObject({
+      sheetRevision: 1,
+    });
     now = await view();
-    expect(now.approval).toMatchObject({ state: "approved", sheetRevision: 1, made: { name: "Fay Foreman" } });
-    expect(now.steps.filter((step) => step.state === "done").map((step) => step.id)).toEqual(["stands", "level", "marks", "drops", "axle-line", "options", "approval"]);
+    expect(now.approval).toMatchObject({
+      state: "approved",
+      sheetRevision: 1,
+      made: { name: "Fay Foreman" },
+    });
+    expect(now.steps.filter((step) => step.state === "done").map((step) => step.id)).toEqual([
+      "stands",
+      "level",
+      "marks",
+      "drops",
+      "axle-line",
+      "options",
+      "approval",
+    ]);
   });
 
   it("keeps every entry as it was typed, beside its value", async () => {
     await toMarks();
     await keepDrop(tech(), layoutId, { ...offset("opening-front", "left", "6' 10 3/8\"", "768.35 mm") });
-    const reading = (await view()).drops.find((one) => one.point === "opening-front" && one.side === "left")?.reading;
+    const reading = (await view()).drops.find(
+      (one) => one.point === "opening-front" && one.side === "left",
+    )?.reading;
     expect(reading).toMatchObject({ stationTyped: "6' 10 3/8\"", offsetTyped: "768.35 mm", stands: true });
     expect(toInches(reading?.at.x ?? mm(0))).toBeCloseTo(82.375, 6);
     expect(toInches(reading?.at.y ?? mm(0))).toBeCloseTo(30.25, 6);
@@ -165,7 +231,8 @@ describe("the measured case, through the shop's own services", () => {
 });
 
 describe("steps stay shut until their ground stands", () => {
-  const refused = (work: Promise<unknown>, words: RegExp) => expect(work).rejects.toMatchObject({ kind: "conflict", message: expect.stringMatching(words) });
+  const refused = (work: Promise<unknown>, words: RegExp) =>
+    expect(work).rejects.toMatchObject({ kind: "conflict", message: expect.stringMatching(words) });
 
   it("nothing before the stands", async () => {
     await refused(level(RAISED), /Set the vehicle on stands first/);
@@ -186,7 +253,10 @@ describe("steps stay shut until their ground stands", () => {
     await refused(drop("opening-front", "left", "82", "30"), /control marks first/);
     await confirmMarks(tech(), layoutId, length("120"));
     await drop("opening-front", "left", "82 3/8", "30 1/4");
-    await refused(chooseAxleLine(tech(), layoutId, { method: "square", asked: null }), /^7 drops are missing/);
+    await refused(
+      chooseAxleLine(tech(), layoutId, { method: "square", asked: null }),
+      /^7 drops are missing/,
+    );
     await dropNeeded();
     await refused(chooseOption(tech(), layoutId, "1:0:1"), /axle line first/);
     await chooseAxleLine(tech(), layoutId, { method: "square", asked: null });
@@ -196,13 +266,30 @@ describe("steps stay shut until their ground stands", () => {
     await toOptions();
     await chooseOption(foreman(), layoutId, optionOf("centred", 1));
     await approveOption(foreman(), layoutId, null);
-    const card = (await readBoard(db, shop.shopId, new Date())).bays.find((one) => one.vehicle?.buildId === buildId);
+    const card = (await readBoard(db, shop.shopId, new Date())).bays.find(
+      (one) => one.vehicle?.buildId === buildId,
+    );
     expect(card?.vehicle?.level).toMatchObject({ state: "true", drops: 11 });
-    await moveVehicle(foreman(), { buildId, placementId: card?.vehicle?.placementId ?? 0, toBayId: null, confirmed: true });
+    await moveVehicle(foreman(), {
+      buildId,
+      placementId: card?.vehicle?.placementId ?? 0,
+      toBayId: null,
+      confirmed: true,
+    });
     const now = await view();
-    expect(now).toMatchObject({ next: "level", standsInBay: false, level: { state: "void", voided: { reason: "rolled out to the yard", made: { name: "Fay Foreman" } } } });
-    expect(now.approval).toMatchObject({ state: "void", voided: { reason: "Level void: rolled out to the yard" } });
-    await refused(drop("opening-front", "left", "82", "30"), /^The level is void: rolled out to the yard\. Level again, then drop one old point again\.$/);
+    expect(now).toMatchObject({
+      next: "level",
+      standsInBay: false,
+      level: { state: "void", voided: { reason: "rolled out to the yard", made: { name: "Fay Foreman" } } },
+    });
+    expect(now.approval).toMatchObject({
+      state: "void",
+      voided: { reason: "Level void: rolled out to the yard" },
+    });
+    await refused(
+      drop("opening-front", "left", "82", "30"),
+      /^The level is void: rolled out to the yard\. Level again, then drop one old point again\.$/,
+    );
     await refused(level(RAISED), /stands in the yard/);
     // What was read stays in the record.
     expect(now.drops.filter((one) => one.reading).every((one) => one.reading?.stands === false)).toBe(true);
@@ -219,7 +306,9 @@ describe("after a void", () => {
     const now = await view();
     expect(now.level?.redrop).toEqual({ state: "wanted", offMm: null });
     expect(now.next).toBe("drops");
-    await expect(chooseAxleLine(tech(), layoutId, { method: "square", asked: null })).rejects.toMatchObject({ message: expect.stringContaining("drop one old point again") });
+    await expect(chooseAxleLine(tech(), layoutId, { method: "square", asked: null })).rejects.toMatchObject({
+      message: expect.stringContaining("drop one old point again"),
+    });
   });
   it("lets the old drops stand when it falls within tolerance", async () => {
     expect(await drop("opening-front", "left", "82 7/16", "30 1/4")).toMatchObject({ redrop: "stands" });
@@ -233,7 +322,9 @@ describe("after a void", () => {
     expect(await drop("opening-front", "left", "82 5/8", "30 1/4")).toMatchObject({ redrop: "void" });
     const now = await view();
     expect(now.level?.redrop.state).toBe("void");
-    expect(now.drops.filter((one) => one.reading?.stands).map((one) => one.label)).toEqual(["Opening, front edge, left"]);
+    expect(now.drops.filter((one) => one.reading?.stands).map((one) => one.label)).toEqual([
+      "Opening, front edge, left",
+    ]);
     expect(now).toMatchObject({ frame: null, options: null, next: "drops" });
   });
   it("carries by itself when a level that still stands is only read again", async () => {
@@ -250,18 +341,28 @@ describe("readings", () => {
 
   it("are never edited: a correction is a new reading beside the old one", async () => {
     await drop("opening-front", "left", "82 3/8", "30 1/4");
-    await drop("opening-front", "left", "82 1/2", "30 1/4", { reason: "read from the wrong side of the mark" });
+    await drop("opening-front", "left", "82 1/2", "30 1/4", {
+      reason: "read from the wrong side of the mark",
+    });
     const one = (await view()).drops.find((d) => d.point === "opening-front" && d.side === "left");
-    expect(one?.reading).toMatchObject({ stationTyped: "82 1/2", reason: "read from the wrong side of the mark" });
+    expect(one?.reading).toMatchObject({
+      stationTyped: "82 1/2",
+      reason: "read from the wrong side of the mark",
+    });
     expect(one?.superseded).toMatchObject([{ typed: "82 3/8, 30 1/4", made: { name: "Tess Tech" } }]);
   });
   it("count once, however often and at once they are sent", async () => {
     const entry = offset("opening-front", "left", "82 3/8", "30 1/4");
     const answers = await Promise.all(Array.from({ length: 12 }, () => keepDrop(tech(), layoutId, entry)));
     expect(new Set(answers.map((answer) => answer.readingId)).size).toBe(1);
-    const rows = await db.select().from(schema.dropReadings).where(eq(schema.dropReadings.clientKey, entry.clientKey));
+    const rows = await db
+      .select()
+      .from(schema.dropReadings)
+      .where(eq(schema.dropReadings.clientKey, entry.clientKey));
     expect(rows).toHaveLength(1);
-    expect((await view()).drops.find((d) => d.point === "opening-front" && d.side === "left")?.superseded).toEqual([]);
+    expect(
+      (await view()).drops.find((d) => d.point === "opening-front" && d.side === "left")?.superseded,
+    ).toEqual([]);
   });
   it("of two people at once are both kept", async () => {
     await Promise.all([
@@ -269,7 +370,12 @@ describe("readings", () => {
       keepDrop(as(shop.people.tech2), layoutId, offset("opening-front", "right", "82 1/8", "30 3/8")),
       keepDrop(foreman(), layoutId, offset("datum-front", "left", "100", "16")),
     ]);
-    expect((await view()).drops.filter((one) => one.reading).map((one) => one.reading?.made.name).sort()).toEqual(["Fay Foreman", "Tess Tech", "Tom Tech"]);
+    expect(
+      (await view()).drops
+        .filter((one) => one.reading)
+        .map((one) => one.reading?.made.name)
+        .sort(),
+    ).toEqual(["Fay Foreman", "Tess Tech", "Tom Tech"]);
   });
   it("by tape tell of a slip, keep it in the record, and wait until it is measured again", async () => {
     const tapes = (b: string, over: Partial<DropEntry> = {}) =>
@@ -287,19 +393,38 @@ describe("readings", () => {
         clientKey: key(),
         ...over,
       } as DropEntry);
-    expect(await tapes("64 3/16")).toMatchObject({ suspect: true, suggestions: [{ kind: "inch-burnt", mark: "B" }] });
+    expect(await tapes("64 3/16")).toMatchObject({
+      suspect: true,
+      suggestions: [{ kind: "inch-burnt", mark: "B" }],
+    });
     await dropNeeded();
-    expect((await view()).steps.find((step) => step.id === "drops")).toMatchObject({ note: "tapes do not meet" });
-    await expect(chooseAxleLine(tech(), layoutId, { method: "square", asked: null })).rejects.toMatchObject({ message: expect.stringContaining("do not meet") });
-    expect(await tapes("63 3/16", { reason: "inch burnt on B" })).toMatchObject({ suspect: false, checked: true });
+    expect((await view()).steps.find((step) => step.id === "drops")).toMatchObject({
+      note: "tapes do not meet",
+    });
+    await expect(chooseAxleLine(tech(), layoutId, { method: "square", asked: null })).rejects.toMatchObject({
+      message: expect.stringContaining("do not meet"),
+    });
+    expect(await tapes("63 3/16", { reason: "inch burnt on B" })).toMatchObject({
+      suspect: false,
+      checked: true,
+    });
     const axle = (await view()).drops.find((one) => one.point === "axle-end" && one.side === "left");
     expect(axle?.superseded).toMatchObject([{ typed: "A 68 5/8, B 64 3/16, D 98 1/8" }]);
     expect(toInches(axle?.reading?.at.x ?? mm(0))).toBeGreaterThan(60);
   });
   it("refuse what cannot be, beside the field", async () => {
-    await expect(drop("opening-front", "left", "82", "-30")).rejects.toMatchObject({ kind: "invalid", fields: { offset: expect.stringContaining("without a sign") } });
-    await expect(drop("low-front", "centre", "96", "0")).rejects.toMatchObject({ kind: "invalid", fields: { height: expect.any(String) } });
-    await expect(confirmMarks(tech(), layoutId, length("121"))).rejects.toMatchObject({ kind: "invalid", fields: { taped: expect.stringMatching(/^A to B is set as 120 in; the tape reads 1 in more\./) } });
+    await expect(drop("opening-front", "left", "82", "-30")).rejects.toMatchObject({
+      kind: "invalid",
+      fields: { offset: expect.stringContaining("without a sign") },
+    });
+    await expect(drop("low-front", "centre", "96", "0")).rejects.toMatchObject({
+      kind: "invalid",
+      fields: { height: expect.any(String) },
+    });
+    await expect(confirmMarks(tech(), layoutId, length("121"))).rejects.toMatchObject({
+      kind: "invalid",
+      fields: { taped: expect.stringMatching(/^A to B is set as 120 in; the tape reads 1 in more\./) },
+    });
   });
 });
 
@@ -308,29 +433,46 @@ describe("choosing and signing", () => {
 
   it("refuses an option that does not meet what was asked for, with the reason", async () => {
     await db.update(schema.builds).set({ approachAskedDeg: 45 }).where(eq(schema.builds.id, buildId));
-    await expect(chooseOption(foreman(), layoutId, optionOf("centred", 1))).rejects.toMatchObject({ kind: "conflict", message: "Approach 40.97°, asked at least 45°." });
+    await expect(chooseOption(foreman(), layoutId, optionOf("centred", 1))).rejects.toMatchObject({
+      kind: "conflict",
+      message: "Approach 40.97°, asked at least 45°.",
+    });
   });
   it("lets only foreman and owner sign, once, and only what they saw", async () => {
     await chooseOption(tech(), layoutId, optionOf("centred", 2));
     await expect(approveOption(tech(), layoutId, null)).rejects.toMatchObject({ kind: "forbidden" });
-    await expect(approveOption(foreman(), layoutId, optionOf("centred", 1))).rejects.toMatchObject({ message: expect.stringContaining("Another option was put in hand") });
-    const signed = await Promise.allSettled([approveOption(foreman(), layoutId, null), approveOption(as(shop.people.foreman2), layoutId, null)]);
+    await expect(approveOption(foreman(), layoutId, optionOf("centred", 1))).rejects.toMatchObject({
+      message: expect.stringContaining("Another option was put in hand"),
+    });
+    const signed = await Promise.allSettled([
+      approveOption(foreman(), layoutId, null),
+      approveOption(as(shop.people.foreman2), layoutId, null),
+    ]);
     expect(signed.filter((one) => one.status === "fulfilled")).toHaveLength(1);
-    expect(signed.find((one) => one.status === "rejected")?.reason).toMatchObject({ kind: "conflict", message: expect.stringMatching(/has signed this already/) });
+    expect(signed.find((one) => one.status === "rejected")?.reason).toMatchObject({
+      kind: "conflict",
+      message: expect.stringMatching(/has signed this already/),
+    });
   });
   it("voids the signature when a number under it is read again", async () => {
     await chooseOption(foreman(), layoutId, optionOf("centred", 1));
     await approveOption(foreman(), layoutId, null);
     await drop("opening-front", "left", "82 1/2", "30 1/4");
     const now = await view();
-    expect(now.approval).toMatchObject({ state: "void", voided: { reason: "Opening, front edge read again" } });
+    expect(now.approval).toMatchObject({
+      state: "void",
+      voided: { reason: "Opening, front edge read again" },
+    });
     expect(now.choice).toBeNull();
     await chooseOption(foreman(), layoutId, optionOf("centred", 1));
     expect(await approveOption(foreman(), layoutId, null)).toMatchObject({ sheetRevision: 2 });
   });
   it("notices that the spring has left the rack", async () => {
     await chooseOption(foreman(), layoutId, optionOf("centred", 1));
-    await db.update(schema.springs).set({ takenOutAt: new Date() }).where(eq(schema.springs.id, shop.springs.centred));
+    await db
+      .update(schema.springs)
+      .set({ takenOutAt: new Date() })
+      .where(eq(schema.springs.id, shop.springs.centred));
     await expect(approveOption(foreman(), layoutId, null)).rejects.toMatchObject({ kind: "conflict" });
   });
 });
@@ -338,24 +480,54 @@ describe("choosing and signing", () => {
 describe("who and where", () => {
   it("begins one layout a build, in a bay that is fit for it", async () => {
     expect(await startLayout(foreman(), { buildId, fixedEye: "behind" })).toEqual({ layoutId });
-    const other = await makeBuild(db, shop.shopId, { nickname: "Yarder", code: `Z${serial}ab`, by: shop.people.foreman.personId ?? 0 });
-    await expect(startLayout(tech(), { buildId: other.buildId, fixedEye: "ahead" })).rejects.toMatchObject({ message: expect.stringContaining("stands in the yard") });
-    const lifted = await makeBuild(db, shop.shopId, { nickname: "Lifted", code: `Z${serial}cd`, kind: "open-top", by: shop.people.foreman.personId ?? 0, bayId: shop.bays[4] });
-    await expect(startLayout(tech(), { buildId: lifted.buildId, fixedEye: "ahead" })).rejects.toMatchObject({ message: "The floor of Bay 4 is not rated for layout." });
+    const other = await makeBuild(db, shop.shopId, {
+      nickname: "Yarder",
+      code: `Z${serial}ab`,
+      by: shop.people.foreman.personId ?? 0,
+    });
+    await expect(startLayout(tech(), { buildId: other.buildId, fixedEye: "ahead" })).rejects.toMatchObject({
+      message: expect.stringContaining("stands in the yard"),
+    });
+    const lifted = await makeBuild(db, shop.shopId, {
+      nickname: "Lifted",
+      code: `Z${serial}cd`,
+      kind: "open-top",
+      by: shop.people.foreman.personId ?? 0,
+      bayId: shop.bays[4],
+    });
+    await expect(startLayout(tech(), { buildId: lifted.buildId, fixedEye: "ahead" })).rejects.toMatchObject({
+      message: "The floor of Bay 4 is not rated for layout.",
+    });
   });
   it("is not for the counter, nor for another shop", async () => {
-    await expect(acknowledgeStands(as(shop.people.counter), layoutId)).rejects.toMatchObject({ kind: "forbidden" });
+    await expect(acknowledgeStands(as(shop.people.counter), layoutId)).rejects.toMatchObject({
+      kind: "forbidden",
+    });
     const other = await makeTestShop(db);
-    await expect(acknowledgeStands(as(other.people.tech), layoutId)).rejects.toMatchObject({ kind: "not-found" });
+    await expect(acknowledgeStands(as(other.people.tech), layoutId)).rejects.toMatchObject({
+      kind: "not-found",
+    });
     await expect(readLayout(db, other.shopId, layoutId)).rejects.toMatchObject({ kind: "not-found" });
   });
   it("wants everything anew in another bay: its floor frame is another", async () => {
     await toMarks();
     await dropNeeded();
-    const card = (await readBoard(db, shop.shopId, new Date())).bays.find((one) => one.vehicle?.buildId === buildId);
-    await moveVehicle(foreman(), { buildId, placementId: card?.vehicle?.placementId ?? 0, toBayId: shop.bays[2], confirmed: true });
+    const card = (await readBoard(db, shop.shopId, new Date())).bays.find(
+      (one) => one.vehicle?.buildId === buildId,
+    );
+    await moveVehicle(foreman(), {
+      buildId,
+      placementId: card?.vehicle?.placementId ?? 0,
+      toBayId: shop.bays[2],
+      confirmed: true,
+    });
     await level(RAISED);
     const now = await view();
-    expect(now).toMatchObject({ bay: { number: 2 }, marks: null, next: "marks", level: { state: "true", redrop: { state: "void" } } });
+    expect(now).toMatchObject({
+      bay: { number: 2 },
+      marks: null,
+      next: "marks",
+      level: { state: "true", redrop: { state: "void" } },
+    });
   });
 });

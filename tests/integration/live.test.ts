@@ -1,6 +1,6 @@
 import { io, type Socket } from "socket.io-client";
 import { afterAll, afterEach, beforeAll, describe, expect, it } from "vitest";
-import { contextFor, makeBuild, type MadeBuild, makeTestShop, type TestShop } from "#tests/factories";
+import { contextFor, type MadeBuild, makeBuild, makeTestShop, type TestShop } from "#tests/factories";
 import { testDatabase } from "#tests/setup/database";
 import { cookieFor, startServer, type TestServer } from "#tests/setup/server";
 import type { Db } from "~/db/client.server";
@@ -73,7 +73,8 @@ describe("the catch-up cursor under many writers", () => {
             : moveVehicle(ctx, {
                 buildId: made.buildId,
                 placementId: standing.placementId,
-                toBayId: [shop.bays[1], shop.bays[2], shop.bays[4], shop.bays[5], null][(n * 3 + i) % 5] ?? null,
+                toBayId:
+                  [shop.bays[1], shop.bays[2], shop.bays[4], shop.bays[5], null][(n * 3 + i) % 5] ?? null,
                 confirmed: true,
               });
         try {
@@ -98,7 +99,12 @@ describe("the catch-up cursor under many writers", () => {
   it("reads once for one watcher or two hundred, and only what changed", async () => {
     const made = await build();
     const patches: BoardPatch[] = [];
-    const publisher = makePublisher(db, () => new Date(), (_shopId, patch) => patches.push(patch), () => {});
+    const publisher = makePublisher(
+      db,
+      () => new Date(),
+      (_shopId, patch) => patches.push(patch),
+      () => {},
+    );
     await publisher.beat(shop.shopId);
     const board = await readBoard(db, shop.shopId, new Date());
     const free = board.bays.find((card) => card.vehicle === null && card.bay.kind !== "general");
@@ -126,7 +132,11 @@ describe("the live channel", () => {
   afterAll(() => server?.stop());
 
   const open = (headers: Record<string, string>) => {
-    const socket = io(server.origin, { transports: ["websocket"], reconnection: false, extraHeaders: headers });
+    const socket = io(server.origin, {
+      transports: ["websocket"],
+      reconnection: false,
+      extraHeaders: headers,
+    });
     sockets.push(socket);
     return socket;
   };
@@ -153,7 +163,12 @@ describe("the live channel", () => {
     there.on("patch", (patch: BoardPatch) => heardThere.push(JSON.stringify(patch)));
     const made = await build({ nickname: "Only here" });
     const heard = new Promise<BoardPatch>((resolve) => here.once("patch", resolve));
-    const form = new URLSearchParams({ buildId: String(made.buildId), action: "place", kind: "parts", words: "Pins short" });
+    const form = new URLSearchParams({
+      buildId: String(made.buildId),
+      action: "place",
+      kind: "parts",
+      words: "Pins short",
+    });
     const response = await fetch(`${server.origin}/floor/hold`, {
       method: "POST",
       headers: { cookie: await cookieFor(db, shop.people.foreman), origin: server.origin },

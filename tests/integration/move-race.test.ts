@@ -1,6 +1,6 @@
 import { and, eq, sql } from "drizzle-orm";
 import { beforeAll, describe, expect, it } from "vitest";
-import { contextFor, makeBuild, makeTestShop, type MadeBuild, type TestShop } from "#tests/factories";
+import { contextFor, type MadeBuild, makeBuild, makeTestShop, type TestShop } from "#tests/factories";
 import { testDatabase } from "#tests/setup/database";
 import { type Db, schema } from "~/db/client.server";
 import { readBoard } from "~/db/queries/board.server";
@@ -86,11 +86,11 @@ describe("many moves at once", () => {
         confirmed: true,
       });
     const results = await Promise.allSettled([move("foreman", shop.bays[1]), move("foreman2", shop.bays[2])]);
-    const lost = results.find((result) => result.status === "rejected");
+    const lost = results.find((result) => result.status === "rejected") as PromiseRejectedResult;
     expect(results.filter((result) => result.status === "fulfilled")).toHaveLength(1);
-    expect(lost?.reason).toBeInstanceOf(Refusal);
-    expect((lost?.reason as Refusal).message).toMatch(/^F(ay|inn) Foreman has just moved Tug to Bay [12]\.$/);
-    expect((lost?.reason as Refusal).detail).toEqual({ moved: true });
+    expect(lost.reason).toBeInstanceOf(Refusal);
+    expect((lost.reason as Refusal).message).toMatch(/^F(ay|inn) Foreman has just moved Tug to Bay [12]\.$/);
+    expect((lost.reason as Refusal).detail).toEqual({ moved: true });
   });
 
   it("keeps one journal row and one revision for each move that happened", async () => {
@@ -131,7 +131,9 @@ describe("many moves at once", () => {
     await db.delete(schema.placements).where(eq(schema.placements.id, first.placementId));
     await db.delete(schema.placements).where(eq(schema.placements.id, second.placementId));
     await db.insert(schema.placements).values(values(first));
-    await expect(db.insert(schema.placements).values(values(second))).rejects.toMatchObject({ cause: { errno: 1062 } });
+    await expect(db.insert(schema.placements).values(values(second))).rejects.toMatchObject({
+      cause: { errno: 1062 },
+    });
     // Half open: one ends as the other begins.
     await db
       .insert(schema.placements)
@@ -143,9 +145,14 @@ describe("many moves at once", () => {
 
   it("never changes or deletes a journal row", async () => {
     await expect(
-      db.update(schema.journal).set({ words: "nothing happened" }).where(eq(schema.journal.shopId, shop.shopId)),
+      db
+        .update(schema.journal)
+        .set({ words: "nothing happened" })
+        .where(eq(schema.journal.shopId, shop.shopId)),
     ).rejects.toMatchObject({ cause: { sqlMessage: "The journal is never changed" } });
-    await expect(db.delete(schema.journal).where(eq(schema.journal.shopId, shop.shopId))).rejects.toMatchObject({
+    await expect(
+      db.delete(schema.journal).where(eq(schema.journal.shopId, shop.shopId)),
+    ).rejects.toMatchObject({
       cause: { sqlMessage: "The journal is never deleted from" },
     });
   });

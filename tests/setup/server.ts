@@ -1,9 +1,9 @@
 import { type ChildProcess, spawn } from "node:child_process";
 import { createServer } from "node:net";
 import { createCookie } from "react-router";
+import type { TestPerson } from "#tests/factories";
 import { startSession } from "~/auth/sessions.server";
 import type { Db } from "~/db/client.server";
-import type { TestPerson } from "#tests/factories";
 import { workerUrl } from "./database";
 
 const SECRET = "a secret for tests only, thirty-two letters and more";
@@ -15,12 +15,19 @@ export async function freePort(): Promise<number> {
     probe.once("error", reject);
     probe.listen(0, "127.0.0.1", () => {
       const address = probe.address();
-      probe.close(() => (address && typeof address === "object" ? resolve(address.port) : reject(new Error("no port"))));
+      probe.close(() =>
+        address && typeof address === "object" ? resolve(address.port) : reject(new Error("no port")),
+      );
     });
   });
 }
 
-export type TestServer = { origin: string; port: number; child: ChildProcess; stop: (signal?: NodeJS.Signals) => Promise<number | null> };
+export type TestServer = {
+  origin: string;
+  port: number;
+  child: ChildProcess;
+  stop: (signal?: NodeJS.Signals) => Promise<number | null>;
+};
 
 /** Starts the built server on this worker's database. The build is made before the integration tests run. */
 export async function startServer(over: { port?: number } = {}): Promise<TestServer> {

@@ -39,7 +39,9 @@ export function StageRow({ vehicle, quiet = false }: { vehicle: BoardVehicle; qu
       <span className="cut">
         {stage.state === "open" && !stage.pieces ? "not begun" : piecesWords(stage)}
       </span>
-      {stage.pieces && !quiet ? <ProgressTape of={stage.pieces.of} done={stage.pieces.done} width={66} /> : null}
+      {stage.pieces && !quiet ? (
+        <ProgressTape of={stage.pieces.of} done={stage.pieces.done} width={66} />
+      ) : null}
     </div>
   );
 }
@@ -101,7 +103,8 @@ export function PlannedEnd({ vehicle }: { vehicle: BoardVehicle }) {
     <span
       className={`bay-end ${late ? "font-semibold text-oxide" : endsAt && endsAt < now ? "text-brass-ink" : ""}`}
     >
-      {late ? <Sign name="promise" title="Late" size={16} /> : null} {[end, promise].filter(Boolean).join(" · ")}
+      {late ? <Sign name="promise" title="Late" size={16} /> : null}{" "}
+      {[end, promise].filter(Boolean).join(" · ")}
     </span>
   );
 }

@@ -17,8 +17,8 @@ export function HoldPart({ vehicle, doing }: { vehicle: BoardVehicle; doing: Doi
     return (
       <div className="panel-hold">
         <p>
-          <Sign name="hold" size={16} /> <b>Hold, {ageInWords(hold.placedAt, now)}.</b> {HOLD_LABEL[hold.kind]}:{" "}
-          {hold.words}
+          <Sign name="hold" size={16} /> <b>Hold, {ageInWords(hold.placedAt, now)}.</b>{" "}
+          {HOLD_LABEL[hold.kind]}: {hold.words}
         </p>
         <Button
           size="s"

@@ -99,7 +99,10 @@ function VehicleButton({ vehicle, bay, inHand }: Props & { inHand: boolean }) {
         } else listeners?.onKeyDown?.(event);
       }}
     >
-      <VehicleDrawing vehicle={vehicle} tone={inHand ? (floor.hand?.by === "drag" ? "ghost" : "hand") : "rest"} />
+      <VehicleDrawing
+        vehicle={vehicle}
+        tone={inHand ? (floor.hand?.by === "drag" ? "ghost" : "hand") : "rest"}
+      />
     </button>
   );
 }

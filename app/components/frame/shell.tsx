@@ -7,7 +7,15 @@ import { TopBar } from "./top-bar";
  * The frame of every signed-in page: the top bar, then the page.
  * @param live how live the page is; pages that keep no live data leave it out
  */
-export function Shell({ shell, live, children }: { shell: ShellData; live?: LiveStatus; children: ReactNode }) {
+export function Shell({
+  shell,
+  live,
+  children,
+}: {
+  shell: ShellData;
+  live?: LiveStatus;
+  children: ReactNode;
+}) {
   return (
     <div className="flex min-h-dvh flex-col">
       <TopBar

@@ -28,7 +28,11 @@ function BrandBob() {
 /** Hangs at the area one is in. */
 function AreaBob() {
   return (
-    <svg viewBox="0 0 16 66" aria-hidden="true" className="pointer-events-none absolute top-0 left-1/2 z-10 -ml-2 h-[66px] w-4">
+    <svg
+      viewBox="0 0 16 66"
+      aria-hidden="true"
+      className="pointer-events-none absolute top-0 left-1/2 z-10 -ml-2 h-[66px] w-4"
+    >
       <path d="M8 0V44" stroke="var(--brass)" strokeWidth="1.6" />
       <path d="M5 44h6l1 4.500-4 12.500-4-12.500z" fill="var(--brass)" stroke="var(--brass-ink)" />
       <path d="M4.300 48.500h7.400" stroke="var(--brass-ink)" />
@@ -53,10 +57,17 @@ export function TopBar({ shopName, isDemo, areas, person, timeZone, now: served,
         <span className="font-label text-[22px] leading-none font-semibold">Plumbay</span>
         <span className="ml-1 hidden border-l border-concrete-300 pl-2.5 text-[13px] whitespace-nowrap text-concrete-500 xl:inline">
           {shopName}
-          {isDemo ? <b className="ml-2 rounded-xs bg-tape px-1.5 py-0.5 font-label font-semibold text-[#47453f]">demo shop</b> : null}
+          {isDemo ? (
+            <b className="ml-2 rounded-xs bg-tape px-1.5 py-0.5 font-label font-semibold text-[#47453f]">
+              demo shop
+            </b>
+          ) : null}
         </span>
       </div>
-      <nav aria-label="Areas" className="ml-1 flex min-w-0 flex-1 overflow-x-auto overflow-y-hidden md:ml-4 md:overflow-visible">
+      <nav
+        aria-label="Areas"
+        className="ml-1 flex min-w-0 flex-1 overflow-x-auto overflow-y-hidden md:ml-4 md:overflow-visible"
+      >
         {areas.map((area) => (
           <NavLink
             key={area.to}
@@ -91,11 +102,18 @@ export function TopBar({ shopName, isDemo, areas, person, timeZone, now: served,
           </span>
         ) : null}
         <span className="hidden items-baseline gap-2 md:flex">
-          <small className="hidden text-[13px] text-concrete-500 lg:inline">{dayAndDate(new Date(now), timeZone)}</small>
-          <time className="font-label text-[22px] leading-none font-semibold">{clock(new Date(now), timeZone)}</time>
+          <small className="hidden text-[13px] text-concrete-500 lg:inline">
+            {dayAndDate(new Date(now), timeZone)}
+          </small>
+          <time className="font-label text-[22px] leading-none font-semibold">
+            {clock(new Date(now), timeZone)}
+          </time>
         </span>
         <details className="group relative">
-          <summary className="flex min-h-11 list-none items-center gap-2 text-[13px] [&::-webkit-details-marker]:hidden" aria-label={`${person.name}, ${person.role}: sign out`}>
+          <summary
+            className="flex min-h-11 list-none items-center gap-2 text-[13px] [&::-webkit-details-marker]:hidden"
+            aria-label={`${person.name}, ${person.role}: sign out`}
+          >
             <ToolCheck initials={person.initials} state="on" size={30} />
             <span className="hidden leading-tight xl:block">
               <b className="block font-semibold">{person.name}</b>
@@ -106,7 +124,10 @@ export function TopBar({ shopName, isDemo, areas, person, timeZone, now: served,
             <p className="font-semibold">{person.name}</p>
             <p className="mb-3 text-sm text-concrete-500">{person.role}</p>
             <Form action="/sign-out" method="post" reloadDocument>
-              <button type="submit" className="min-h-11 w-full rounded border border-paint-edge bg-chalk font-semibold">
+              <button
+                type="submit"
+                className="min-h-11 w-full rounded border border-paint-edge bg-chalk font-semibold"
+              >
                 Sign out
               </button>
             </Form>

@@ -10,7 +10,9 @@ import { endWords, levelLine, PLACE_WORDS, piecesWords, stageWords } from "./wal
 const ROOM_BESIDE_GLYPH = 26;
 
 const secondWords = (vehicle: BoardVehicle, now: number) =>
-  (vehicle.hold && vehicle.hold.kind !== "level-void" ? vehicle.hold.words : levelLine(vehicle, now)?.words) ?? "";
+  (vehicle.hold && vehicle.hold.kind !== "level-void"
+    ? vehicle.hold.words
+    : levelLine(vehicle, now)?.words) ?? "";
 
 const TONE = { true: "text-moss", stop: "text-oxide", quiet: "text-concrete-500" } as const;
 
@@ -34,14 +36,36 @@ export function WallCell({ card, side, last, live, now, zone, next }: Props) {
       className={`wall-cell ${side} ${last ? "last" : ""} ${live ? "" : "wall-stripes text-concrete-500"}`}
     >
       <div className="wall-number">
-        <Stencil n={bay.number} size="calc(168 * var(--u))" cut={[1, 4, 7].includes(bay.number) ? "h" : "v"} />
+        <Stencil
+          n={bay.number}
+          size="calc(168 * var(--u))"
+          cut={[1, 4, 7].includes(bay.number) ? "h" : "v"}
+        />
       </div>
-      {vehicle ? live ? <LiveLines card={card} now={now} zone={zone} /> : <StaleLines card={card} /> : <EmptyLines next={live ? next : null} live={live} now={now} zone={zone} />}
+      {vehicle ? (
+        live ? (
+          <LiveLines card={card} now={now} zone={zone} />
+        ) : (
+          <StaleLines card={card} />
+        )
+      ) : (
+        <EmptyLines next={live ? next : null} live={live} now={now} zone={zone} />
+      )}
     </section>
   );
 }
 
-function EmptyLines({ live, next, now, zone }: { live: boolean; next: NextCard | null; now: number; zone: string }) {
+function EmptyLines({
+  live,
+  next,
+  now,
+  zone,
+}: {
+  live: boolean;
+  next: NextCard | null;
+  now: number;
+  zone: string;
+}) {
   return (
     <>
       <p className="wall-79 font-medium text-concrete-500">{live ? "Empty" : "was empty"}</p>
@@ -95,7 +119,14 @@ function LiveLines({ card, now, zone }: { card: BayCard; now: number; zone: stri
       <p className="wall-line third wall-46">
         {vehicle.crew.length === 0 && !ends ? <span className="text-concrete-500">Nobody on it</span> : null}
         {vehicle.crew.slice(0, 3).map((person) => (
-          <ToolCheck key={person.personId} initials={person.initials} state="on" size="calc(56 * var(--u))" letters={0.66} title={person.name} />
+          <ToolCheck
+            key={person.personId}
+            initials={person.initials}
+            state="on"
+            size="calc(56 * var(--u))"
+            letters={0.66}
+            title={person.name}
+          />
         ))}
         <span className="wall-line ml-auto">
           {ends ? <span className={ends.late ? "font-semibold text-oxide" : ""}>{ends.words}</span> : null}
@@ -103,7 +134,8 @@ function LiveLines({ card, now, zone }: { card: BayCard; now: number; zone: stri
             <>
               <Sign name="promise" size="calc(40 * var(--u))" />
               <span>
-                promised <b className="font-semibold">{whenInWords(vehicle.promisedAt, new Date(now), zone)}</b>
+                promised{" "}
+                <b className="font-semibold">{whenInWords(vehicle.promisedAt, new Date(now), zone)}</b>
               </span>
             </>
           ) : null}
@@ -123,7 +155,11 @@ function SecondLine({ vehicle, bay, now }: { vehicle: BoardVehicle; bay: BoardBa
   const level = levelLine(vehicle, now);
   const { hold } = vehicle;
   if (hold && (hold.kind !== "level-void" || level?.sign !== "void"))
-    return <span className={`wall-cut ${hold.kind === "customer" ? "text-brass-ink" : "text-oxide"}`}>{hold.words}</span>;
+    return (
+      <span className={`wall-cut ${hold.kind === "customer" ? "text-brass-ink" : "text-oxide"}`}>
+        {hold.words}
+      </span>
+    );
   if (level)
     return (
       <span className={`wall-line wall-cut ${TONE[level.tone]}`}>

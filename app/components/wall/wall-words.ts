@@ -1,10 +1,14 @@
-import type { BayCard, BoardVehicle } from "../../domain/floor/board";
 import { STAGE_LABEL } from "../../domain/builds/stages";
 import type { BayKind } from "../../domain/floor/bays";
+import type { BayCard, BoardVehicle } from "../../domain/floor/board";
 import { spanInWords, whenInWords } from "../time";
 
 /** What the second line of a cell says, and in which tone. */
-export type LevelLine = { tone: "true" | "stop" | "quiet"; sign: "level" | "not-level" | "void"; words: string } | null;
+export type LevelLine = {
+  tone: "true" | "stop" | "quiet";
+  sign: "level" | "not-level" | "void";
+  words: string;
+} | null;
 
 /** The level in words for the wall; null when none was taken. */
 export function levelLine(vehicle: BoardVehicle, now: number): LevelLine {
@@ -29,7 +33,8 @@ export function piecesWords(vehicle: BoardVehicle): string {
   return stage?.kind === "layout" && level.state !== "none" && level.drops > 0 ? `${level.drops} drops` : "";
 }
 
-export const stageWords = (vehicle: BoardVehicle) => (vehicle.stage ? STAGE_LABEL[vehicle.stage.kind] : "Done");
+export const stageWords = (vehicle: BoardVehicle) =>
+  vehicle.stage ? STAGE_LABEL[vehicle.stage.kind] : "Done";
 
 /** Where a vehicle stands, when there is no level to speak of. */
 export const PLACE_WORDS: Record<BayKind, string> = {
@@ -41,7 +46,11 @@ export const PLACE_WORDS: Record<BayKind, string> = {
 };
 
 /** When it ends by the plan, or by how much it is late; null when it is not planned. */
-export function endWords(vehicle: BoardVehicle, now: number, zone: string): { late: boolean; words: string } | null {
+export function endWords(
+  vehicle: BoardVehicle,
+  now: number,
+  zone: string,
+): { late: boolean; words: string } | null {
   if (!vehicle.endsAt || vehicle.stage?.state !== "under-way") return null;
   const ends = Date.parse(vehicle.endsAt);
   if (ends < now) return { late: true, words: `${spanInWords(now - ends)} late` };
@@ -54,7 +63,10 @@ export function endWords(vehicle: BoardVehicle, now: number, zone: string): { la
  * The bays as the building lies: those on its west side in the left column, the others right, four rows a page.
  * A held bay is on every page. Columns that are too long spill into the other one.
  */
-export function wallPages(bays: readonly BayCard[], buildingLengthMm: number): { west: BayCard[]; east: BayCard[] }[] {
+export function wallPages(
+  bays: readonly BayCard[],
+  buildingLengthMm: number,
+): { west: BayCard[]; east: BayCard[] }[] {
   const ROWS = 4;
   const middle = buildingLengthMm / 2;
   const isWest = (card: BayCard) => !card.bay.outside && card.bay.xMm + card.bay.lengthMm / 2 < middle;
@@ -71,7 +83,9 @@ export function wallPages(bays: readonly BayCard[], buildingLengthMm: number): {
   const room = ROWS * 2 - pinned.length;
   const pages: { west: BayCard[]; east: BayCard[] }[] = [];
   for (let from = 0; from < rest.length; from += room)
-    pages.push(deal([...pinned, ...rest.slice(from, from + room)].sort((a, b) => a.bay.number - b.bay.number)));
+    pages.push(
+      deal([...pinned, ...rest.slice(from, from + room)].sort((a, b) => a.bay.number - b.bay.number)),
+    );
   return pages;
 }
 

@@ -1,4 +1,5 @@
 import { and, asc, desc, eq, gt, inArray, isNull, ne, sql } from "drizzle-orm";
+import { leansOnLevel } from "../../domain/builds/stages";
 import type {
   BayCard,
   Board,
@@ -9,7 +10,6 @@ import type {
   CrewCard,
   NextCard,
 } from "../../domain/floor/board";
-import { leansOnLevel } from "../../domain/builds/stages";
 import { type Db, type Reader, schema } from "../client.server";
 import { OPEN_END, type Touch } from "../schema";
 
@@ -120,7 +120,10 @@ async function readStandings(
   }
   const stageIds = [...stageOf.values()].map((row) => row.id);
   const kinds = stageIds.length
-    ? groupBy(await tx.select().from(stageBayKinds).where(inArray(stageBayKinds.stageId, stageIds)), (k) => k.stageId)
+    ? groupBy(
+        await tx.select().from(stageBayKinds).where(inArray(stageBayKinds.stageId, stageIds)),
+        (k) => k.stageId,
+      )
     : new Map<number, { kind: BoardStage["bayKinds"][number] }[]>();
   const planned = stageIds.length
     ? await tx
@@ -261,7 +264,11 @@ export async function readBayCards(tx: Reader, shopId: number, bayIds: number[] 
     .where(and(eq(bays.shopId, shopId), bayIds === "all" ? undefined : inArray(bays.id, bayIds)))
     .orderBy(asc(bays.number));
   const marks = groupBy(
-    await tx.select().from(controlMarks).where(eq(controlMarks.shopId, shopId)).orderBy(asc(controlMarks.label)),
+    await tx
+      .select()
+      .from(controlMarks)
+      .where(eq(controlMarks.shopId, shopId))
+      .orderBy(asc(controlMarks.label)),
     (mark) => mark.bayId,
   );
   const standings = await readStandings(tx, shopId, bayIds === "all" ? "everywhere" : { bayIds });
@@ -305,14 +312,22 @@ export async function readCrew(tx: Reader, shopId: number): Promise<CrewCard[]> 
     .leftJoin(bays, eq(bays.id, placements.bayId))
     .where(and(eq(people.shopId, shopId), eq(people.role, "tech"), isNull(people.leftAt)))
     .orderBy(asc(people.name));
-  const skills = groupBy(await tx.select().from(personSkills).where(eq(personSkills.shopId, shopId)), (s) => s.personId);
+  const skills = groupBy(
+    await tx.select().from(personSkills).where(eq(personSkills.shopId, shopId)),
+    (s) => s.personId,
+  );
   return rows.map(({ person, spell, nickname, bayNumber }) => ({
     personId: person.id,
     name: person.name,
     initials: person.initials,
     skills: (skills.get(person.id) ?? []).map((row) => row.skill),
     on: spell
-      ? { buildId: spell.buildId, nickname: nickname ?? "", bayNumber: bayNumber ?? null, since: iso(spell.fromAt) }
+      ? {
+          buildId: spell.buildId,
+          nickname: nickname ?? "",
+          bayNumber: bayNumber ?? null,
+          since: iso(spell.fromAt),
+        }
       : null,
     awayUntil: person.awayUntil ? iso(person.awayUntil) : null,
   }));
@@ -361,4 +376,3 @@ export function readBoard(db: Db, shopId: number, now: Date): Promise<Board> {
     };
   });
 }
-

@@ -36,7 +36,11 @@ export async function readLayoutRow(tx: Reader, shopId: number, layoutId: number
 export type LayoutRow = NonNullable<Awaited<ReturnType<typeof readLayoutRow>>>;
 
 /** The newest layout of a build; null when it has none. */
-export async function readLayoutOfBuild(tx: Reader, shopId: number, buildId: number): Promise<LayoutRow | null> {
+export async function readLayoutOfBuild(
+  tx: Reader,
+  shopId: number,
+  buildId: number,
+): Promise<LayoutRow | null> {
   const [row] = await tx
     .select()
     .from(layouts)
@@ -75,7 +79,11 @@ export async function readDrops(tx: Reader, layoutId: number) {
     .orderBy(asc(dropReadings.id));
   const ids = rows.map((row) => row.reading.id);
   const ties = ids.length
-    ? await tx.select().from(tieReadings).where(inArray(tieReadings.readingId, ids)).orderBy(asc(tieReadings.mark))
+    ? await tx
+        .select()
+        .from(tieReadings)
+        .where(inArray(tieReadings.readingId, ids))
+        .orderBy(asc(tieReadings.mark))
     : [];
   return rows.map((row) => ({ ...row, ties: ties.filter((tie) => tie.readingId === row.reading.id) }));
 }
@@ -154,7 +162,11 @@ export type LayoutHead = NonNullable<Awaited<ReturnType<typeof readLayoutHead>>>
 
 /** A level check's own readings with who made the check. */
 export async function readLevelReadings(tx: Reader, levelCheckId: number) {
-  return tx.select().from(levelReadings).where(eq(levelReadings.levelCheckId, levelCheckId)).orderBy(asc(levelReadings.id));
+  return tx
+    .select()
+    .from(levelReadings)
+    .where(eq(levelReadings.levelCheckId, levelCheckId))
+    .orderBy(asc(levelReadings.id));
 }
 
 export async function readPerson(tx: Reader, personId: number) {

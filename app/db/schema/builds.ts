@@ -1,8 +1,18 @@
-import { check, index, int, mysqlEnum, mysqlTable, smallint, text, unique, varchar } from "drizzle-orm/mysql-core";
 import { sql } from "drizzle-orm";
-import { BAY_KINDS } from "../../domain/floor/bays";
+import {
+  check,
+  index,
+  int,
+  mysqlEnum,
+  mysqlTable,
+  smallint,
+  text,
+  unique,
+  varchar,
+} from "drizzle-orm/mysql-core";
 import { HOLD_KINDS, STAGE_KINDS, STAGE_STATES } from "../../domain/builds/stages";
 import { VEHICLE_KINDS } from "../../domain/builds/vehicle-kinds";
+import { BAY_KINDS } from "../../domain/floor/bays";
 import { SKILLS } from "../../domain/people/roles";
 import { asTyped, hours, id, lengthMm, moment, ref } from "./columns";
 import { people } from "./people";

@@ -4,7 +4,9 @@ import { devices, people } from "./people";
 import { shops } from "./shop";
 
 /** What a change touched, for those who watch: a bay by id, the yard, the crew board, a layout by id … */
-export type Touch = { kind: "bay" | "layout" | "build"; id: number } | { kind: "yard" | "crew" | "springs" | "setup" };
+export type Touch =
+  | { kind: "bay" | "layout" | "build"; id: number }
+  | { kind: "yard" | "crew" | "springs" | "setup" };
 
 /** Who changed what. Written in the same transaction as the change; never updated or deleted (a trigger refuses). */
 export const journal = mysqlTable(

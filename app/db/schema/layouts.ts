@@ -1,4 +1,14 @@
-import { boolean, char, index, int, json, mysqlEnum, mysqlTable, unique, varchar } from "drizzle-orm/mysql-core";
+import {
+  boolean,
+  char,
+  index,
+  int,
+  json,
+  mysqlEnum,
+  mysqlTable,
+  unique,
+  varchar,
+} from "drizzle-orm/mysql-core";
 import { bays } from "./bays";
 import { builds } from "./builds";
 import { angleDeg, asTyped, id, lengthMm, moment, ref } from "./columns";

@@ -1,4 +1,13 @@
-import { boolean, char, index, mysqlEnum, mysqlTable, primaryKey, unique, varchar } from "drizzle-orm/mysql-core";
+import {
+  boolean,
+  char,
+  index,
+  mysqlEnum,
+  mysqlTable,
+  primaryKey,
+  unique,
+  varchar,
+} from "drizzle-orm/mysql-core";
 import { ROLES, SKILLS } from "../../domain/people/roles";
 import { id, moment, ref } from "./columns";
 import { shops } from "./shop";

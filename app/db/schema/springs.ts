@@ -1,5 +1,5 @@
-import { check, mysqlTable, smallint, unique, varchar } from "drizzle-orm/mysql-core";
 import { sql } from "drizzle-orm";
+import { check, mysqlTable, smallint, unique, varchar } from "drizzle-orm/mysql-core";
 import { asTyped, id, lengthMm, moment, ref } from "./columns";
 import { shops } from "./shop";
 

@@ -112,7 +112,13 @@ export const BUILD_TEMPLATES = {
   },
   "springs-only": {
     label: "Springs and shackles, hangers stay",
-    stages: [stage("strip", 2), stage("fit", 5), stage("torque", 2), stage("road-test", 1), stage("hand-over", 0.5)],
+    stages: [
+      stage("strip", 2),
+      stage("fit", 5),
+      stage("torque", 2),
+      stage("road-test", 1),
+      stage("hand-over", 0.5),
+    ],
   },
   "weld-repair": {
     label: "Hanger or bracket repair",

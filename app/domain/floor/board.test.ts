@@ -3,9 +3,18 @@ import { bayCard, board, boardVehicle } from "#tests/factories/board";
 import { applyPatch, vehiclesOn } from "./board";
 
 describe("applyPatch", () => {
-  const before = board({ revision: 7, bays: [bayCard({ id: 1 }), bayCard({ id: 2, number: 2 })], yard: [boardVehicle()] });
+  const before = board({
+    revision: 7,
+    bays: [bayCard({ id: 1 }), bayCard({ id: 2, number: 2 })],
+    yard: [boardVehicle()],
+  });
   it("lays the changed bays over the old ones and keeps what was left out", () => {
-    const after = applyPatch(before, { from: 7, revision: 8, bays: [bayCard({ id: 2, number: 2 }, boardVehicle())], yard: [] });
+    const after = applyPatch(before, {
+      from: 7,
+      revision: 8,
+      bays: [bayCard({ id: 2, number: 2 }, boardVehicle())],
+      yard: [],
+    });
     expect(after).toMatchObject({ revision: 8, yard: [] });
     expect(after?.bays[0]).toBe(before.bays[0]);
     expect(after?.bays[1]?.vehicle?.nickname).toBe("Old Mule");
@@ -23,7 +32,9 @@ describe("applyPatch", () => {
 });
 
 it("vehiclesOn lists bays, then the yard", () => {
-  const list = vehiclesOn(board({ bays: [bayCard({ number: 3 }, boardVehicle())], yard: [boardVehicle({ nickname: "Moth" })] }));
+  const list = vehiclesOn(
+    board({ bays: [bayCard({ number: 3 }, boardVehicle())], yard: [boardVehicle({ nickname: "Moth" })] }),
+  );
   expect(list.map(({ vehicle, bay }) => [vehicle.nickname, bay?.number ?? null])).toEqual([
     ["Old Mule", 3],
     ["Moth", null],

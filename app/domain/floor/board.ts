@@ -37,7 +37,13 @@ export type BoardStage = {
 /** `none`: no level was taken on this visit, or the stage in hand does not lean on it. */
 export type BoardLevel =
   | { state: "none" }
-  | { state: "true" | "not-true"; noseHighDeg: number; rightHighDeg: number; checkedAt: string; drops: number }
+  | {
+      state: "true" | "not-true";
+      noseHighDeg: number;
+      rightHighDeg: number;
+      checkedAt: string;
+      drops: number;
+    }
   | { state: "void"; reason: string; voidedAt: string; drops: number };
 
 export type BoardHold = { id: number; kind: HoldKind; words: string; placedAt: string; dueAt: string | null };

@@ -7,10 +7,18 @@ const words = (check: { reasons: { words: string }[] }) => check.reasons.map((re
 
 describe("checkMove", () => {
   it("takes a vehicle that fits an empty bay fit for its stage", () => {
-    expect(checkMove(boardVehicle(), null, bayCard())).toMatchObject({ verdict: "takes", reasons: [], overMm: 0 });
+    expect(checkMove(boardVehicle(), null, bayCard())).toMatchObject({
+      verdict: "takes",
+      reasons: [],
+      overMm: 0,
+    });
   });
   it("refuses a taken bay and names who stands there", () => {
-    const check = checkMove(boardVehicle(), null, bayCard({ number: 7 }, boardVehicle({ buildId: 11, nickname: "Sunday" })));
+    const check = checkMove(
+      boardVehicle(),
+      null,
+      bayCard({ number: 7 }, boardVehicle({ buildId: 11, nickname: "Sunday" })),
+    );
     expect(check.verdict).toBe("refuses");
     expect(words(check)).toEqual(["Bay 7 is taken by Sunday."]);
   });
@@ -24,10 +32,16 @@ describe("checkMove", () => {
     expect(checkMove(boardVehicle(), null, bayCard({ lengthMm: 230 * 25.4 })).verdict).toBe("takes");
   });
   it("refuses a bay that is too narrow", () => {
-    expect(words(checkMove(boardVehicle(), null, bayCard({ widthMm: 6 * 304.8 })))).toEqual(["Bay 1 is 6 ft wide: vehicle is 6 ft 4 in."]);
+    expect(words(checkMove(boardVehicle(), null, bayCard({ widthMm: 6 * 304.8 })))).toEqual([
+      "Bay 1 is 6 ft wide: vehicle is 6 ft 4 in.",
+    ]);
   });
   it("asks before a bay of a kind that the stage cannot use", () => {
-    const check = checkMove(boardVehicle(), null, bayCard({ number: 2, kind: "lift", ratedForLayout: false }));
+    const check = checkMove(
+      boardVehicle(),
+      null,
+      bayCard({ number: 2, kind: "lift", ratedForLayout: false }),
+    );
     expect(check.verdict).toBe("asks");
     expect(words(check)).toEqual(["Layout needs a level pad; Bay 2 is a lift."]);
   });
@@ -54,16 +68,32 @@ describe("checkMove", () => {
     expect(words(check)).toContain("Voids the level and 1 drop.");
   });
   it("does not count a void level as standing", () => {
-    const level = { state: "void", reason: "stand 3 touched", voidedAt: NOW.toISOString(), drops: 4 } as const;
+    const level = {
+      state: "void",
+      reason: "stand 3 touched",
+      voidedAt: NOW.toISOString(),
+      drops: 4,
+    } as const;
     expect(wouldVoid(boardVehicle({ level }))).toBeNull();
     expect(checkMove(boardVehicle({ level }), boardBay(), "yard").verdict).toBe("takes");
   });
   it("asks before moving a vehicle that is held for safety", () => {
-    const hold = { id: 1, kind: "safety", words: "Jack under it", placedAt: NOW.toISOString(), dueAt: null } as const;
-    expect(words(checkMove(boardVehicle({ hold }), boardBay(), "yard"))).toEqual(["On hold for safety: Jack under it"]);
+    const hold = {
+      id: 1,
+      kind: "safety",
+      words: "Jack under it",
+      placedAt: NOW.toISOString(),
+      dueAt: null,
+    } as const;
+    expect(words(checkMove(boardVehicle({ hold }), boardBay(), "yard"))).toEqual([
+      "On hold for safety: Jack under it",
+    ]);
   });
   it("refuses the place where it stands", () => {
-    expect(checkMove(boardVehicle(), boardBay(), bayCard()).reasons[0]).toMatchObject({ rule: "same", verdict: "refuses" });
+    expect(checkMove(boardVehicle(), boardBay(), bayCard()).reasons[0]).toMatchObject({
+      rule: "same",
+      verdict: "refuses",
+    });
     expect(words(checkMove(boardVehicle(), null, "yard"))).toEqual(["It stands in the yard already."]);
   });
 });
@@ -93,7 +123,15 @@ describe("checkAssign", () => {
   });
   it("refuses to put somebody without the weld skill on a weld", () => {
     const weld = boardVehicle({
-      stage: { id: 2, kind: "weld", state: "open", bayKinds: ["weld"], skill: "weld", heads: 1, pieces: null },
+      stage: {
+        id: 2,
+        kind: "weld",
+        state: "open",
+        bayKinds: ["weld"],
+        skill: "weld",
+        heads: 1,
+        pieces: null,
+      },
     });
     expect(checkAssign(crewCard(), bayCard({ kind: "weld" }, weld), NOW).verdict).toBe("refuses");
   });

@@ -9,7 +9,19 @@ export type Verdict = "takes" | "asks" | "refuses";
 
 export type Reason = {
   /** Which rule spoke; the screen picks the sign by it. */
-  rule: "taken" | "too-long" | "too-wide" | "bay-kind" | "floor-not-rated" | "voids-level" | "safety-hold" | "elsewhere" | "skill" | "away" | "empty" | "same";
+  rule:
+    | "taken"
+    | "too-long"
+    | "too-wide"
+    | "bay-kind"
+    | "floor-not-rated"
+    | "voids-level"
+    | "safety-hold"
+    | "elsewhere"
+    | "skill"
+    | "away"
+    | "empty"
+    | "same";
   verdict: Exclude<Verdict, "takes">;
   words: string;
 };
@@ -75,7 +87,11 @@ export function checkMove(vehicle: BoardVehicle, from: BoardBay | null, to: BayC
   if (to !== "yard") {
     const { bay, vehicle: occupant } = to;
     if (occupant)
-      reasons.push({ rule: "taken", verdict: "refuses", words: `Bay ${bay.number} is taken by ${occupant.nickname}.` });
+      reasons.push({
+        rule: "taken",
+        verdict: "refuses",
+        words: `Bay ${bay.number} is taken by ${occupant.nickname}.`,
+      });
     if (vehicle.lengthMm > bay.lengthMm) {
       overMm = vehicle.lengthMm - bay.lengthMm;
       reasons.push({
@@ -108,7 +124,11 @@ export function checkMove(vehicle: BoardVehicle, from: BoardBay | null, to: BayC
   const lost = wouldVoid(vehicle);
   if (lost) reasons.push({ rule: "voids-level", verdict: "asks", words: `Voids ${lost}.` });
   if (vehicle.hold?.kind === "safety")
-    reasons.push({ rule: "safety-hold", verdict: "asks", words: `On hold for safety: ${vehicle.hold.words}` });
+    reasons.push({
+      rule: "safety-hold",
+      verdict: "asks",
+      words: `On hold for safety: ${vehicle.hold.words}`,
+    });
   return decide(reasons, overMm);
 }
 
@@ -121,13 +141,19 @@ export function checkAssign(person: CrewCard, target: BayCard, now: Date): Check
   if (!vehicle)
     return decide([{ rule: "empty", verdict: "refuses", words: `Nothing stands in Bay ${bay.number}.` }]);
   if (person.on?.buildId === vehicle.buildId)
-    return decide([{ rule: "same", verdict: "refuses", words: `${person.name} is on ${vehicle.nickname} already.` }]);
+    return decide([
+      { rule: "same", verdict: "refuses", words: `${person.name} is on ${vehicle.nickname} already.` },
+    ]);
   const reasons: Reason[] = [];
   if (person.awayUntil && new Date(person.awayUntil) > now)
     reasons.push({ rule: "away", verdict: "refuses", words: `${person.name} is away.` });
   if (person.on) {
     const where = person.on.bayNumber === null ? "in the yard" : `in Bay ${person.on.bayNumber}`;
-    reasons.push({ rule: "elsewhere", verdict: "asks", words: `${person.name} is on ${person.on.nickname} ${where}.` });
+    reasons.push({
+      rule: "elsewhere",
+      verdict: "asks",
+      words: `${person.name} is on ${person.on.nickname} ${where}.`,
+    });
   }
   const skill = vehicle.stage?.skill;
   if (skill && !person.skills.includes(skill)) {

@@ -23,13 +23,19 @@ export function leastSquares(rows: readonly (readonly number[])[], observed: rea
   if (scale.some((s) => !(s > 0))) return null;
   const scaled = rows.map((row) => row.map((value, j) => value / (scale[j] ?? 1)));
   const normal = square(n, (i, j) => scaled.reduce((sum, row) => sum + (row[i] ?? 0) * (row[j] ?? 0), 0));
-  const right = Array.from({ length: n }, (_, i) => scaled.reduce((sum, row, k) => sum + (row[i] ?? 0) * (observed[k] ?? 0), 0));
+  const right = Array.from({ length: n }, (_, i) =>
+    scaled.reduce((sum, row, k) => sum + (row[i] ?? 0) * (observed[k] ?? 0), 0),
+  );
   const inverse = invert(normal);
   if (!inverse) return null;
-  const solution = inverse.map((row, i) => row.reduce((sum, value, j) => sum + value * (right[j] ?? 0), 0) / (scale[i] ?? 1));
+  const solution = inverse.map(
+    (row, i) => row.reduce((sum, value, j) => sum + value * (right[j] ?? 0), 0) / (scale[i] ?? 1),
+  );
   return {
     solution,
-    residuals: rows.map((row, k) => (observed[k] ?? 0) - row.reduce((sum, value, j) => sum + value * (solution[j] ?? 0), 0)),
+    residuals: rows.map(
+      (row, k) => (observed[k] ?? 0) - row.reduce((sum, value, j) => sum + value * (solution[j] ?? 0), 0),
+    ),
     cofactor: square(n, (i, j) => (inverse[i]?.[j] ?? 0) / ((scale[i] ?? 1) * (scale[j] ?? 1))),
     redundancy: rows.length - n,
   };

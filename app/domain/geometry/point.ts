@@ -7,12 +7,16 @@ export type FloorPoint = { readonly x: Millimetres; readonly y: Millimetres };
 export type FramePoint = { readonly station: Millimetres; readonly offset: Millimetres };
 
 export const floorPoint = (x: number, y: number): FloorPoint => ({ x: mm(x), y: mm(y) });
-export const framePoint = (station: number, offset: number): FramePoint => ({ station: mm(station), offset: mm(offset) });
+export const framePoint = (station: number, offset: number): FramePoint => ({
+  station: mm(station),
+  offset: mm(offset),
+});
 
 /** Distance between two floor points. */
 export const distance = (a: FloorPoint, b: FloorPoint): Millimetres => mm(Math.hypot(a.x - b.x, a.y - b.y));
 /** The point half way between. */
-export const middle = (a: FloorPoint, b: FloorPoint): FloorPoint => floorPoint((a.x + b.x) / 2, (a.y + b.y) / 2);
+export const middle = (a: FloorPoint, b: FloorPoint): FloorPoint =>
+  floorPoint((a.x + b.x) / 2, (a.y + b.y) / 2);
 
 /** Turns a vector by an angle, positive to the left. */
 export function turned(v: FloorPoint, by: Degrees): FloorPoint {

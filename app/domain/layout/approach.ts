@@ -13,7 +13,11 @@ export type LowPoint = { station: Millimetres; height: Millimetres };
  * @param height of the point above the ground
  * @returns null when the point does not bound the approach: it is not ahead of the axle, or lies within the tyre
  */
-export function approachAngle(loadedRadius: Millimetres, ahead: Millimetres, height: Millimetres): Degrees | null {
+export function approachAngle(
+  loadedRadius: Millimetres,
+  ahead: Millimetres,
+  height: Millimetres,
+): Degrees | null {
   if (!(loadedRadius > 0) || !(ahead > 0) || height < 0) return null;
   const over = Math.hypot(ahead, loadedRadius - height);
   if (over <= loadedRadius) return null;

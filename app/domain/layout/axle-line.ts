@@ -33,14 +33,23 @@ const SPOKEN = 25.4 / 32;
  * Both wheel openings in the frame's axes, and how they differ: bodies shift on frames and sheet metal gets repaired.
  * @returns a problem when an edge lies on the wrong side of its other edge
  */
-export function compareOpenings(frame: Frame, drops: { left: OpeningDrops; right: OpeningDrops }): Outcome<OpeningComparison> {
+export function compareOpenings(
+  frame: Frame,
+  drops: { left: OpeningDrops; right: OpeningDrops },
+): Outcome<OpeningComparison> {
   const opening = ({ front, rear }: OpeningDrops): Opening => {
     const [f, r] = [toFrame(frame, front), toFrame(frame, rear)];
-    return { front: f.station, rear: r.station, length: mm(f.station - r.station), centre: toFrame(frame, openingCentre(front, rear)) };
+    return {
+      front: f.station,
+      rear: r.station,
+      length: mm(f.station - r.station),
+      centre: toFrame(frame, openingCentre(front, rear)),
+    };
   };
   const [left, right] = [opening(drops.left), opening(drops.right)];
   for (const [side, one] of [["left", left] as const, ["right", right] as const])
-    if (one.length <= 0) return problem(`The ${side} opening's front edge lies behind its rear edge: were the two swapped?`);
+    if (one.length <= 0)
+      return problem(`The ${side} opening's front edge lies behind its rear edge: were the two swapped?`);
   const floorDifference = mm(
     openingCentre(drops.left.front, drops.left.rear).x - openingCentre(drops.right.front, drops.right.rear).x,
   );
@@ -59,9 +68,13 @@ export function compareOpenings(frame: Frame, drops: { left: OpeningDrops; right
 function differenceWords(length: number, onFloor: number, onFrame: number): string {
   const size = (value: number) => formatInches(mm(Math.abs(value)));
   const first =
-    Math.abs(length) < SPOKEN ? "Both openings are equally long." : `${length > 0 ? "Left" : "Right"} opening ${size(length)} in longer.`;
+    Math.abs(length) < SPOKEN
+      ? "Both openings are equally long."
+      : `${length > 0 ? "Left" : "Right"} opening ${size(length)} in longer.`;
   const on = (value: number, where: string) =>
-    Math.abs(value) < SPOKEN ? `level with the right on the ${where}` : `${size(value)} in ${value > 0 ? "ahead of" : "behind"} the right on the ${where}`;
+    Math.abs(value) < SPOKEN
+      ? `level with the right on the ${where}`
+      : `${size(value)} in ${value > 0 ? "ahead of" : "behind"} the right on the ${where}`;
   return `${first} The left one's centre is ${on(onFloor, "floor")}, ${on(onFrame, "frame")}.`;
 }
 

@@ -1,9 +1,25 @@
-import { formatInches, formatMillimetres, inches, type LengthUnit, MM_PER_INCH, type Millimetres, mm, toInches } from "../units/length";
+import {
+  formatInches,
+  formatMillimetres,
+  inches,
+  type LengthUnit,
+  type Millimetres,
+  MM_PER_INCH,
+  mm,
+  toInches,
+} from "../units/length";
 import { adjustTies, isSuspect, type Tie } from "./tie-fit";
 
 /** A slip of this trade that would make the tapes meet. */
 export type Suggestion = {
-  kind: "inch-burnt" | "inch-lost" | "centimetres" | "digits-swapped" | "six-for-nine" | "marks-swapped" | "sides-swapped";
+  kind:
+    | "inch-burnt"
+    | "inch-lost"
+    | "centimetres"
+    | "digits-swapped"
+    | "six-for-nine"
+    | "marks-swapped"
+    | "sides-swapped";
   words: string;
   /** The tape it concerns; null when it concerns no single one. */
   mark: string | null;
@@ -20,13 +36,23 @@ type Candidate = Omit<Suggestion, "words" | "within"> & { ties: Tie[]; side: 1 |
  * swapped, 6 for 9, two marks' readings swapped, left for right. Each is tried alone, the best fit first.
  * Source of the list: common practice, no source.
  */
-export function suggestBlunders(ties: readonly Tie[], side: 1 | -1, sigma: Millimetres, unit: LengthUnit): Suggestion[] {
+export function suggestBlunders(
+  ties: readonly Tie[],
+  side: 1 | -1,
+  sigma: Millimetres,
+  unit: LengthUnit,
+): Suggestion[] {
   const found: Suggestion[] = [];
   for (const { ties: changed, side: on, slip, ...candidate } of candidates(ties, side)) {
     const fit = adjustTies(changed, on, sigma);
     if (!fit.ok || isSuspect(fit.value)) continue;
     const within = mm(Math.max(...fit.value.residuals.map((residual) => Math.abs(residual.residual))));
-    const twin = found.find((other) => other.mark === candidate.mark && candidate.mark !== null && Math.abs((other.reading ?? 0) - (candidate.reading ?? 0)) < 0.01);
+    const twin = found.find(
+      (other) =>
+        other.mark === candidate.mark &&
+        candidate.mark !== null &&
+        Math.abs((other.reading ?? 0) - (candidate.reading ?? 0)) < 0.01,
+    );
     if (!twin) found.push({ ...candidate, within, words: wordsFor(slip, candidate.reading, within, unit) });
   }
   return found.sort((a, b) => a.within - b.within);
@@ -34,7 +60,10 @@ export function suggestBlunders(ties: readonly Tie[], side: 1 | -1, sigma: Milli
 
 function wordsFor(slip: string, reading: Millimetres | null, within: Millimetres, unit: LengthUnit): string {
   const step = MM_PER_INCH / 32;
-  const close = unit === "in" ? formatInches(mm(Math.max(step, Math.ceil(within / step - 1e-6) * step)), { denominator: 32 }) : formatMillimetres(mm(Math.max(1, Math.ceil(within))));
+  const close =
+    unit === "in"
+      ? formatInches(mm(Math.max(step, Math.ceil(within / step - 1e-6) * step)), { denominator: 32 })
+      : formatMillimetres(mm(Math.max(1, Math.ceil(within))));
   if (reading === null) return `Looks like ${slip}: then all fit within ${close}.`;
   const value = unit === "in" ? formatInches(reading, { denominator: 32 }) : formatMillimetres(reading, 1);
   return `Looks like ${slip}: ${value} fits within ${close}.`;
@@ -47,7 +76,8 @@ function misread(length: Millimetres): { kind: "digits-swapped" | "six-for-nine"
   const digits = String(whole);
   const results: { kind: "digits-swapped" | "six-for-nine"; reading: Millimetres }[] = [];
   const add = (kind: "digits-swapped" | "six-for-nine", text: string) => {
-    if (text !== digits && !text.startsWith("0")) results.push({ kind, reading: inches(Number(text) + total - whole) });
+    if (text !== digits && !text.startsWith("0"))
+      results.push({ kind, reading: inches(Number(text) + total - whole) });
   };
   for (let i = 0; i + 1 < digits.length; i++)
     add("digits-swapped", `${digits.slice(0, i)}${digits[i + 1]}${digits[i]}${digits.slice(i + 2)}`);
@@ -63,7 +93,14 @@ function candidates(ties: readonly Tie[], side: 1 | -1): Candidate[] {
   ties.forEach((tie, i) => {
     const one = (kind: Suggestion["kind"], reading: number, slip: string) => {
       if (reading > 0)
-        list.push({ kind, mark: tie.mark, reading: mm(reading), side, slip, ties: ties.map((other, j) => (j === i ? { ...other, distance: mm(reading) } : other)) });
+        list.push({
+          kind,
+          mark: tie.mark,
+          reading: mm(reading),
+          side,
+          slip,
+          ties: ties.map((other, j) => (j === i ? { ...other, distance: mm(reading) } : other)),
+        });
     };
     const from = `on the tape from mark ${tie.mark}`;
     one("inch-burnt", tie.distance - MM_PER_INCH, `an inch burnt ${from}`);
@@ -73,10 +110,26 @@ function candidates(ties: readonly Tie[], side: 1 | -1): Candidate[] {
     for (const { kind, reading } of misread(tie.distance))
       one(kind, reading, `${kind === "digits-swapped" ? "two digits swapped" : "a 6 for a 9"} ${from}`);
     ties.slice(i + 1).forEach((other) => {
-      const swapped = ties.map((t) => (t === tie ? { ...t, distance: other.distance } : t === other ? { ...t, distance: tie.distance } : t));
-      list.push({ kind: "marks-swapped", mark: null, reading: null, side, slip: `the tapes from marks ${tie.mark} and ${other.mark} swapped`, ties: swapped });
+      const swapped = ties.map((t) =>
+        t === tie ? { ...t, distance: other.distance } : t === other ? { ...t, distance: tie.distance } : t,
+      );
+      list.push({
+        kind: "marks-swapped",
+        mark: null,
+        reading: null,
+        side,
+        slip: `the tapes from marks ${tie.mark} and ${other.mark} swapped`,
+        ties: swapped,
+      });
     });
   });
-  list.push({ kind: "sides-swapped", mark: null, reading: null, side: side === 1 ? -1 : 1, slip: "left and right swapped", ties: [...ties] });
+  list.push({
+    kind: "sides-swapped",
+    mark: null,
+    reading: null,
+    side: side === 1 ? -1 : 1,
+    slip: "left and right swapped",
+    ties: [...ties],
+  });
   return list;
 }

@@ -7,7 +7,10 @@ const CAUTIONS: Record<StepId, readonly string[]> = {
     "Chock every wheel that still touches the floor, and try the vehicle by hand before anyone goes under.",
     "Leaf springs and bump stops store energy: take the load off before a bolt is loosened.",
   ],
-  level: ["Raise with the jack, rest on the stand: read only with the jack down and hands clear.", "One stand at a time, others watched."],
+  level: [
+    "Raise with the jack, rest on the stand: read only with the jack down and hands clear.",
+    "One stand at a time, others watched.",
+  ],
   marks: [],
   drops: ["Nobody goes under while a stand is being touched."],
   "axle-line": ["Figures here are an aid to layout, not an engineering certificate."],
@@ -20,8 +23,13 @@ const CAUTIONS: Record<StepId, readonly string[]> = {
     "Changes to vehicles are regulated where you live: check before you cut.",
     "The parts maker's instructions and licensed practice come before these figures.",
   ],
-  tack: ["Battery and electronics disconnected, fuel and brake lines covered, eyes protected, air moving, somebody on fire watch."],
-  weld: ["Frame and suspension welds are for a qualified welder, to the code that applies.", "Torque with the bushings at ride height."],
+  tack: [
+    "Battery and electronics disconnected, fuel and brake lines covered, eyes protected, air moving, somebody on fire watch.",
+  ],
+  weld: [
+    "Frame and suspension welds are for a qualified welder, to the code that applies.",
+    "Torque with the bushings at ride height.",
+  ],
   finish: ["Brake hoses and wiring at full droop, steering lock to lock, then the road test."],
 };
 

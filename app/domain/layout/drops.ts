@@ -3,10 +3,26 @@ import { type Outcome, ok, problem } from "../outcome";
 import type { LengthUnit, Millimetres } from "../units/length";
 import { type Suggestion, suggestBlunders } from "./blunders";
 import type { DropSide } from "./drop-points";
-import { type Adjusted, adjustTies, type Ellipse, ellipseOf, isSuspect, type Tie, type TieResidual } from "./tie-fit";
+import {
+  type Adjusted,
+  adjustTies,
+  type Ellipse,
+  ellipseOf,
+  isSuspect,
+  type Tie,
+  type TieResidual,
+} from "./tie-fit";
 
-export { DROP_POINTS, DROP_SIDES, DROPS_NEEDED, type DropPoint, type DropPointId, type DropSide, dropPoint } from "./drop-points";
 export type { Suggestion } from "./blunders";
+export {
+  DROP_POINTS,
+  DROP_SIDES,
+  DROPS_NEEDED,
+  type DropPoint,
+  type DropPointId,
+  type DropSide,
+  dropPoint,
+} from "./drop-points";
 export { CRITICAL_W, type Ellipse, ellipseOf, type Tie, type TieResidual } from "./tie-fit";
 
 /**
@@ -14,7 +30,11 @@ export { CRITICAL_W, type Ellipse, ellipseOf, type Tie, type TieResidual } from 
  * @param reading station from A along the line; offset without a sign, the side says which way
  * @returns a problem when the offset is negative, or a centre point is given an offset
  */
-export function pointFromOffset(reading: { station: Millimetres; offset: Millimetres; side: DropSide }): Outcome<FloorPoint> {
+export function pointFromOffset(reading: {
+  station: Millimetres;
+  offset: Millimetres;
+  side: DropSide;
+}): Outcome<FloorPoint> {
   const { station, offset, side } = reading;
   if (side === "centre") return ok(floorPoint(station, offset));
   if (offset < 0) return problem("The offset is typed without a sign: left or right says which way.");
@@ -52,7 +72,8 @@ export function pointFromTies(
   if (ties.length < 2) return problem("Tape from two marks at least; a third checks the other two.");
   for (const [i, tie] of ties.entries()) {
     if (!(tie.distance > 0)) return problem(`The tape from ${tie.mark} has to be longer than nothing.`);
-    if (ties.slice(0, i).some((other) => other.mark === tie.mark)) return problem(`Mark ${tie.mark} is there twice.`);
+    if (ties.slice(0, i).some((other) => other.mark === tie.mark))
+      return problem(`Mark ${tie.mark} is there twice.`);
   }
   const sign = side === "left" ? 1 : -1;
   const fit = adjustTies(ties, sign, sigma, unit);
@@ -66,7 +87,10 @@ export function pointFromTies(
     suspect,
     suggestions,
     ellipse: ellipseOf(fit.value.covariance),
-    residuals: fit.value.residuals.map((residual, i) => ({ ...residual, wouldFit: checked ? wouldFit(ties, i, sign, sigma) : null })),
+    residuals: fit.value.residuals.map((residual, i) => ({
+      ...residual,
+      wouldFit: checked ? wouldFit(ties, i, sign, sigma) : null,
+    })),
     advice: advise(checked, suspect, suggestions),
   });
 }
@@ -85,5 +109,7 @@ function advise(checked: boolean, suspect: boolean, suggestions: readonly Sugges
   const [first] = suggestions;
   if (!first) return "The tapes do not meet, and no usual slip explains it: tape all of them again.";
   const places = new Set(suggestions.map((suggestion) => suggestion.mark ?? suggestion.kind));
-  return places.size > 1 ? "More than one slip would explain it: tape them again." : `${first.words} Tape it again, or keep it with that reason.`;
+  return places.size > 1
+    ? "More than one slip would explain it: tape them again."
+    : `${first.words} Tape it again, or keep it with that reason.`;
 }

@@ -1,4 +1,13 @@
-import { direction, distance, type FloorPoint, type FramePoint, framePoint, floorPoint, middle, turned } from "../geometry/point";
+import {
+  direction,
+  distance,
+  type FloorPoint,
+  type FramePoint,
+  floorPoint,
+  framePoint,
+  middle,
+  turned,
+} from "../geometry/point";
 import { type Outcome, ok, problem } from "../outcome";
 import { type Degrees, degrees } from "../units/angle";
 import { mm } from "../units/length";
@@ -6,7 +15,12 @@ import { mm } from "../units/length";
 /** The frame's own axes on the floor: origin in the middle of the rear datum pair, +station ahead along the centre line. */
 export type Frame = { origin: FloorPoint; angle: Degrees };
 
-export type DatumPairs = { frontLeft: FloorPoint; frontRight: FloorPoint; rearLeft: FloorPoint; rearRight: FloorPoint };
+export type DatumPairs = {
+  frontLeft: FloorPoint;
+  frontRight: FloorPoint;
+  rearLeft: FloorPoint;
+  rearRight: FloorPoint;
+};
 
 /** Datum pairs nearer to each other than this say nothing about the frame's direction. */
 const NEAREST = mm(300);

@@ -35,7 +35,11 @@ describe("levelGround", () => {
     expect([ids(ground.standing), ids(ground.waiting)]).toEqual([[2], []]);
   });
   it("follows the chain over several rounds", () => {
-    const ground = levelGround([round(1, { isVoid: true }), round(2, { isVoid: true, carriesId: 1, carryOffMm: 1 }), round(3)]);
+    const ground = levelGround([
+      round(1, { isVoid: true }),
+      round(2, { isVoid: true, carriesId: 1, carryOffMm: 1 }),
+      round(3),
+    ]);
     expect([ids(ground.standing), ids(ground.waiting)]).toEqual([[3], [1, 2]]);
   });
   it("leaves it open while levels come and go without a drop", () => {
@@ -44,7 +48,11 @@ describe("levelGround", () => {
     expect(carrierOf(rounds, rounds[2]!, 1)?.id).toBe(1);
   });
   it("carries from the newest round that has them", () => {
-    const rounds = [round(1, { isVoid: true }), round(2, { isVoid: true, carriesId: 1, carryOffMm: 1 }), round(3)];
+    const rounds = [
+      round(1, { isVoid: true }),
+      round(2, { isVoid: true, carriesId: 1, carryOffMm: 1 }),
+      round(3),
+    ];
     expect(carrierOf(rounds, rounds[2]!, 1)?.id).toBe(2);
   });
   it("lets drops wait while a new round is not true yet", () => {

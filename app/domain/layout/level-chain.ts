@@ -38,7 +38,9 @@ const isSettled = (round: Round) => round.carriesId !== null || round.carryOffMm
 function unsettledBefore(rounds: readonly Round[], round: Round): Set<number> {
   const waiting = new Set<number>();
   if (round.isTrue && isSettled(round)) return waiting;
-  const earlier = rounds.filter((one) => one.id < round.id && one.isTrue && one.bayId === round.bayId).reverse();
+  const earlier = rounds
+    .filter((one) => one.id < round.id && one.isTrue && one.bayId === round.bayId)
+    .reverse();
   for (const one of earlier) {
     for (const id of chainOf(rounds, one)) waiting.add(id);
     if (isSettled(one)) break;
@@ -65,5 +67,8 @@ export function levelGround(rounds: readonly Round[]): LevelGround {
 
 /** The newest round before this one that has the drops of that round: the one to carry them over from. */
 export function carrierOf(rounds: readonly Round[], before: Round, roundId: number): Round | null {
-  return rounds.filter((one) => one.id < before.id && one.isTrue && chainOf(rounds, one).has(roundId)).at(-1) ?? null;
+  return (
+    rounds.filter((one) => one.id < before.id && one.isTrue && chainOf(rounds, one).has(roundId)).at(-1) ??
+    null
+  );
 }

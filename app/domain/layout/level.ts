@@ -32,7 +32,8 @@ export function gaugeSlope(first: Degrees, turned: Degrees): { slope: Degrees; g
  * @returns a problem when there are fewer than three, or all stand in one line
  */
 export function levelFromHeights(stands: readonly StandHeight[]): Outcome<LevelReading> {
-  if (stands.length < 3) return problem("Heights at three stands or more make a level; a fourth shows twist.");
+  if (stands.length < 3)
+    return problem("Heights at three stands or more make a level; a fourth shows twist.");
   const fit = leastSquares(
     stands.map((stand) => [1, stand.x, stand.y]),
     stands.map((stand) => stand.height),
@@ -91,7 +92,8 @@ export function allowedSlope(allowedError: Millimetres, height: Millimetres): De
 }
 
 /** How far a point so high lands from where it would on a true frame: h·sin θ, sign of the slope kept. */
-export const landsOut = (height: Millimetres, slope: Degrees): Millimetres => mm(height * Math.sin(toRadians(slope)));
+export const landsOut = (height: Millimetres, slope: Degrees): Millimetres =>
+  mm(height * Math.sin(toRadians(slope)));
 
 export type LevelVerdict = { isTrue: boolean; headline: string; noseTrue: boolean; sideTrue: boolean };
 
@@ -102,11 +104,20 @@ const SPOKEN = 0.005;
  * The verdict on a level in words: "Right side high 0.60°, nose high 0.10°." the larger first; "Level both ways."
  * True when neither direction exceeds what is allowed; compared unrounded, equal is true.
  */
-export function levelVerdict(reading: Pick<LevelReading, "noseHigh" | "rightHigh">, allowed: Degrees): LevelVerdict {
+export function levelVerdict(
+  reading: Pick<LevelReading, "noseHigh" | "rightHigh">,
+  allowed: Degrees,
+): LevelVerdict {
   const { noseHigh, rightHigh } = reading;
   const parts = [
-    { size: Math.abs(rightHigh), words: `${rightHigh > 0 ? "right" : "left"} side high ${formatDegrees(degrees(Math.abs(rightHigh)))}` },
-    { size: Math.abs(noseHigh), words: `nose ${noseHigh > 0 ? "high" : "low"} ${formatDegrees(degrees(Math.abs(noseHigh)))}` },
+    {
+      size: Math.abs(rightHigh),
+      words: `${rightHigh > 0 ? "right" : "left"} side high ${formatDegrees(degrees(Math.abs(rightHigh)))}`,
+    },
+    {
+      size: Math.abs(noseHigh),
+      words: `nose ${noseHigh > 0 ? "high" : "low"} ${formatDegrees(degrees(Math.abs(noseHigh)))}`,
+    },
   ]
     .filter((part) => part.size >= SPOKEN)
     .sort((a, b) => b.size - a.size);
@@ -142,14 +153,23 @@ export function standCorrections(
   const level = levelFromHeights(stands);
   if (!level.ok) return level;
   const fitted = stands.map((stand, i) => stand.height - (level.value.residuals[i]?.residual ?? 0));
-  const movesTo = (target: number) => fitted.map((f) => Math.round((target - f) / options.shim + 1e-9) * options.shim);
+  const movesTo = (target: number) =>
+    fitted.map((f) => Math.round((target - f) / options.shim + 1e-9) * options.shim);
   const targets = options.mode === "raise" ? [Math.max(...fitted)] : fitted;
-  const cost = (moves: number[]) => [moves.filter((m) => m !== 0).length, moves.reduce((sum, m) => sum + Math.abs(m), 0)];
+  const cost = (moves: number[]) => [
+    moves.filter((m) => m !== 0).length,
+    moves.reduce((sum, m) => sum + Math.abs(m), 0),
+  ];
   const best = targets.map(movesTo).reduce((a, b) => {
     const [[na = 0, sa = 0], [nb = 0, sb = 0]] = [cost(a), cost(b)];
     return nb < na || (nb === na && sb < sa - 1e-9) ? b : a;
   });
-  const after = levelFromHeights(stands.map((stand, i) => ({ ...stand, height: mm(stand.height + (best[i] ?? 0)) })));
+  const after = levelFromHeights(
+    stands.map((stand, i) => ({ ...stand, height: mm(stand.height + (best[i] ?? 0)) })),
+  );
   if (!after.ok) return after;
-  return ok({ moves: stands.map((stand, i) => ({ id: stand.id, raise: mm((best[i] ?? 0) + 0) })), after: after.value });
+  return ok({
+    moves: stands.map((stand, i) => ({ id: stand.id, raise: mm((best[i] ?? 0) + 0) })),
+    after: after.value,
+  });
 }

@@ -36,7 +36,12 @@ describe("level", () => {
     expect(left.map((n) => Math.round(n * 1e6) / 1e6)).toEqual([1, -1, -1, 1]);
   });
   it("is not true at 0.1°, in words", () => {
-    expect(levelVerdict(level, degrees(0.1))).toMatchObject({ isTrue: false, noseTrue: true, sideTrue: false, headline: "Right side high 0.60°, nose high 0.10°." });
+    expect(levelVerdict(level, degrees(0.1))).toMatchObject({
+      isTrue: false,
+      noseTrue: true,
+      sideTrue: false,
+      headline: "Right side high 0.60°, nose high 0.10°.",
+    });
   });
   it("comes true by raising three stands in sixteenths", () => {
     const { moves, after } = must(standCorrections(STANDS, { mode: "raise", shim: inches(1 / 16) }));
@@ -48,7 +53,12 @@ describe("level", () => {
 });
 
 const frame = must(
-  frameFromDatums({ frontLeft: at(100, 16), frontRight: at(100, -16.25), rearLeft: at(20, 16.25), rearRight: at(20, -16) }),
+  frameFromDatums({
+    frontLeft: at(100, 16),
+    frontRight: at(100, -16.25),
+    rearLeft: at(20, 16.25),
+    rearRight: at(20, -16),
+  }),
 );
 const openings = must(
   compareOpenings(frame, {
@@ -115,7 +125,8 @@ describe("options", () => {
     expect(toInches(row(key)?.axleStation ?? inches(0))).toBeCloseTo(station, 9);
     expect(row(key)?.approach).toBeCloseTo(approach, 2);
   });
-  it("puts the pin-ahead spring in hole 2 at 47.5", () => expect(toInches(row("2:0:2")?.axleStation ?? inches(0))).toBeCloseTo(47.5, 9));
+  it("puts the pin-ahead spring in hole 2 at 47.5", () =>
+    expect(toInches(row("2:0:2")?.axleStation ?? inches(0))).toBeCloseTo(47.5, 9));
   it("offers a spring turned end for end only where that changes something", () => {
     expect(row("1:1:1")).toBeUndefined();
     expect(toInches(row("2:1:1")?.axleStation ?? inches(0))).toBeCloseTo(42.5, 9);
@@ -146,8 +157,18 @@ describe("an axle end taped from three marks", () => {
   it("says that the tapes do not meet, what each alone would have to read, and which slip explains it", () => {
     const fit = taped(64 + 3 / 16);
     expect(fit).toMatchObject({ suspect: true, checked: true, redundancy: 1 });
-    expect(fit.residuals.map((r) => formatInches(r.wouldFit ?? inches(0)))).toEqual(["68 3/16", "63 3/16", "98 11/16"]);
-    expect(fit.suggestions).toMatchObject([{ kind: "inch-burnt", mark: "B", words: "Looks like an inch burnt on the tape from mark B: 63 3/16 fits within 1/32." }]);
+    expect(fit.residuals.map((r) => formatInches(r.wouldFit ?? inches(0)))).toEqual([
+      "68 3/16",
+      "63 3/16",
+      "98 11/16",
+    ]);
+    expect(fit.suggestions).toMatchObject([
+      {
+        kind: "inch-burnt",
+        mark: "B",
+        words: "Looks like an inch burnt on the tape from mark B: 63 3/16 fits within 1/32.",
+      },
+    ]);
     // With one spare tape every standardized residual is the same size: seen, not located.
     const sizes = fit.residuals.map((r) => Math.abs(r.standardised ?? 0));
     expect(Math.max(...sizes) - Math.min(...sizes)).toBeLessThan(1e-6);

@@ -57,7 +57,8 @@ export type Option = {
   reasons: string[];
 };
 
-export const optionKey = (springId: number, turned: boolean, holeId: number) => `${springId}:${turned ? 1 : 0}:${holeId}`;
+export const optionKey = (springId: number, turned: boolean, holeId: number) =>
+  `${springId}:${turned ? 1 : 0}:${holeId}`;
 
 /**
  * Every spring in every hole, also turned end for end where its halves differ: where the axle comes to stand at full
@@ -94,7 +95,10 @@ function oneOption(input: OptionInput, spring: LeafSpring, turned: boolean, hole
     axleStation,
     shift: mm(axleStation - input.openingCentre),
     wheelbase: stock ? mm(stock.wheelbase + axleStation - stock.axleStation) : null,
-    approach: loadedRadius && lowPoints?.length ? (lowestApproach(loadedRadius, axleStation, lowPoints)?.angle ?? null) : null,
+    approach:
+      loadedRadius && lowPoints?.length
+        ? (lowestApproach(loadedRadius, axleStation, lowPoints)?.angle ?? null)
+        : null,
     frontRoom: room?.front ?? null,
     rearRoom: room?.rear ?? null,
     plusMinus: mm(2 * Math.hypot(sigma.hole, sigma.half)),
@@ -110,11 +114,18 @@ function reasonsAgainst(option: Option, { constraints = {}, unit = "in" }: Optio
   const size = (value: number) => formatLength(mm(Math.abs(value)), unit);
   const { approachAtLeast, shiftWithin, noRub } = constraints;
   if (approachAtLeast !== undefined && option.approach !== null && option.approach < approachAtLeast)
-    reasons.push(`Approach ${formatDegrees(option.approach)}, asked at least ${formatDegrees(approachAtLeast, Number.isInteger(approachAtLeast) ? 0 : 1)}.`);
+    reasons.push(
+      `Approach ${formatDegrees(option.approach)}, asked at least ${formatDegrees(approachAtLeast, Number.isInteger(approachAtLeast) ? 0 : 1)}.`,
+    );
   if (shiftWithin !== undefined && Math.abs(option.shift) > shiftWithin)
-    reasons.push(`${size(option.shift)} ${option.shift > 0 ? "ahead of" : "behind"} the centre, asked within ${size(shiftWithin)}.`);
+    reasons.push(
+      `${size(option.shift)} ${option.shift > 0 ? "ahead of" : "behind"} the centre, asked within ${size(shiftWithin)}.`,
+    );
   if (noRub)
-    for (const [edge, room] of [["front", option.frontRoom], ["rear", option.rearRoom]] as const) {
+    for (const [edge, room] of [
+      ["front", option.frontRoom],
+      ["rear", option.rearRoom],
+    ] as const) {
       if (!room) continue;
       const parts: string[] = [];
       if (room.straight < 0) parts.push(`at full compression by ${size(room.straight)}`);
@@ -125,7 +136,10 @@ function reasonsAgainst(option: Option, { constraints = {}, unit = "in" }: Optio
 }
 
 /** Can the two not be told apart by where they put the axle? They share the frame, so only hole and half count. */
-export function notDistinguishable(a: Pick<Option, "axleStation" | "plusMinus">, b: Pick<Option, "axleStation" | "plusMinus">): boolean {
+export function notDistinguishable(
+  a: Pick<Option, "axleStation" | "plusMinus">,
+  b: Pick<Option, "axleStation" | "plusMinus">,
+): boolean {
   return Math.abs(a.axleStation - b.axleStation) <= Math.hypot(a.plusMinus, b.plusMinus);
 }
 

@@ -51,20 +51,23 @@ const AFTER_LEVEL: readonly StepId[] = ["marks", "drops", "axle-line", "options"
  * Everything after Level stays shut until a level stands and is true.
  */
 export function whyShut(step: StepId, facts: StepFacts): string | null {
-  if (LAYOUT_STEPS.some((known) => known.id === step && known.later)) return "This step is kept on paper for now: it is not in this version.";
+  if (LAYOUT_STEPS.some((known) => known.id === step && known.later))
+    return "This step is kept on paper for now: it is not in this version.";
   if (step === "stands") return null;
   if (!facts.standsAcknowledged) return "Set the vehicle on stands first.";
   if (step === "level") return null;
   if (AFTER_LEVEL.includes(step)) {
     if (facts.level === "none") return "Level first: everything after depends on it.";
-    if (facts.level === "not-true") return "Not level yet: raise the stands as the Level step says, and read again.";
+    if (facts.level === "not-true")
+      return "Not level yet: raise the stands as the Level step says, and read again.";
     if (facts.level === "void")
       return `The level is void: ${facts.levelVoidReason ?? "it was broken"}. Level again${facts.dropsKept > 0 || facts.dropsSuspect > 0 ? ", then drop one old point again" : ""}.`;
   }
   if (step === "marks") return null;
   if (!facts.marksConfirmed) return "Check the control marks first: tape A to B.";
   if (step === "drops") return null;
-  if (facts.redropWanted) return "The level is new: drop one old point again, to see whether the old drops stand.";
+  if (facts.redropWanted)
+    return "The level is new: drop one old point again, to see whether the old drops stand.";
   if (facts.dropsSuspect > 0) return "Tapes that do not meet have to be measured again first.";
   if (facts.dropsKept < facts.dropsNeeded) return `${facts.dropsNeeded - facts.dropsKept} drops are missing.`;
   if (step === "axle-line") return null;
@@ -111,7 +114,8 @@ const noteFor = (step: StepId, facts: StepFacts): string => {
     if (facts.redropWanted) return "drop one again";
     return facts.dropsKept > 0 ? `${facts.dropsKept} of ${facts.dropsNeeded} kept` : "";
   }
-  if (step === "approval") return facts.approval === "none" ? "" : facts.approval === "void" ? "void" : "signed";
+  if (step === "approval")
+    return facts.approval === "none" ? "" : facts.approval === "void" ? "void" : "signed";
   return "";
 };
 
@@ -124,7 +128,8 @@ export function stepStates(facts: StepFacts): StepState[] {
     if (id === "level" && facts.level === "void") return { id, label, state: "void", note };
     if (id === "approval" && facts.approval === "void") return { id, label, state: "void", note };
     const shut = whyShut(id, facts) !== null;
-    if (isDone(id, facts)) return { id, label, state: shut ? "void" : "done", note: shut ? "waits for the level" : note };
+    if (isDone(id, facts))
+      return { id, label, state: shut ? "void" : "done", note: shut ? "waits for the level" : note };
     if (id === next) return { id, label, state: "in-hand", note };
     return { id, label, state: shut ? "shut" : "open", note };
   });

@@ -44,7 +44,10 @@ export function twoTapes(first: Tie, second: Tie, side: 1 | -1): FloorPoint | nu
   const [ux, uy] = [(second.at.x - first.at.x) / base, (second.at.y - first.at.y) / base];
   const off = Math.sqrt(square);
   const foot = floorPoint(first.at.x + ux * along, first.at.y + uy * along);
-  const points = [floorPoint(foot.x - uy * off, foot.y + ux * off), floorPoint(foot.x + uy * off, foot.y - ux * off)] as const;
+  const points = [
+    floorPoint(foot.x - uy * off, foot.y + ux * off),
+    floorPoint(foot.x + uy * off, foot.y - ux * off),
+  ] as const;
   return points[0].y * side >= points[1].y * side ? points[0] : points[1];
 }
 
@@ -55,8 +58,12 @@ function start(ties: readonly Tie[], side: 1 | -1): FloorPoint | null {
     for (const b of ties.slice(i + 1)) {
       const point = twoTapes(a, b, side);
       if (!point) continue;
-      const [va, vb] = [floorPoint(point.x - a.at.x, point.y - a.at.y), floorPoint(point.x - b.at.x, point.y - b.at.y)];
-      const crossing = Math.abs(va.x * vb.y - va.y * vb.x) / Math.max(1e-9, Math.hypot(va.x, va.y) * Math.hypot(vb.x, vb.y));
+      const [va, vb] = [
+        floorPoint(point.x - a.at.x, point.y - a.at.y),
+        floorPoint(point.x - b.at.x, point.y - b.at.y),
+      ];
+      const crossing =
+        Math.abs(va.x * vb.y - va.y * vb.x) / Math.max(1e-9, Math.hypot(va.x, va.y) * Math.hypot(vb.x, vb.y));
       if (!best || crossing > best.crossing) best = { point, crossing };
     }
   return best?.point ?? null;
@@ -67,7 +74,12 @@ function start(ties: readonly Tie[], side: 1 | -1): FloorPoint | null {
  * @param sigma standard uncertainty of one tape
  * @returns a problem when no two tapes reach each other, or the point cannot be told from them
  */
-export function adjustTies(ties: readonly Tie[], side: 1 | -1, sigma: Millimetres, unit: LengthUnit = "in"): Outcome<Adjusted> {
+export function adjustTies(
+  ties: readonly Tie[],
+  side: 1 | -1,
+  sigma: Millimetres,
+  unit: LengthUnit = "in",
+): Outcome<Adjusted> {
   let point = start(ties, side);
   if (!point) {
     const [a, b] = ties;

@@ -1,7 +1,7 @@
 import type { VehicleKind } from "../builds/vehicle-kinds";
+import type { FloorPoint } from "../geometry/point";
 import type { Degrees } from "../units/angle";
 import type { LengthUnit, Millimetres } from "../units/length";
-import type { FloorPoint } from "../geometry/point";
 import type { AxleLine, OpeningComparison } from "./axle-line";
 import type { DropPointId, DropSide, TieFit } from "./drops";
 import type { Frame } from "./frame";

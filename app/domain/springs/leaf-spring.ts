@@ -16,7 +16,8 @@ export function halves(spring: LeafSpring, turned: boolean): { front: Millimetre
 
 /** Halves nearer to each other than this count as equal: turning the spring changes nothing. */
 const SAME = 25.4 / 64;
-export const isCentred = (spring: LeafSpring): boolean => Math.abs(spring.length - 2 * spring.frontHalf) < SAME;
+export const isCentred = (spring: LeafSpring): boolean =>
+  Math.abs(spring.length - 2 * spring.frontHalf) < SAME;
 
 /** How far the pin sits ahead of the middle; negative: behind. */
 export const pinAhead = (spring: LeafSpring, turned = false): Millimetres =>
@@ -38,5 +39,8 @@ export type FixedEye = "ahead" | "behind";
  * Where the axle pin stands with the spring flat: one half from the fixed eye. Flat is about full compression.
  * @param half the half between the fixed eye and the pin
  */
-export const axleFromFixedEye = (eyeStation: Millimetres, half: Millimetres, fixedEye: FixedEye): Millimetres =>
-  mm(fixedEye === "ahead" ? eyeStation - half : eyeStation + half);
+export const axleFromFixedEye = (
+  eyeStation: Millimetres,
+  half: Millimetres,
+  fixedEye: FixedEye,
+): Millimetres => mm(fixedEye === "ahead" ? eyeStation - half : eyeStation + half);

@@ -36,7 +36,8 @@ describe("readCode", () => {
     ["http://192.168.1.20:3000/t/M3XF", "M3XF"],
     ["https://shop.example/t/m3xf?from=tag", "M3XF"],
   ])("reads %s", (typed, code) => expect(readCode(typed)).toBe(code));
-  it.each(["", "M3X", "M3XFF", "M3X0", "M3XO", "https://elsewhere.example/x/M3XF/y", "<script>"])("does not read %s", (typed) =>
-    expect(readCode(typed)).toBeNull(),
+  it.each(["", "M3X", "M3XFF", "M3X0", "M3XO", "https://elsewhere.example/x/M3XF/y", "<script>"])(
+    "does not read %s",
+    (typed) => expect(readCode(typed)).toBeNull(),
   );
 });

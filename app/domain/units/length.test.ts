@@ -1,6 +1,16 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
-import { formatDecimalInches, formatFeet, formatInches, formatLength, inches, inchParts, mm, parseLength, toInches } from "./length";
+import {
+  formatDecimalInches,
+  formatFeet,
+  formatInches,
+  formatLength,
+  inches,
+  inchParts,
+  mm,
+  parseLength,
+  toInches,
+} from "./length";
 
 const value = (text: string, unit: "in" | "mm" = "in") => {
   const parsed = parseLength(text, unit);
@@ -22,7 +32,7 @@ describe("parseLength", () => {
     ["1/2", 0.5],
     ["26 1/2 in", 26.5],
     ['26"', 26],
-    ['2\' 2 1/2"', 26.5],
+    ["2' 2 1/2\"", 26.5],
     ["2' 2.5", 26.5],
     ["2'-2 1/2\"", 26.5],
     ["2ft 2.5in", 26.5],
@@ -64,7 +74,13 @@ describe("parseLength", () => {
     ["NaN", /is not a length/],
   ])("says what is wrong with %j", (text, words) => expect(fault(text)).toMatch(words));
   it("never throws, whatever is typed", () => {
-    fc.assert(fc.property(fc.string(), fc.constantFrom("in" as const, "mm" as const), (text, unit) => typeof parseLength(text, unit).ok === "boolean"));
+    fc.assert(
+      fc.property(
+        fc.string(),
+        fc.constantFrom("in" as const, "mm" as const),
+        (text, unit) => typeof parseLength(text, unit).ok === "boolean",
+      ),
+    );
   });
   it.each([16, 32, 64] as const)("reads back what formatInches writes, to 1/%i", (denominator) => {
     fc.assert(
@@ -78,7 +94,9 @@ describe("parseLength", () => {
     fc.assert(
       fc.property(fc.integer({ min: 1, max: 64 * 300 }), (steps) => {
         const stored = mm(Number(inches(steps / 64).toFixed(6)));
-        return formatInches(stored, { denominator: 64 }) === formatInches(inches(steps / 64), { denominator: 64 });
+        return (
+          formatInches(stored, { denominator: 64 }) === formatInches(inches(steps / 64), { denominator: 64 })
+        );
       }),
     );
   });

@@ -1,10 +1,9 @@
 import { type LengthUnit, type Millimetres, toInches } from "./millimetres";
 
-export { inches, type LengthUnit, MM_PER_INCH, type Millimetres, mm, toInches } from "./millimetres";
+export { inches, type LengthUnit, type Millimetres, MM_PER_INCH, mm, toInches } from "./millimetres";
 export { parseLength } from "./parse-length";
 
 const INCHES_PER_FOOT = 12;
-
 
 export type Denominator = 16 | 32 | 64;
 export type InchParts = { sign: "" | "−"; whole: number; numerator: number; denominator: number };
@@ -31,11 +30,15 @@ export function inchParts(length: Millimetres, denominator: number = 16): InchPa
 }
 
 /** "26 1/2", "−1/8", "0": to the nearest 1/denominator (16 unless told), halves away from zero; with `sign` also "+1/8". */
-export function formatInches(length: Millimetres, options: { denominator?: Denominator; sign?: boolean } = {}): string {
+export function formatInches(
+  length: Millimetres,
+  options: { denominator?: Denominator; sign?: boolean } = {},
+): string {
   const { sign, whole, numerator, denominator } = inchParts(length, options.denominator ?? 16);
   const plus = options.sign && sign === "" && (whole > 0 || numerator > 0) ? "+" : "";
   const fraction = numerator === 0 ? "" : `${numerator}/${denominator}`;
-  const size = whole === 0 && fraction !== "" ? fraction : fraction === "" ? String(whole) : `${whole} ${fraction}`;
+  const size =
+    whole === 0 && fraction !== "" ? fraction : fraction === "" ? String(whole) : `${whole} ${fraction}`;
   return `${sign || plus}${size}`;
 }
 
@@ -45,9 +48,13 @@ export function formatFeet(length: Millimetres, denominator: number = 1): string
   const feet = Math.floor(parts.whole / INCHES_PER_FOOT);
   const rest = parts.whole - feet * INCHES_PER_FOOT;
   const fraction = parts.numerator === 0 ? "" : `${parts.numerator}/${parts.denominator}`;
-  const inchesPart = [rest === 0 && fraction !== "" ? "" : String(rest), fraction].filter((part) => part !== "").join(" ");
+  const inchesPart = [rest === 0 && fraction !== "" ? "" : String(rest), fraction]
+    .filter((part) => part !== "")
+    .join(" ");
   if (feet === 0) return `${parts.sign}${inchesPart} in`;
-  return rest === 0 && fraction === "" ? `${parts.sign}${feet} ft` : `${parts.sign}${feet} ft ${inchesPart} in`;
+  return rest === 0 && fraction === ""
+    ? `${parts.sign}${feet} ft`
+    : `${parts.sign}${feet} ft ${inchesPart} in`;
 }
 
 /** "673 mm", "12.7 mm" with one decimal. */
@@ -68,5 +75,7 @@ export function formatLength(
   unit: LengthUnit,
   options: { denominator?: Denominator; sign?: boolean; decimals?: number } = {},
 ): string {
-  return unit === "in" ? `${formatInches(length, options)} in` : formatMillimetres(length, options.decimals ?? 1);
+  return unit === "in"
+    ? `${formatInches(length, options)} in`
+    : formatMillimetres(length, options.decimals ?? 1);
 }

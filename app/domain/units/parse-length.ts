@@ -6,7 +6,15 @@ const EXAMPLE = "for example 26 1/2";
 const LONGEST_MM = 100_000;
 
 const VULGAR: Record<string, string> = {
-  "½": "1/2", "¼": "1/4", "¾": "3/4", "⅛": "1/8", "⅜": "3/8", "⅝": "5/8", "⅞": "7/8", "⅓": "1/3", "⅔": "2/3",
+  "½": "1/2",
+  "¼": "1/4",
+  "¾": "3/4",
+  "⅛": "1/8",
+  "⅜": "3/8",
+  "⅝": "5/8",
+  "⅞": "7/8",
+  "⅓": "1/3",
+  "⅔": "2/3",
 };
 
 const METRIC: Record<string, number> = { mm: 1, cm: 10, m: 1000 };
@@ -44,7 +52,9 @@ function mixed(text: string): Outcome<number> {
   }
   if (cleaned.includes("/")) return problem(`“${cleaned}” is not a fraction as on the tape, ${EXAMPLE}.`);
   const value = decimal(cleaned);
-  return value === null ? problem(`“${cleaned}” is not a length: type it as on the tape, ${EXAMPLE}.`) : ok(value);
+  return value === null
+    ? problem(`“${cleaned}” is not a length: type it as on the tape, ${EXAMPLE}.`)
+    : ok(value);
 }
 
 function imperial(text: string): Outcome<Millimetres> {
@@ -56,9 +66,13 @@ function imperial(text: string): Outcome<Millimetres> {
   const [, feetText = "", restText = ""] = feet;
   const whole = decimal(feetText);
   if (whole === null) return problem(`“${feetText}” is not a number of feet.`);
-  const rest = restText.replace(/\s*(?:"|in\.?|inch|inches)$/, "").replace(/^-\s*/, "").trim();
+  const rest = restText
+    .replace(/\s*(?:"|in\.?|inch|inches)$/, "")
+    .replace(/^-\s*/, "")
+    .trim();
   if (rest === "") return ok(inches(whole * 12));
-  if (!Number.isInteger(whole)) return problem("Feet with a decimal and inches besides: type one or the other.");
+  if (!Number.isInteger(whole))
+    return problem("Feet with a decimal and inches besides: type one or the other.");
   const value = mixed(rest);
   if (!value.ok) return value;
   if (value.value >= 12) return problem(`${rest} after the feet is 12 in or more: read the tape again.`);
@@ -86,7 +100,9 @@ export function parseLength(text: string, bareUnit: LengthUnit): Outcome<Millime
     const value = decimal(number.trim());
     result =
       value === null
-        ? problem(`“${number.trim()}” is not a number of ${unit}: type it with a point, for example 673.5 ${unit}.`)
+        ? problem(
+            `“${number.trim()}” is not a number of ${unit}: type it with a point, for example 673.5 ${unit}.`,
+          )
         : ok(mm(value * (METRIC[unit] ?? 1)));
   } else result = imperial(rest);
   if (!result.ok) return result;

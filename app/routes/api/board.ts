@@ -1,6 +1,6 @@
-import { requireActor } from "~/http/request.server";
 import { appContext } from "~/context";
 import { readBoard } from "~/db/queries/board.server";
+import { requireActor } from "~/http/request.server";
 import type { Route } from "./+types/board";
 
 /** GET /api/v1/board: the floor as it is now (see domain/floor/board.ts for its shape). */

@@ -1,6 +1,6 @@
 import { Link } from "react-router";
-import { QrSvg } from "~/components/tag/qr-svg";
 import { LayoutSheet } from "~/components/layout/sheet/layout-sheet";
+import { QrSvg } from "~/components/tag/qr-svg";
 import { appContext } from "~/context";
 import { idParam, orErrorPage, publicOrigin, requireActor } from "~/http/request.server";
 import { readLayout } from "~/services/layouts/read-layout.server";
@@ -9,13 +9,19 @@ import { Verdict } from "~/ui/verdict";
 import { qrPicture } from "../builds/qr.server";
 import type { Route } from "./+types/sheet";
 
-export const meta: Route.MetaFunction = ({ data }) => [{ title: `Layout sheet${data ? ` · ${data.view.vehicle.nickname}` : ""} · Plumbay` }];
+export const meta: Route.MetaFunction = ({ data }) => [
+  { title: `Layout sheet${data ? ` · ${data.view.vehicle.nickname}` : ""} · Plumbay` },
+];
 
 export async function loader({ request, params, context }: Route.LoaderArgs) {
   const actor = requireActor(context, "layouts:see");
   const { db, now } = context.get(appContext);
   const view = await orErrorPage(() => readLayout(db, actor.shopId, idParam(params.layoutId)));
-  return { view, qr: qrPicture(`${publicOrigin(request)}/t/${view.vehicle.code}`), printedAt: now().toISOString() };
+  return {
+    view,
+    qr: qrPicture(`${publicOrigin(request)}/t/${view.vehicle.code}`),
+    printedAt: now().toISOString(),
+  };
 }
 
 export default function Sheet({ loaderData }: Route.ComponentProps) {
@@ -33,7 +39,12 @@ export default function Sheet({ loaderData }: Route.ComponentProps) {
       </nav>
       {option && view.approval ? (
         <main className="overflow-x-auto">
-          <LayoutSheet view={view} option={option} printedAt={printedAt} qr={<QrSvg {...qr} name={`QR code of ${view.vehicle.nickname}`} />} />
+          <LayoutSheet
+            view={view}
+            option={option}
+            printedAt={printedAt}
+            qr={<QrSvg {...qr} name={`QR code of ${view.vehicle.nickname}`} />}
+          />
         </main>
       ) : (
         <main className="mx-auto max-w-2xl p-4">
@@ -41,7 +52,11 @@ export default function Sheet({ loaderData }: Route.ComponentProps) {
           <Verdict
             tone={view.approval ? "void" : "empty"}
             sign={view.approval ? "void" : "approve"}
-            title={view.approval ? `Sheet ${view.approval.sheetRevision} is void: ${view.approval.voided?.reason ?? "a number changed"}.` : "There is no sheet yet."}
+            title={
+              view.approval
+                ? `Sheet ${view.approval.sheetRevision} is void: ${view.approval.voided?.reason ?? "a number changed"}.`
+                : "There is no sheet yet."
+            }
             detail="A sheet is made when the foreman approves an option. Nothing is marked before that."
           />
         </main>

@@ -12,5 +12,7 @@ export async function action({ context }: Route.ActionArgs) {
     await endSession(db, actor.sessionHash, now());
     dropSession(actor.sessionHash);
   }
-  throw redirect("/sign-in", { headers: { "Set-Cookie": await sessionCookie().serialize("", { maxAge: 0 }) } });
+  throw redirect("/sign-in", {
+    headers: { "Set-Cookie": await sessionCookie().serialize("", { maxAge: 0 }) },
+  });
 }

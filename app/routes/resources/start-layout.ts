@@ -6,5 +6,10 @@ import type { Route } from "./+types/start-layout";
 
 export async function action({ request, params, context }: Route.ActionArgs) {
   const form = await request.formData();
-  return answer(form, () => startLayout(serviceContext(context), { buildId: idParam(params.buildId), ...readForm(form, StartLayoutForm) }));
+  return answer(form, () =>
+    startLayout(serviceContext(context), {
+      buildId: idParam(params.buildId),
+      ...readForm(form, StartLayoutForm),
+    }),
+  );
 }

@@ -54,12 +54,28 @@ export default function Devices({ loaderData, actionData }: Route.ComponentProps
             Pair a display
           </h2>
           <p>
-            On the display, open <b>/pair</b> in its browser. It shows a code: type it here. Never pair a display that you do
-            not see.
+            On the display, open <b>/pair</b> in its browser. It shows a code: type it here. Never pair a
+            display that you do not see.
           </p>
-          <Form method="post" className="grid items-start gap-4 md:grid-cols-[2fr_2fr_1fr_auto]" key={refused ? "again" : devices.length}>
-            <Field label="Code on the display" name="code" autoComplete="off" defaultValue={refused?.typed.code} error={refused?.fields.code} />
-            <Field label="Name" name="name" hint="Such as: Wall by the door" defaultValue={refused?.typed.name} error={refused?.fields.name} />
+          <Form
+            method="post"
+            className="grid items-start gap-4 md:grid-cols-[2fr_2fr_1fr_auto]"
+            key={refused ? "again" : devices.length}
+          >
+            <Field
+              label="Code on the display"
+              name="code"
+              autoComplete="off"
+              defaultValue={refused?.typed.code}
+              error={refused?.fields.code}
+            />
+            <Field
+              label="Name"
+              name="name"
+              hint="Such as: Wall by the door"
+              defaultValue={refused?.typed.name}
+              error={refused?.fields.name}
+            />
             <SelectField label="Kind" name="kind" defaultValue={refused?.typed.kind ?? "wall"}>
               <option value="wall">Wall</option>
               <option value="post">Post</option>

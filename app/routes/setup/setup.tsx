@@ -1,9 +1,9 @@
 import { Form, Link, useNavigation } from "react-router";
+import { may } from "~/auth/permissions";
 import { Shell } from "~/components/frame/shell";
 import { appContext } from "~/context";
 import { readShop } from "~/db/queries/shop.server";
 import { formatLength, mm } from "~/domain/units/length";
-import { may } from "~/auth/permissions";
 import { readForm } from "~/http/form.server";
 import { answer, requireActor, serviceContext } from "~/http/request.server";
 import { readShell } from "~/http/shell.server";
@@ -19,7 +19,8 @@ export async function loader({ context }: Route.LoaderArgs) {
   const actor = requireActor(context, "setup:see");
   const { db } = context.get(appContext);
   const shop = await readShop(db, actor.shopId);
-  const words = (value: number, denominator: 16 | 32 | 64 = 32) => formatLength(mm(value), shop.unit, { denominator });
+  const words = (value: number, denominator: 16 | 32 | 64 = 32) =>
+    formatLength(mm(value), shop.unit, { denominator });
   return {
     shell: await readShell(context, actor),
     mayEdit: may(actor.role, "setup:edit"),
@@ -91,10 +92,22 @@ export default function Setup({ loaderData, actionData }: Route.ComponentProps) 
           </fieldset>
           <fieldset className="grid gap-4 md:grid-cols-3">
             <legend className="label mb-3">Level</legend>
-            <Field label="Slope allowed, degrees" hint="Either way. 0.1 is common practice." {...field("allowedSlopeDeg")} />
+            <Field
+              label="Slope allowed, degrees"
+              hint="Either way. 0.1 is common practice."
+              {...field("allowedSlopeDeg")}
+            />
             <Field label="Smallest shim" {...field("shim")} />
-            <Field label="Old drops stand within" hint="When one is dropped again after a new level." {...field("redropTolerance")} />
-            <Field label="Control marks within" hint="A to B as taped against what is set." {...field("markTolerance")} />
+            <Field
+              label="Old drops stand within"
+              hint="When one is dropped again after a new level."
+              {...field("redropTolerance")}
+            />
+            <Field
+              label="Control marks within"
+              hint="A to B as taped against what is set."
+              {...field("markTolerance")}
+            />
           </fieldset>
           <fieldset className="grid gap-4 md:grid-cols-3">
             <legend className="label mb-3">How sure a reading is (one standard deviation)</legend>

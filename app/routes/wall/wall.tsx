@@ -1,5 +1,4 @@
 import "~/components/wall/wall.css";
-import { STAGE_LABEL } from "~/domain/builds/stages";
 import { clock, dayAndDate, spanInWords, whenInWords } from "~/components/time";
 import { useNow } from "~/components/wall/use-now";
 import { WallCell } from "~/components/wall/wall-cell";
@@ -7,6 +6,7 @@ import { burnInShift, wallPages } from "~/components/wall/wall-words";
 import { appContext } from "~/context";
 import { readBoard } from "~/db/queries/board.server";
 import { readShop } from "~/db/queries/shop.server";
+import { STAGE_LABEL } from "~/domain/builds/stages";
 import type { Board, NextCard } from "~/domain/floor/board";
 import { requireActor } from "~/http/request.server";
 import type { LiveStatus } from "~/realtime/live-status";
@@ -87,8 +87,11 @@ export default function Wall({ loaderData }: Route.ComponentProps) {
 type HeadProps = { now: number; zone: string; status: LiveStatus };
 
 function LiveHead({ now, zone, status, isDemo, board }: HeadProps & { isDemo: boolean; board: Board }) {
-  const voids = board.bays.filter((card) => card.vehicle?.level.state === "void").map((card) => card.bay.number);
-  const heard = status.lastHeard === null ? null : Math.max(0, Math.round((Date.now() - status.lastHeard) / 1000));
+  const voids = board.bays
+    .filter((card) => card.vehicle?.level.state === "void")
+    .map((card) => card.bay.number);
+  const heard =
+    status.lastHeard === null ? null : Math.max(0, Math.round((Date.now() - status.lastHeard) / 1000));
   return (
     <header className="wall-head">
       <time className="wall-clock">{clock(new Date(now), zone)}</time>
@@ -97,9 +100,7 @@ function LiveHead({ now, zone, status, isDemo, board }: HeadProps & { isDemo: bo
       {voids.length > 0 ? (
         <span className="wall-call" role="status">
           <Sign name="void" size="calc(70 * var(--u))" />
-          <b className="wall-79 font-bold">
-            Level void in Bay {voids.join(" and ")}
-          </b>
+          <b className="wall-79 font-bold">Level void in Bay {voids.join(" and ")}</b>
         </span>
       ) : (
         <span className="flex-1" />
@@ -116,14 +117,14 @@ function LiveHead({ now, zone, status, isDemo, board }: HeadProps & { isDemo: bo
 function StaleHead({ now, zone, status, servedAt }: HeadProps & { servedAt: string }) {
   const heard = status.lastHeard ?? Date.parse(servedAt);
   return (
-    <header className="wall-head stale" role="alert">
+    <div className="wall-head stale" role="alert">
       <Sign name="stale" size="calc(84 * var(--u))" />
       <b className="wall-clock">NOT LIVE</b>
       <span className="wall-50">
         Last heard {clock(new Date(heard), zone)}, {spanInWords(Math.max(0, now - heard))} ago
       </span>
       <time className="wall-79 ml-auto font-semibold">{clock(new Date(now), zone)}</time>
-    </header>
+    </div>
   );
 }
 
@@ -134,8 +135,8 @@ function NextMoves({ next, now, zone }: { next: NextCard[]; now: number; zone: s
       <span className="text-line">Next</span>
       {next.slice(0, NEXT_SHOWN).map((card) => (
         <span key={card.stintId}>
-          <b className="font-semibold">{whenInWords(card.at, new Date(now), zone)}</b> {card.nickname} {STAGE_LABEL[card.stage].toLowerCase()}, Bay{" "}
-          {card.bayNumber}
+          <b className="font-semibold">{whenInWords(card.at, new Date(now), zone)}</b> {card.nickname}{" "}
+          {STAGE_LABEL[card.stage].toLowerCase()}, Bay {card.bayNumber}
         </span>
       ))}
     </>

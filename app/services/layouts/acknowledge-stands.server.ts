@@ -1,7 +1,7 @@
 import { eq } from "drizzle-orm";
 import { schema } from "../../db/client.server";
 import { readBayOfBuild } from "../../db/queries/layouts.server";
-import { change, type Context } from "../change.server";
+import { type Context, change } from "../change.server";
 import { Refusal } from "../errors";
 import { layoutTouches, measurer, openStep } from "./step-guard.server";
 
@@ -13,7 +13,10 @@ export async function acknowledgeStands(ctx: Context, layoutId: number): Promise
     if (head.layout.standsAt) return { words: "Set on stands already." };
     if (!(await readBayOfBuild(tx, head.build.id)))
       throw new Refusal("conflict", `${head.vehicle.nickname} stands in the yard: put it in a bay first.`);
-    await tx.update(schema.layouts).set({ standsAt: ctx.now(), standsBy: actor.personId }).where(eq(schema.layouts.id, layoutId));
+    await tx
+      .update(schema.layouts)
+      .set({ standsAt: ctx.now(), standsBy: actor.personId })
+      .where(eq(schema.layouts.id, layoutId));
     note({
       verb: "acknowledge-stands",
       subject: { kind: "layout", id: layoutId },

@@ -8,7 +8,12 @@ const { stages } = schema;
  * Keeps a build's stages in step with its layout: what the layout has finished is done, what it has begun is under way.
  * A stage that somebody finished by hand stays finished.
  */
-export async function advanceStages(tx: Tx, buildId: number, now: Date, to: { done: StageKind[]; begun: StageKind | null }): Promise<void> {
+export async function advanceStages(
+  tx: Tx,
+  buildId: number,
+  now: Date,
+  to: { done: StageKind[]; begun: StageKind | null },
+): Promise<void> {
   if (to.done.length > 0)
     await tx
       .update(stages)

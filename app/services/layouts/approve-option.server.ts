@@ -1,7 +1,7 @@
 import { eq } from "drizzle-orm";
 import { schema } from "../../db/client.server";
 import { formatDecimalInches, mm } from "../../domain/units/length";
-import { change, type Context } from "../change.server";
+import { type Context, change } from "../change.server";
 import { Refusal } from "../errors";
 import { advanceStages } from "./advance-stages.server";
 import { layoutTouches, measurer, openStep } from "./step-guard.server";
@@ -13,18 +13,35 @@ const { approvals, layouts } = schema;
  * @param expectedKey the option that the foreman saw; null when the screen did not say
  * @throws Refusal conflict when the level, the drops or the choice do not stand, or it is signed already
  */
-export async function approveOption(ctx: Context, layoutId: number, expectedKey: string | null): Promise<{ words: string; sheetRevision: number }> {
+export async function approveOption(
+  ctx: Context,
+  layoutId: number,
+  expectedKey: string | null,
+): Promise<{ words: string; sheetRevision: number }> {
   const actor = measurer(ctx, "options:approve");
   return change(ctx, async (tx, note) => {
     const { head, facts, choice, changed, approvalRow } = await openStep(tx, ctx, layoutId, "approval");
     if (!choice) throw new Refusal("conflict", "No option is in hand.");
-    if (changed) throw new Refusal("conflict", "The numbers under this option have changed since it was put in hand: choose again.");
-    if (expectedKey !== null && expectedKey !== choice.key) throw new Refusal("conflict", "Another option was put in hand meanwhile: look again before you sign.");
-    if (facts.dropsSuspect > 0) throw new Refusal("conflict", "Tapes that do not meet have to be measured again first.");
-    if (approvalRow && !approvalRow.approval.voidedAt) throw new Refusal("conflict", `${approvalRow.name} has signed this already.`);
+    if (changed)
+      throw new Refusal(
+        "conflict",
+        "The numbers under this option have changed since it was put in hand: choose again.",
+      );
+    if (expectedKey !== null && expectedKey !== choice.key)
+      throw new Refusal("conflict", "Another option was put in hand meanwhile: look again before you sign.");
+    if (facts.dropsSuspect > 0)
+      throw new Refusal("conflict", "Tapes that do not meet have to be measured again first.");
+    if (approvalRow && !approvalRow.approval.voidedAt)
+      throw new Refusal("conflict", `${approvalRow.name} has signed this already.`);
     const sheetRevision = head.layout.sheetRevision + 1;
     await tx.update(layouts).set({ sheetRevision }).where(eq(layouts.id, layoutId));
-    await tx.insert(approvals).values({ shopId: actor.shopId, choiceId: choice.choice.id, sheetRevision, approvedBy: actor.personId, approvedAt: ctx.now() });
+    await tx.insert(approvals).values({
+      shopId: actor.shopId,
+      choiceId: choice.choice.id,
+      sheetRevision,
+      approvedBy: actor.personId,
+      approvedAt: ctx.now(),
+    });
     await advanceStages(tx, head.build.id, ctx.now(), { done: ["level", "layout", "approval"], begun: null });
     const station = formatDecimalInches(mm(choice.choice.axleStationMm));
     note({

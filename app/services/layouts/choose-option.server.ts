@@ -2,7 +2,7 @@ import { and, eq, isNull } from "drizzle-orm";
 import { schema } from "../../db/client.server";
 import { describeSpring } from "../../domain/springs/leaf-spring";
 import { formatDecimalInches } from "../../domain/units/length";
-import { change, type Context } from "../change.server";
+import { type Context, change } from "../change.server";
 import { Refusal } from "../errors";
 import { voidApprovals } from "../void-level.server";
 import { layoutTouches, measurer, openStep } from "./step-guard.server";
@@ -17,13 +17,21 @@ export async function chooseOption(ctx: Context, layoutId: number, key: string):
   const actor = measurer(ctx);
   return change(ctx, async (tx, note) => {
     const { head, geometry, ground, choice, changed } = await openStep(tx, ctx, layoutId, "options");
-    if (!geometry.options || !ground.newest) throw new Refusal("conflict", geometry.missing[0] ?? "There are no options yet.");
+    if (!geometry.options || !ground.newest)
+      throw new Refusal("conflict", geometry.missing[0] ?? "There are no options yet.");
     const option = geometry.options.find((one) => one.key === key);
-    if (!option) throw new Refusal("not-found", "That spring is not in the rack any more, or the hole is another hanger's.");
+    if (!option)
+      throw new Refusal(
+        "not-found",
+        "That spring is not in the rack any more, or the hole is another hanger's.",
+      );
     if (!option.stands) throw new Refusal("conflict", option.reasons.join(" "));
     if (choice?.key === key && !changed) return { words: "It is in hand already." };
     await voidApprovals(tx, ctx, layoutId, "Another option was put in hand");
-    await tx.update(choices).set({ droppedAt: ctx.now() }).where(and(eq(choices.layoutId, layoutId), isNull(choices.droppedAt)));
+    await tx
+      .update(choices)
+      .set({ droppedAt: ctx.now() })
+      .where(and(eq(choices.layoutId, layoutId), isNull(choices.droppedAt)));
     await tx.insert(choices).values({
       shopId: actor.shopId,
       layoutId,

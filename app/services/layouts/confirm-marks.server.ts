@@ -3,7 +3,7 @@ import { schema } from "../../db/client.server";
 import { readMarks } from "../../db/queries/layouts.server";
 import type { TypedLength } from "../../domain/layout/view";
 import { formatLength, mm } from "../../domain/units/length";
-import { change, type Context } from "../change.server";
+import { type Context, change } from "../change.server";
 import { Refusal } from "../errors";
 import { markDistance } from "./read-layout.server";
 import { layoutTouches, measurer, openStep } from "./step-guard.server";
@@ -12,11 +12,19 @@ import { layoutTouches, measurer, openStep } from "./step-guard.server";
  * The control marks were found and A to B was taped.
  * @throws Refusal invalid beside the field when the tape does not agree with what Setup says, with the difference
  */
-export async function confirmMarks(ctx: Context, layoutId: number, taped: TypedLength): Promise<{ words: string }> {
+export async function confirmMarks(
+  ctx: Context,
+  layoutId: number,
+  taped: TypedLength,
+): Promise<{ words: string }> {
   const actor = measurer(ctx);
   return change(ctx, async (tx, note) => {
     const { head, shop } = await openStep(tx, ctx, layoutId, "marks");
-    const marks = (await readMarks(tx, head.layout.bayId)).map((mark) => ({ label: mark.label, x: mm(mark.xMm), y: mm(mark.yMm) }));
+    const marks = (await readMarks(tx, head.layout.bayId)).map((mark) => ({
+      label: mark.label,
+      x: mm(mark.xMm),
+      y: mm(mark.yMm),
+    }));
     const set = markDistance(marks);
     if (set === 0) throw new Refusal("conflict", `Bay ${head.bay.number} has no control marks A and B.`);
     const off = taped.mm - set;
@@ -27,7 +35,12 @@ export async function confirmMarks(ctx: Context, layoutId: number, taped: TypedL
     }
     await tx
       .update(schema.layouts)
-      .set({ marksAt: ctx.now(), marksBy: actor.personId, marksTapedMm: taped.mm, marksTapedTyped: taped.typed })
+      .set({
+        marksAt: ctx.now(),
+        marksBy: actor.personId,
+        marksTapedMm: taped.mm,
+        marksTapedTyped: taped.typed,
+      })
       .where(eq(schema.layouts.id, layoutId));
     note({
       verb: "confirm-marks",

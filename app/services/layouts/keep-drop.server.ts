@@ -2,11 +2,18 @@ import { and, eq, isNull } from "drizzle-orm";
 import { isDuplicate, schema, type Tx } from "../../db/client.server";
 import { readMarks } from "../../db/queries/layouts.server";
 import { distance, type FloorPoint, floorPoint } from "../../domain/geometry/point";
-import { type DropPointId, type DropSide, dropPoint, pointFromOffset, pointFromTies, type Suggestion } from "../../domain/layout/drops";
+import {
+  type DropPointId,
+  type DropSide,
+  dropPoint,
+  pointFromOffset,
+  pointFromTies,
+  type Suggestion,
+} from "../../domain/layout/drops";
 import { carrierOf } from "../../domain/layout/level-chain";
 import type { TypedLength } from "../../domain/layout/view";
 import { type LengthUnit, mm } from "../../domain/units/length";
-import { change, type Context } from "../change.server";
+import { type Context, change } from "../change.server";
 import { Refusal } from "../errors";
 import { voidApprovals } from "../void-level.server";
 import { currentReadings, type LoadedLayout, redropWanted } from "./layout-state.server";
@@ -21,7 +28,10 @@ export type DropEntry = {
   clientKey: string;
   height: TypedLength | null;
   reason: string | null;
-} & ({ method: "offset"; station: TypedLength; offset: TypedLength } | { method: "ties"; ties: { mark: string; distance: TypedLength }[] });
+} & (
+  | { method: "offset"; station: TypedLength; offset: TypedLength }
+  | { method: "ties"; ties: { mark: string; distance: TypedLength }[] }
+);
 
 export type DropAnswer = {
   readingId: number;
@@ -54,29 +64,56 @@ export async function keepDrop(ctx: Context, layoutId: number, entry: DropEntry)
       const place = await placeOf(tx, loaded, entry, shop.unit);
       const point = dropPoint(entry.point);
       if (point?.withHeight && !entry.height)
-        throw new Refusal("invalid", "Its height above the ground is needed as well.", { height: "Type its height above the ground." });
-      const old = currentReadings(rows).find((row) => row.drop.point === entry.point && row.drop.side === entry.side) ?? null;
+        throw new Refusal("invalid", "Its height above the ground is needed as well.", {
+          height: "Type its height above the ground.",
+        });
+      const old =
+        currentReadings(rows).find((row) => row.drop.point === entry.point && row.drop.side === entry.side) ??
+        null;
 
-      const redrop = redropWanted(ground, rows) && old !== null && ground.waiting.has(old.reading.levelCheckId) && !place.suspect ? redropOutcome(old.reading, place.at, shop.redropToleranceMm) : null;
+      const redrop =
+        redropWanted(ground, rows) &&
+        old !== null &&
+        ground.waiting.has(old.reading.levelCheckId) &&
+        !place.suspect
+          ? redropOutcome(old.reading, place.at, shop.redropToleranceMm)
+          : null;
       if (redrop)
         await tx
           .update(levelChecks)
-          .set({ carriesId: redrop.stands && old ? (carrierOf(rounds, level, old.reading.levelCheckId)?.id ?? null) : null, carryOffMm: redrop.off })
+          .set({
+            carriesId:
+              redrop.stands && old ? (carrierOf(rounds, level, old.reading.levelCheckId)?.id ?? null) : null,
+            carryOffMm: redrop.off,
+          })
           .where(eq(levelChecks.id, level.id));
 
       const dropId = old?.drop.id ?? (await dropIdFor(tx, actor.shopId, layoutId, entry));
-      if (old) await tx.update(dropReadings).set({ supersededAt: ctx.now() }).where(eq(dropReadings.id, old.reading.id));
+      if (old)
+        await tx
+          .update(dropReadings)
+          .set({ supersededAt: ctx.now() })
+          .where(eq(dropReadings.id, old.reading.id));
       const readingId = await insertReading(tx, ctx, { entry, dropId, levelCheckId: level.id, place });
       if (!old || distance(floorPoint(old.reading.xMm, old.reading.yMm), place.at) > SAME_MM) {
         await voidApprovals(tx, ctx, layoutId, `${point?.label ?? entry.point} read again`);
-        await tx.update(choices).set({ droppedAt: ctx.now() }).where(and(eq(choices.layoutId, layoutId), isNull(choices.droppedAt)));
+        await tx
+          .update(choices)
+          .set({ droppedAt: ctx.now() })
+          .where(and(eq(choices.layoutId, layoutId), isNull(choices.droppedAt)));
       }
       note({
         verb: "keep-drop",
         subject: { kind: "layout", id: layoutId },
         words: `${point?.label ?? entry.point}, ${entry.side}: ${entryWords(entry)}${place.suspect ? " (the tapes do not meet)" : ""}`,
         before: old ? { readingId: old.reading.id, xMm: old.reading.xMm, yMm: old.reading.yMm } : null,
-        after: { readingId, xMm: place.at.x, yMm: place.at.y, reason: entry.reason, redrop: redrop ? { ...redrop } : null },
+        after: {
+          readingId,
+          xMm: place.at.x,
+          yMm: place.at.y,
+          reason: entry.reason,
+          redrop: redrop ? { ...redrop } : null,
+        },
         touches: await layoutTouches(tx, layoutId, head.build.id),
       });
       return {
@@ -107,19 +144,36 @@ const entryWords = (entry: DropEntry) =>
     ? `${entry.station.typed} along, ${entry.offset.typed} off`
     : entry.ties.map((tie) => `${tie.mark} ${tie.distance.typed}`).join(", ");
 
-type Place = { at: FloorPoint; suspect: boolean; checked: boolean; suggestions: Suggestion[]; advice: string | null };
+type Place = {
+  at: FloorPoint;
+  suspect: boolean;
+  checked: boolean;
+  suggestions: Suggestion[];
+  advice: string | null;
+};
 
-async function placeOf(tx: Tx, { head, shop }: LoadedLayout, entry: DropEntry, unit: LengthUnit): Promise<Place> {
+async function placeOf(
+  tx: Tx,
+  { head, shop }: LoadedLayout,
+  entry: DropEntry,
+  unit: LengthUnit,
+): Promise<Place> {
   if (entry.method === "offset") {
     const at = pointFromOffset({ station: entry.station.mm, offset: entry.offset.mm, side: entry.side });
     if (!at.ok) throw new Refusal("invalid", at.problem, { offset: at.problem });
     return { at: at.value, suspect: false, checked: true, suggestions: [], advice: null };
   }
-  if (entry.side === "centre") throw new Refusal("invalid", "A point on the centre is measured by offset.", { method: "Measure this one by offset." });
+  if (entry.side === "centre")
+    throw new Refusal("invalid", "A point on the centre is measured by offset.", {
+      method: "Measure this one by offset.",
+    });
   const marks = await readMarks(tx, head.layout.bayId);
   const ties = entry.ties.map((tie) => {
     const mark = marks.find((one) => one.label === tie.mark);
-    if (!mark) throw new Refusal("invalid", `Bay ${head.bay.number} has no mark ${tie.mark}.`, { [`tape.${tie.mark}`]: `There is no mark ${tie.mark} here.` });
+    if (!mark)
+      throw new Refusal("invalid", `Bay ${head.bay.number} has no mark ${tie.mark}.`, {
+        [`tape.${tie.mark}`]: `There is no mark ${tie.mark} here.`,
+      });
     return { mark: tie.mark, at: floorPoint(mark.xMm, mark.yMm), distance: tie.distance.mm };
   });
   const fit = pointFromTies(ties, entry.side, mm(shop.tapeSigmaMm), unit);
@@ -132,12 +186,19 @@ async function dropIdFor(tx: Tx, shopId: number, layoutId: number, entry: DropEn
   const where = and(eq(drops.layoutId, layoutId), eq(drops.point, entry.point), eq(drops.side, entry.side));
   const [known] = await tx.select({ id: drops.id }).from(drops).where(where);
   if (known) return known.id;
-  const [made] = await tx.insert(drops).values({ shopId, layoutId, point: entry.point, side: entry.side }).$returningId();
+  const [made] = await tx
+    .insert(drops)
+    .values({ shopId, layoutId, point: entry.point, side: entry.side })
+    .$returningId();
   if (!made) throw new Error("The drop was not inserted");
   return made.id;
 }
 
-async function insertReading(tx: Tx, ctx: Context, what: { entry: DropEntry; dropId: number; levelCheckId: number; place: Place }): Promise<number> {
+async function insertReading(
+  tx: Tx,
+  ctx: Context,
+  what: { entry: DropEntry; dropId: number; levelCheckId: number; place: Place },
+): Promise<number> {
   const { entry, dropId, levelCheckId, place } = what;
   const { shopId, personId, deviceId } = ctx.actor;
   const [made] = await tx
@@ -165,7 +226,13 @@ async function insertReading(tx: Tx, ctx: Context, what: { entry: DropEntry; dro
   if (!made) throw new Error("The reading was not inserted");
   if (entry.method === "ties")
     await tx.insert(tieReadings).values(
-      entry.ties.map((tie) => ({ shopId, readingId: made.id, mark: tie.mark, distanceMm: tie.distance.mm, distanceTyped: tie.distance.typed })),
+      entry.ties.map((tie) => ({
+        shopId,
+        readingId: made.id,
+        mark: tie.mark,
+        distanceMm: tie.distance.mm,
+        distanceTyped: tie.distance.typed,
+      })),
     );
   return made.id;
 }
@@ -178,6 +245,14 @@ async function answerOf(ctx: Context, layoutId: number, clientKey: string): Prom
     .innerJoin(drops, eq(drops.id, dropReadings.dropId))
     .where(and(eq(dropReadings.shopId, ctx.actor.shopId), eq(dropReadings.clientKey, clientKey)));
   if (!row) return null;
-  if (row.layoutId !== layoutId) throw new Refusal("conflict", "This reading was kept in another layout already.");
-  return { readingId: row.reading.id, suspect: row.reading.suspect, checked: row.reading.checked, suggestions: [], advice: null, redrop: null };
+  if (row.layoutId !== layoutId)
+    throw new Refusal("conflict", "This reading was kept in another layout already.");
+  return {
+    readingId: row.reading.id,
+    suspect: row.reading.suspect,
+    checked: row.reading.checked,
+    suggestions: [],
+    advice: null,
+    redrop: null,
+  };
 }

@@ -20,7 +20,6 @@ import { mm } from "../../domain/units/length";
 import { Refusal } from "../errors";
 import { computeGeometry, standingDrops } from "./compute-layout";
 
-
 const asRound = (row: LevelCheckRow): Round => ({
   id: row.id,
   bayId: row.bayId,
@@ -31,11 +30,14 @@ const asRound = (row: LevelCheckRow): Round => ({
 });
 
 /** The readings that count: not superseded. */
-export const currentReadings = (rows: readonly DropRow[]) => rows.filter((row) => row.reading.supersededAt === null);
+export const currentReadings = (rows: readonly DropRow[]) =>
+  rows.filter((row) => row.reading.supersededAt === null);
 
 /** Old drops wait for one of them to be dropped again under the level that stands. */
 export const redropWanted = (ground: LevelGround, rows: readonly DropRow[]) =>
-  ground.state === "true" && ground.waiting.size > 0 && currentReadings(rows).some((row) => ground.waiting.has(row.reading.levelCheckId));
+  ground.state === "true" &&
+  ground.waiting.size > 0 &&
+  currentReadings(rows).some((row) => ground.waiting.has(row.reading.levelCheckId));
 
 /** Axle positions nearer to each other than this are the same choice. */
 const SAME_MM = 0.25;
@@ -74,10 +76,15 @@ export async function loadLayout(tx: Reader, shopId: number, layoutId: number) {
     key: optionKey(choiceRow.choice.springId, choiceRow.choice.turned, choiceRow.choice.holeId),
   };
   const option = choice ? (geometry.options?.find((one) => one.key === choice.key) ?? null) : null;
-  const changed = choice !== null && (option === null || !option.stands || Math.abs(option.axleStation - choice.choice.axleStationMm) > SAME_MM);
+  const changed =
+    choice !== null &&
+    (option === null ||
+      !option.stands ||
+      Math.abs(option.axleStation - choice.choice.axleStationMm) > SAME_MM);
 
   const last = checks.at(-1) ?? null;
-  const alive = (row: DropRow) => ground.standing.has(row.reading.levelCheckId) || ground.waiting.has(row.reading.levelCheckId);
+  const alive = (row: DropRow) =>
+    ground.standing.has(row.reading.levelCheckId) || ground.waiting.has(row.reading.levelCheckId);
   const current = currentReadings(rows).filter(alive);
   const facts: StepFacts = {
     standsAcknowledged: head.layout.standsAt !== null,
@@ -85,7 +92,9 @@ export async function loadLayout(tx: Reader, shopId: number, layoutId: number) {
     levelVoidReason: last?.voidReason ?? null,
     redropWanted: redropWanted(ground, rows),
     marksConfirmed: head.layout.marksAt !== null,
-    dropsKept: current.filter((row) => DROP_POINTS.some((point) => point.id === row.drop.point && point.needed)).length,
+    dropsKept: current.filter((row) =>
+      DROP_POINTS.some((point) => point.id === row.drop.point && point.needed),
+    ).length,
     dropsNeeded: DROPS_NEEDED,
     dropsSuspect: current.filter((row) => row.reading.suspect).length,
     axleLineChosen: head.layout.axleMethod !== null,
@@ -93,6 +102,21 @@ export async function loadLayout(tx: Reader, shopId: number, layoutId: number) {
     optionChosen: choice !== null && !changed,
     approval: approvalRow ? (approvalRow.approval.voidedAt ? "void" : "approved") : "none",
   };
-  return { head, shop, checks, rounds, ground, rows, geometry, holes, rack, choice, option, changed, approvalRow, facts };
+  return {
+    head,
+    shop,
+    checks,
+    rounds,
+    ground,
+    rows,
+    geometry,
+    holes,
+    rack,
+    choice,
+    option,
+    changed,
+    approvalRow,
+    facts,
+  };
 }
 export type LoadedLayout = Awaited<ReturnType<typeof loadLayout>>;

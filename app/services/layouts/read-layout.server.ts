@@ -1,18 +1,37 @@
-import type { Db } from "../../db/client.server";
+import type { Db, Reader } from "../../db/client.server";
 import { readRevision, snapshot } from "../../db/queries/board.server";
-import { type DropRow, readBayOfBuild, readLevelReadings, readMarks, readPerson } from "../../db/queries/layouts.server";
+import {
+  type DropRow,
+  readBayOfBuild,
+  readLevelReadings,
+  readMarks,
+  readPerson,
+} from "../../db/queries/layouts.server";
 import { floorPoint } from "../../domain/geometry/point";
 import { DROP_POINTS, pointFromTies } from "../../domain/layout/drops";
 import { nextOpenStep, stepStates } from "../../domain/layout/steps";
-import type { ChoiceView, DropReadingView, DropView, LayoutView, LevelView, Made, TypedLength } from "../../domain/layout/view";
+import type {
+  ChoiceView,
+  DropReadingView,
+  DropView,
+  LayoutView,
+  LevelView,
+  Made,
+  TypedLength,
+} from "../../domain/layout/view";
 import { degrees } from "../../domain/units/angle";
 import { type LengthUnit, type Millimetres, mm } from "../../domain/units/length";
-import type { Reader } from "../../db/client.server";
 import { currentReadings, type LoadedLayout, loadLayout } from "./layout-state.server";
 
-const orNull = <T, R>(value: T | null, make: (value: T) => R): R | null => (value === null ? null : make(value));
-const typed = (value: number | null, entry: string | null): TypedLength | null => (value === null ? null : { mm: mm(value), typed: entry ?? "" });
-const made = (person: { name: string; initials: string } | null, at: Date): Made => ({ name: person?.name ?? "", initials: person?.initials ?? "", at: at.toISOString() });
+const orNull = <T, R>(value: T | null, make: (value: T) => R): R | null =>
+  value === null ? null : make(value);
+const typed = (value: number | null, entry: string | null): TypedLength | null =>
+  value === null ? null : { mm: mm(value), typed: entry ?? "" };
+const made = (person: { name: string; initials: string } | null, at: Date): Made => ({
+  name: person?.name ?? "",
+  initials: person?.initials ?? "",
+  at: at.toISOString(),
+});
 
 /**
  * A layout as its screens are handed it: what was typed, what it came to, who did it; one consistent snapshot.
@@ -23,9 +42,18 @@ export function readLayout(db: Db, shopId: number, layoutId: number): Promise<La
     const loaded = await loadLayout(tx, shopId, layoutId);
     const { head, shop, geometry, facts, holes, approvalRow, choice, changed } = loaded;
     const { layout, build, vehicle, bay, hanger } = head;
-    const marks = (await readMarks(tx, bay.id)).map((mark) => ({ label: mark.label, x: mm(mark.xMm), y: mm(mark.yMm) }));
+    const marks = (await readMarks(tx, bay.id)).map((mark) => ({
+      label: mark.label,
+      x: mm(mark.xMm),
+      y: mm(mark.yMm),
+    }));
     const standing = await readBayOfBuild(tx, build.id);
-    const choiceView: ChoiceView | null = choice && { id: choice.choice.id, key: choice.key, made: made(choice, choice.choice.chosenAt), changed };
+    const choiceView: ChoiceView | null = choice && {
+      id: choice.choice.id,
+      key: choice.key,
+      made: made(choice, choice.choice.chosenAt),
+      changed,
+    };
     return {
       id: layout.id,
       revision: await readRevision(tx, shopId),
@@ -44,7 +72,10 @@ export function readLayout(db: Db, shopId: number, layoutId: number): Promise<La
       bay: { id: bay.id, number: bay.number, marks },
       standsInBay: standing?.id === bay.id,
       fixedEye: layout.fixedEye,
-      hanger: { name: hanger.name, holes: holes.map((hole) => ({ id: hole.id, number: hole.number, ahead: mm(hole.aheadMm) })) },
+      hanger: {
+        name: hanger.name,
+        holes: holes.map((hole) => ({ id: hole.id, number: hole.number, ahead: mm(hole.aheadMm) })),
+      },
       asked: {
         loadedRadius: orNull(build.loadedRadiusMm, mm),
         tyreRadius: orNull(build.tyreRadiusMm, mm),
@@ -80,7 +111,11 @@ export function readLayout(db: Db, shopId: number, layoutId: number): Promise<La
       axleWays: geometry.axleWays,
       axle:
         geometry.line && layout.axleAt
-          ? { line: geometry.line, asked: typed(layout.axleAskedMm, layout.axleAskedTyped), made: made(head.axler, layout.axleAt) }
+          ? {
+              line: geometry.line,
+              asked: typed(layout.axleAskedMm, layout.axleAskedTyped),
+              made: made(head.axler, layout.axleAt),
+            }
           : null,
       holes: geometry.holes,
       options: geometry.options,
@@ -89,7 +124,10 @@ export function readLayout(db: Db, shopId: number, layoutId: number): Promise<La
         state: approvalRow.approval.voidedAt ? "void" : "approved",
         sheetRevision: approvalRow.approval.sheetRevision,
         made: made(approvalRow, approvalRow.approval.approvedAt),
-        voided: orNull(approvalRow.approval.voidedAt, (at) => ({ at: at.toISOString(), reason: approvalRow.approval.voidReason ?? "" })),
+        voided: orNull(approvalRow.approval.voidedAt, (at) => ({
+          at: at.toISOString(),
+          reason: approvalRow.approval.voidReason ?? "",
+        })),
       },
       missing: geometry.missing,
     };
@@ -102,11 +140,16 @@ export function markDistance(marks: readonly { label: string; x: Millimetres; y:
   return a && b ? Math.hypot(a.x - b.x, a.y - b.y) : 0;
 }
 
-async function levelView(tx: Reader, { checks, ground, facts, rows }: LoadedLayout): Promise<LevelView | null> {
+async function levelView(
+  tx: Reader,
+  { checks, ground, facts, rows }: LoadedLayout,
+): Promise<LevelView | null> {
   const check = checks.at(-1);
   if (!check || ground.state === "none") return null;
   const readings = await readLevelReadings(tx, check.id);
-  const gone = ground.state === "true" && currentReadings(rows).some((row) => !ground.standing.has(row.reading.levelCheckId));
+  const gone =
+    ground.state === "true" &&
+    currentReadings(rows).some((row) => !ground.standing.has(row.reading.levelCheckId));
   const carried = check.carriesId !== null && (check.carryOffMm ?? 0) > 0;
   const redropState = facts.redropWanted ? "wanted" : gone ? "void" : carried ? "stands" : "none";
   return {
@@ -120,7 +163,10 @@ async function levelView(tx: Reader, { checks, ground, facts, rows }: LoadedLayo
     allowedDeg: degrees(check.allowedDeg),
     made: made(await readPerson(tx, check.madeBy), check.madeAt),
     voided: check.voidedAt
-      ? { made: made(check.voidedBy === null ? null : await readPerson(tx, check.voidedBy), check.voidedAt), reason: check.voidReason ?? "" }
+      ? {
+          made: made(check.voidedBy === null ? null : await readPerson(tx, check.voidedBy), check.voidedAt),
+          reason: check.voidReason ?? "",
+        }
       : null,
     readings: readings.map((reading) => ({
       place: reading.place,
@@ -142,7 +188,12 @@ export const readingWords = (row: DropRow): string =>
     ? `${row.reading.stationTyped ?? ""}, ${row.reading.offsetTyped ?? ""}`
     : row.ties.map((tie) => `${tie.mark} ${tie.distanceTyped}`).join(", ");
 
-function dropViews(loaded: LoadedLayout, marks: Mark[], unit: LengthUnit, tapeSigma: Millimetres): DropView[] {
+function dropViews(
+  loaded: LoadedLayout,
+  marks: Mark[],
+  unit: LengthUnit,
+  tapeSigma: Millimetres,
+): DropView[] {
   const { rows, ground } = loaded;
   return DROP_POINTS.flatMap((point) =>
     point.sides.map((side): DropView => {
@@ -153,29 +204,47 @@ function dropViews(loaded: LoadedLayout, marks: Mark[], unit: LengthUnit, tapeSi
         side,
         label: point.sides.length > 1 ? `${point.label}, ${side}` : point.label,
         needed: point.needed,
-        reading: current && readingView(current, marks, unit, tapeSigma, ground.standing.has(current.reading.levelCheckId)),
+        reading:
+          current &&
+          readingView(current, marks, unit, tapeSigma, ground.standing.has(current.reading.levelCheckId)),
         superseded: own
           .filter((row) => row !== current)
           .reverse()
-          .map((row) => ({ typed: readingWords(row), made: made(row, row.reading.takenAt), reason: row.reading.reason })),
+          .map((row) => ({
+            typed: readingWords(row),
+            made: made(row, row.reading.takenAt),
+            reason: row.reading.reason,
+          })),
       };
     }),
   );
 }
 
-function readingView(row: DropRow, marks: Mark[], unit: LengthUnit, tapeSigma: Millimetres, stands: boolean): DropReadingView {
+function readingView(
+  row: DropRow,
+  marks: Mark[],
+  unit: LengthUnit,
+  tapeSigma: Millimetres,
+  stands: boolean,
+): DropReadingView {
   const { reading, drop } = row;
   const ties = row.ties.flatMap((tie) => {
     const mark = marks.find((one) => one.label === tie.mark);
     return mark ? [{ mark: tie.mark, at: { x: mark.x, y: mark.y }, distance: mm(tie.distanceMm) }] : [];
   });
-  const fit = reading.method === "ties" && drop.side !== "centre" && ties.length > 1 ? pointFromTies(ties, drop.side, tapeSigma, unit) : null;
+  const fit =
+    reading.method === "ties" && drop.side !== "centre" && ties.length > 1
+      ? pointFromTies(ties, drop.side, tapeSigma, unit)
+      : null;
   return {
     id: reading.id,
     method: reading.method,
     stationTyped: reading.stationTyped,
     offsetTyped: reading.offsetTyped,
-    ties: row.ties.map((tie) => ({ mark: tie.mark, distance: { mm: mm(tie.distanceMm), typed: tie.distanceTyped } })),
+    ties: row.ties.map((tie) => ({
+      mark: tie.mark,
+      distance: { mm: mm(tie.distanceMm), typed: tie.distanceTyped },
+    })),
     at: floorPoint(reading.xMm, reading.yMm),
     height: typed(reading.heightMm, reading.heightTyped),
     suspect: reading.suspect,

@@ -15,7 +15,8 @@ import { type LoadedLayout, loadLayout } from "./layout-state.server";
  */
 export async function openStep(tx: Tx, ctx: Context, layoutId: number, step: StepId): Promise<LoadedLayout> {
   const { shopId } = ctx.actor;
-  if (!(await readLayoutRow(tx, shopId, layoutId, true))) throw new Refusal("not-found", "There is no such layout.");
+  if (!(await readLayoutRow(tx, shopId, layoutId, true)))
+    throw new Refusal("not-found", "There is no such layout.");
   const loaded = await loadLayout(tx, shopId, layoutId);
   const shut = whyShut(step, loaded.facts);
   if (shut) throw new Refusal("conflict", shut, {}, { shut: true });
@@ -25,7 +26,12 @@ export async function openStep(tx: Tx, ctx: Context, layoutId: number, step: Ste
 /** What a change of a layout touches: itself, its build, and the bay in which the vehicle stands. */
 export async function layoutTouches(tx: Tx, layoutId: number, buildId: number): Promise<Touch[]> {
   const bay = await readBayOfBuild(tx, buildId);
-  return [{ kind: "layout", id: layoutId }, { kind: "build", id: buildId }, bay ? { kind: "bay", id: bay.id } : { kind: "yard" }];
+  return [
+    { kind: "layout", id: layoutId },
+    { kind: "build", id: buildId },
+    bay ? { kind: "bay", id: bay.id } : { kind: "yard" },
+  ];
 }
 
-export const measurer = (ctx: Context, permission: Permission = "layouts:measure"): PersonActor => requirePerson(ctx, permission);
+export const measurer = (ctx: Context, permission: Permission = "layouts:measure"): PersonActor =>
+  requirePerson(ctx, permission);

@@ -27,27 +27,30 @@ export function ApprovalStep({ view, may }: { view: LayoutView; may: May }) {
         {option ? (
           <>
             <dl className="grid grid-cols-2 gap-3 md:grid-cols-3">
-              <Number label="Axle line, ahead of the rear pair">
+              <Figure label="Axle line, ahead of the rear pair">
                 <Inches mm={option.axleStation} /> in
-              </Number>
-              <Number label={`Hole ${option.hole.number}, ahead of the rear pair`}>
+              </Figure>
+              <Figure label={`Hole ${option.hole.number}, ahead of the rear pair`}>
                 <Inches mm={option.hole.station} /> in
-              </Number>
-              <Number label="Hole to axle line, flat">
+              </Figure>
+              <Figure label="Hole to axle line, flat">
                 <Inches mm={option.half} /> in
-              </Number>
-              <Number label="From the opening's centre">
+              </Figure>
+              <Figure label="From the opening's centre">
                 <Inches mm={option.shift} signed /> in
-              </Number>
-              {option.approach === null ? null : <Number label="Approach">{formatDegrees(option.approach)}</Number>}
+              </Figure>
+              {option.approach === null ? null : (
+                <Figure label="Approach">{formatDegrees(option.approach)}</Figure>
+              )}
               {option.wheelbase === null ? null : (
-                <Number label="Wheelbase">
+                <Figure label="Wheelbase">
                   <Inches mm={option.wheelbase} /> in
-                </Number>
+                </Figure>
               )}
             </dl>
             <p className="text-concrete-700">
-              {shortName(option)}. {inHandDetail(option)} ± {formatDecimalInches(option.plusMinus)} in (k = 2).
+              {shortName(option)}. {inHandDetail(option)} ± {formatDecimalInches(option.plusMinus)} in (k =
+              2).
             </p>
           </>
         ) : null}
@@ -57,11 +60,21 @@ export function ApprovalStep({ view, may }: { view: LayoutView; may: May }) {
             Layout sheet {view.approval?.sheetRevision}
           </Link>
         ) : option && may.approve ? (
-          <Button tone="go" size="xl" busy={sending.busy} onClick={() => sending.send(`/layouts/${view.id}/approve`, { key: option.key })}>
+          <Button
+            tone="go"
+            size="xl"
+            busy={sending.busy}
+            onClick={() => sending.send(`/layouts/${view.id}/approve`, { key: option.key })}
+          >
             Approve {formatDecimalInches(option.axleStation)}, hole {option.hole.number}
           </Button>
         ) : option ? (
-          <Verdict tone="waiting" sign="question" title="Waiting for the foreman." detail="Nothing is welded before it is signed." />
+          <Verdict
+            tone="waiting"
+            sign="question"
+            title="Waiting for the foreman."
+            detail="Nothing is welded before it is signed."
+          />
         ) : null}
         {sending.trouble ? <Verdict tone="not-true" sign="off" title={sending.trouble} live /> : null}
         <Cautions step="approval" />
@@ -75,7 +88,7 @@ export function ApprovalStep({ view, may }: { view: LayoutView; may: May }) {
   );
 }
 
-function Number({ label, children }: { label: string; children: React.ReactNode }) {
+function Figure({ label, children }: { label: string; children: React.ReactNode }) {
   return (
     <div className="rounded border border-concrete-300 bg-chalk px-4 py-3">
       <dt className="text-sm text-concrete-500">{label}</dt>
@@ -107,7 +120,15 @@ function State({ view, when }: { view: LayoutView; when: (at: string) => string 
         live
       />
     );
-  return <Verdict tone="in-hand" sign="approve" size="l" title="Look once more, then sign." detail="The signature makes the sheet that is marked from." />;
+  return (
+    <Verdict
+      tone="in-hand"
+      sign="approve"
+      size="l"
+      title="Look once more, then sign."
+      detail="The signature makes the sheet that is marked from."
+    />
+  );
 }
 
 /** What the signature stands on. */
@@ -119,15 +140,29 @@ function Ground({ view, when }: { view: LayoutView; when: (at: string) => string
     {
       sign: level?.state === "true" ? "level" : "not-level",
       good: level?.state === "true",
-      words: level ? `Level ${level.state === "true" ? "stands" : level.state === "void" ? "is void" : "is not true"}: read ${when(level.made.at)} by ${level.made.name}.` : "No level.",
+      words: level
+        ? `Level ${level.state === "true" ? "stands" : level.state === "void" ? "is void" : "is not true"}: read ${when(level.made.at)} by ${level.made.name}.`
+        : "No level.",
     },
-    { sign: "drop", good: kept.length > 0, words: `${kept.length} drops by ${[...new Set(kept.map((drop) => drop.reading?.made.name))].join(", ")}.` },
+    {
+      sign: "drop",
+      good: kept.length > 0,
+      words: `${kept.length} drops by ${[...new Set(kept.map((drop) => drop.reading?.made.name))].join(", ")}.`,
+    },
   ];
-  if (unchecked.length > 0) rows.push({ sign: "question", good: false, words: `Nothing checks ${unchecked.map((drop) => drop.label.toLowerCase()).join(", ")}: two tapes only.` });
+  if (unchecked.length > 0)
+    rows.push({
+      sign: "question",
+      good: false,
+      words: `Nothing checks ${unchecked.map((drop) => drop.label.toLowerCase()).join(", ")}: two tapes only.`,
+    });
   return (
     <ul aria-label="What it stands on" className="grid gap-2">
       {rows.map(({ sign, good, words }) => (
-        <li key={words} className={`flex items-center gap-3 font-medium ${good ? "text-moss" : "text-oxide"}`}>
+        <li
+          key={words}
+          className={`flex items-center gap-3 font-medium ${good ? "text-moss" : "text-oxide"}`}
+        >
           <Sign name={sign} size={24} />
           <span className="text-ink">{words}</span>
         </li>

@@ -3,7 +3,13 @@ import { Link, useRevalidator } from "react-router";
 import type { AxleLine, AxleMethod } from "../../../domain/layout/axle-line";
 import type { LayoutView } from "../../../domain/layout/view";
 import { formatDegrees } from "../../../domain/units/angle";
-import { formatDecimalInches, type LengthUnit, type Millimetres, mm, parseLength } from "../../../domain/units/length";
+import {
+  formatDecimalInches,
+  type LengthUnit,
+  type Millimetres,
+  mm,
+  parseLength,
+} from "../../../domain/units/length";
 import { Button, buttonClass } from "../../../ui/button";
 import { Field } from "../../../ui/field";
 import { Verdict } from "../../../ui/verdict";
@@ -38,8 +44,12 @@ export function AxleLineStep({ view, may }: { view: LayoutView; may: May }) {
   const [method, setMethod] = useState<AxleMethod>(view.axle?.line.method ?? "square");
   const [asked, setAsked] = useState(view.axle?.asked?.typed ?? "");
   const square = view.axleWays.find((way) => way.method === "square");
-  if (!view.openings || !square) return <Verdict tone="empty" sign="drop" title="The openings are not known yet." detail={view.missing[0]} />;
-  const keep = () => sending.send(`/layouts/${view.id}/axle-line`, { method, ...(method === "asked" ? { asked } : {}) });
+  if (!view.openings || !square)
+    return (
+      <Verdict tone="empty" sign="drop" title="The openings are not known yet." detail={view.missing[0]} />
+    );
+  const keep = () =>
+    sending.send(`/layouts/${view.id}/axle-line`, { method, ...(method === "asked" ? { asked } : {}) });
   return (
     <div className="grid gap-4 p-4 xl:grid-cols-2">
       <section className="grid content-start gap-4" aria-label="Axle line">
@@ -51,7 +61,12 @@ export function AxleLineStep({ view, may }: { view: LayoutView; may: May }) {
             detail={`Inches ahead of the rear datum pair. Chosen by ${view.axle.made.name}.`}
           />
         ) : (
-          <Verdict tone="in-hand" sign="plan" title="Choose how the axle line is laid." detail={view.openings.words} />
+          <Verdict
+            tone="in-hand"
+            sign="plan"
+            title="Choose how the axle line is laid."
+            detail={view.openings.words}
+          />
         )}
         {view.axle ? <p className="text-concrete-700">{view.openings.words}</p> : null}
         <div role="radiogroup" aria-label="How the axle line is laid" className="grid gap-2">
@@ -113,7 +128,13 @@ function lineFor(way: AxleMethod, view: LayoutView, asked: string, square: AxleL
   };
 }
 
-type WayProps = { way: AxleMethod; line: AxleLine | null; chosen: boolean; unit: LengthUnit; onChoose: () => void };
+type WayProps = {
+  way: AxleMethod;
+  line: AxleLine | null;
+  chosen: boolean;
+  unit: LengthUnit;
+  onChoose: () => void;
+};
 
 function Way({ way, line, chosen, unit, onChoose }: WayProps) {
   return (
@@ -125,7 +146,9 @@ function Way({ way, line, chosen, unit, onChoose }: WayProps) {
       className={`grid min-h-20 grid-cols-[1fr_auto] items-center gap-x-4 rounded border-[1.5px] px-4 py-3 text-left ${chosen ? "border-brass-ink bg-brass-wash" : "border-paint-edge bg-chalk"}`}
     >
       <b className="text-lg font-semibold">{NAME[way]}</b>
-      <span className="row-span-2 text-right font-label text-3xl font-semibold">{line ? formatDecimalInches(line.station) : "–"}</span>
+      <span className="row-span-2 text-right font-label text-3xl font-semibold">
+        {line ? formatDecimalInches(line.station) : "–"}
+      </span>
       <span className="text-[15px] text-concrete-700">
         {line
           ? `${line.turn === 0 ? "Square" : `${formatDegrees(line.turn)} from square`}; left centre ${offset(line.residualLeft, unit)}, right centre ${offset(line.residualRight, unit)}.`
@@ -135,4 +158,3 @@ function Way({ way, line, chosen, unit, onChoose }: WayProps) {
     </button>
   );
 }
-

@@ -9,7 +9,10 @@ import { roomWords, signed, springHead } from "./option-words";
 export type SortBy = "spring" | "centre" | "approach";
 
 const SORT: Record<SortBy, (a: Option, b: Option) => number> = {
-  spring: (a, b) => a.spring.rackNumber - b.spring.rackNumber || Number(a.turned) - Number(b.turned) || a.hole.number - b.hole.number,
+  spring: (a, b) =>
+    a.spring.rackNumber - b.spring.rackNumber ||
+    Number(a.turned) - Number(b.turned) ||
+    a.hole.number - b.hole.number,
   centre: (a, b) => Math.abs(a.shift) - Math.abs(b.shift),
   approach: (a, b) => (b.approach ?? -1) - (a.approach ?? -1),
 };
@@ -30,9 +33,24 @@ type Props = {
 const HEAD = "px-2 py-2 text-right font-label text-sm leading-tight font-semibold";
 const CELL = "px-2 py-1.5 text-right whitespace-nowrap";
 
-function SortButton({ label, by, sort, onSort }: { label: string; by: SortBy; sort: SortBy; onSort: (by: SortBy) => void }) {
+function SortButton({
+  label,
+  by,
+  sort,
+  onSort,
+}: {
+  label: string;
+  by: SortBy;
+  sort: SortBy;
+  onSort: (by: SortBy) => void;
+}) {
   return (
-    <button type="button" aria-pressed={sort === by} onClick={() => onSort(by)} className="min-h-10 font-label text-sm font-semibold underline decoration-concrete-300 underline-offset-4 aria-pressed:decoration-ink">
+    <button
+      type="button"
+      aria-pressed={sort === by}
+      onClick={() => onSort(by)}
+      className="min-h-10 font-label text-sm font-semibold underline decoration-concrete-300 underline-offset-4 aria-pressed:decoration-ink"
+    >
       {label}
     </button>
   );
@@ -52,7 +70,6 @@ export function OptionTable({ view, options, inHand, looked, pinned, sort, onSor
   };
   return (
     <div className="overflow-x-auto bg-chalk">
-      {/* biome-ignore lint/a11y/noNoninteractiveElementInteractions: arrow keys walk the row buttons inside */}
       <table className="w-full border-collapse text-[16.5px]" onKeyDown={walk}>
         <caption className="sr-only">Springs of the rack in the holes of the hanger</caption>
         <thead className="border-b border-concrete-300">
@@ -66,7 +83,9 @@ export function OptionTable({ view, options, inHand, looked, pinned, sort, onSor
             <th scope="col" className={HEAD}>
               Axle line
               <br />
-              <span className="font-medium text-concrete-500">± {options[0] ? formatDecimalInches(options[0].plusMinus) : ""}</span>
+              <span className="font-medium text-concrete-500">
+                ± {options[0] ? formatDecimalInches(options[0].plusMinus) : ""}
+              </span>
             </th>
             <th scope="col" className={HEAD}>
               <SortButton label="From centre" by="centre" sort={sort} onSort={onSort} />
@@ -95,11 +114,18 @@ export function OptionTable({ view, options, inHand, looked, pinned, sort, onSor
         <tbody>
           {options.map((option, i) => {
             const before = options[i - 1];
-            const group = sort === "spring" && (before?.spring.id !== option.spring.id || before.turned !== option.turned);
+            const group =
+              sort === "spring" &&
+              (before?.spring.id !== option.spring.id || before.turned !== option.turned);
             return (
               <Fragment key={option.key}>
                 {group || sort !== "spring" ? <GroupRow option={option} small={sort !== "spring"} /> : null}
-                <Row {...{ view, option, onLook, onPin }} inHand={inHand === option.key} looked={looked === option.key} pinned={pinned === option.key} />
+                <Row
+                  {...{ view, option, onLook, onPin }}
+                  inHand={inHand === option.key}
+                  looked={looked === option.key}
+                  pinned={pinned === option.key}
+                />
               </Fragment>
             );
           })}
@@ -113,14 +139,23 @@ function GroupRow({ option, small }: { option: Option; small: boolean }) {
   const { title, detail } = springHead(option);
   return (
     <tr className={`border-t border-concrete-300 ${small ? "" : "bg-concrete-100"}`}>
-      <th scope="rowgroup" colSpan={9} className={`px-4 text-left ${small ? "pt-2 text-sm" : "py-2"} font-semibold`}>
+      <th
+        scope="rowgroup"
+        colSpan={9}
+        className={`px-4 text-left ${small ? "pt-2 text-sm" : "py-2"} font-semibold`}
+      >
         {title} <span className="font-label font-medium text-concrete-500">{detail}</span>
       </th>
     </tr>
   );
 }
 
-type RowProps = Pick<Props, "view" | "onLook" | "onPin"> & { option: Option; inHand: boolean; looked: boolean; pinned: boolean };
+type RowProps = Pick<Props, "view" | "onLook" | "onPin"> & {
+  option: Option;
+  inHand: boolean;
+  looked: boolean;
+  pinned: boolean;
+};
 
 function Row({ view, option, inHand, looked, pinned, onLook, onPin }: RowProps) {
   const ground = inHand ? "bg-brass-wash" : pinned ? "bg-concrete-200" : looked ? "bg-line-wash" : "";
@@ -138,7 +173,11 @@ function Row({ view, option, inHand, looked, pinned, onLook, onPin }: RowProps) 
             className="flex min-h-12 w-full items-center gap-3 px-2"
             aria-label={`Hole ${option.hole.number}, axle line ${formatDecimalInches(option.axleStation)}, ${springHead(option).title}${inHand ? ", in hand" : option.stands ? "" : ", does not stand"}`}
           >
-            <Sign name={sign} size={20} className={inHand ? "text-brass-ink" : option.stands ? "text-moss" : "text-oxide"} />
+            <Sign
+              name={sign}
+              size={20}
+              className={inHand ? "text-brass-ink" : option.stands ? "text-moss" : "text-oxide"}
+            />
             <b className="font-label text-2xl font-bold">{option.hole.number}</b>
           </button>
         </th>
@@ -152,7 +191,13 @@ function Row({ view, option, inHand, looked, pinned, onLook, onPin }: RowProps) 
         <td className={`${CELL} hidden lg:table-cell`}>{roomWords(option.frontRoom)}</td>
         <td className={`${CELL} hidden lg:table-cell`}>{roomWords(option.rearRoom)}</td>
         <td className="px-2">
-          <button type="button" aria-pressed={pinned} onClick={() => onPin(option.key)} className="min-h-12 px-2 text-sm font-medium text-line underline" aria-label={`${pinned ? "Do not compare" : "Compare"} hole ${option.hole.number} of rack ${option.spring.rackNumber}${option.turned ? " turned" : ""}`}>
+          <button
+            type="button"
+            aria-pressed={pinned}
+            onClick={() => onPin(option.key)}
+            className="min-h-12 px-2 text-sm font-medium text-line underline"
+            aria-label={`${pinned ? "Do not compare" : "Compare"} hole ${option.hole.number} of rack ${option.spring.rackNumber}${option.turned ? " turned" : ""}`}
+          >
             {pinned ? "unpin" : "compare"}
           </button>
         </td>
@@ -181,7 +226,11 @@ function Strip({ view, option }: { view: LayoutView; option: Option }) {
       <path d={`M${at(0)} 0V36`} stroke="var(--line)" strokeWidth="2" />
       <path d={`M${at(0)} 20H${at(option.shift)}`} stroke={ink} strokeWidth="2" />
       <path d={`M${at(option.shift)} 4V16`} stroke={ink} />
-      <path d={`M${at(option.shift) - 4} 16h8l1 3-5 11-5-11z`} fill={option.stands ? ink : "none"} stroke={ink} />
+      <path
+        d={`M${at(option.shift) - 4} 16h8l1 3-5 11-5-11z`}
+        fill={option.stands ? ink : "none"}
+        stroke={ink}
+      />
     </svg>
   );
 }

@@ -1,7 +1,13 @@
-import { type Option, notDistinguishable } from "../../../domain/layout/options";
+import { notDistinguishable, type Option } from "../../../domain/layout/options";
 import { describeSpring, halves } from "../../../domain/springs/leaf-spring";
 import { formatDegrees } from "../../../domain/units/angle";
-import { formatDecimalInches, formatInches, type LengthUnit, type Millimetres, mm } from "../../../domain/units/length";
+import {
+  formatDecimalInches,
+  formatInches,
+  type LengthUnit,
+  type Millimetres,
+  mm,
+} from "../../../domain/units/length";
 
 /** A signed station difference in decimal inches: "+2.09". */
 export const signed = (length: Millimetres): string => {
@@ -9,12 +15,15 @@ export const signed = (length: Millimetres): string => {
   return length > 0 && !/^0\.0*$/.test(words) ? `+${words}` : words;
 };
 
-export const roomWords = (room: Option["frontRoom"]): string => (room ? `${formatDecimalInches(room.straight)} · ${formatDecimalInches(room.atLock)}` : "–");
+export const roomWords = (room: Option["frontRoom"]): string =>
+  room ? `${formatDecimalInches(room.straight)} · ${formatDecimalInches(room.atLock)}` : "–";
 
 export const springHead = (option: Option): { title: string; detail: string } => {
   const { front, rear } = halves(option.spring, option.turned);
   return {
-    title: option.turned ? `${describeSpring(option.spring, true)}: turned end for end` : describeSpring(option.spring),
+    title: option.turned
+      ? `${describeSpring(option.spring, true)}: turned end for end`
+      : describeSpring(option.spring),
     detail: `halves ${formatInches(front)} + ${formatInches(rear)} · rack ${option.spring.rackNumber}`,
   };
 };
@@ -54,7 +63,14 @@ export function compareWords(a: Option, b: Option, _unit: LengthUnit): { same: b
     },
   ];
   if (a.approach !== null && b.approach !== null && !same)
-    list.push({ same: false, words: `Approach ${formatDegrees(a.approach)} against ${formatDegrees(b.approach)}.` });
-  if (a.spring.id !== b.spring.id) list.push({ same: false, words: `Two springs of the rack: ${a.spring.rackNumber} and ${b.spring.rackNumber}.` });
+    list.push({
+      same: false,
+      words: `Approach ${formatDegrees(a.approach)} against ${formatDegrees(b.approach)}.`,
+    });
+  if (a.spring.id !== b.spring.id)
+    list.push({
+      same: false,
+      words: `Two springs of the rack: ${a.spring.rackNumber} and ${b.spring.rackNumber}.`,
+    });
   return list;
 }

@@ -25,16 +25,33 @@ const REACH = 28;
  * The bay's floor seen from above, to scale, from the shop's own numbers: nose to the right, left side up. Zoom by wheel,
  * pinch or + and −; tap a cross to take it in hand. The drops list beside it says the same in words.
  */
-export function FloorPlan({ view, inHand, onPick, previewReading, optionKey = null, compact = false }: Props) {
+export function FloorPlan({
+  view,
+  inHand,
+  onPick,
+  previewReading,
+  optionKey = null,
+  compact = false,
+}: Props) {
   const press = (x: number, y: number) => {
-    const places = view.drops.flatMap((drop) => (drop.reading ? [{ drop, spot: spotAt(scale, drop.reading.at) }] : []));
+    const places = view.drops.flatMap((drop) =>
+      drop.reading ? [{ drop, spot: spotAt(scale, drop.reading.at) }] : [],
+    );
     const found = nearest(places, { x, y }, REACH);
     if (found) onPick?.(found.drop.point, found.drop.side);
   };
   const { box, size, look, handlers, zoomIn, zoomOut, whole } = useLook(press);
   const span = useMemo(() => planSpan(view), [view]);
   const scale = lookedAt(fitScale(span, size, PAD), look, size);
-  const drawing: PlanProps = { view, scale, size, inHand: inHand ?? null, preview: previewReading ?? null, optionKey, compact };
+  const drawing: PlanProps = {
+    view,
+    scale,
+    size,
+    inHand: inHand ?? null,
+    preview: previewReading ?? null,
+    optionKey,
+    compact,
+  };
   return (
     <div className="relative h-full min-h-56 w-full overflow-hidden bg-concrete-100">
       <div
@@ -56,7 +73,13 @@ export function FloorPlan({ view, inHand, onPick, previewReading, optionKey = nu
             ["0", "Show all", whole],
           ] as const
         ).map(([sign, label, act]) => (
-          <button key={label} type="button" aria-label={label} onClick={act} className="size-12 rounded border border-paint-edge bg-chalk/90 text-xl font-semibold">
+          <button
+            key={label}
+            type="button"
+            aria-label={label}
+            onClick={act}
+            className="size-12 rounded border border-paint-edge bg-chalk/90 text-xl font-semibold"
+          >
             {sign}
           </button>
         ))}

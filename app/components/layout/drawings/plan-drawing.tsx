@@ -20,15 +20,27 @@ export type PlanProps = {
   compact: boolean;
 };
 
-const HALO = { paintOrder: "stroke", stroke: "var(--concrete-100)", strokeWidth: 5, strokeLinejoin: "round" } as const;
-const path = (spots: readonly Spot[]) => spots.map((spot, i) => `${i === 0 ? "M" : "L"}${spot.x.toFixed(1)} ${spot.y.toFixed(1)}`).join("");
+const HALO = {
+  paintOrder: "stroke",
+  stroke: "var(--concrete-100)",
+  strokeWidth: 5,
+  strokeLinejoin: "round",
+} as const;
+const path = (spots: readonly Spot[]) =>
+  spots.map((spot, i) => `${i === 0 ? "M" : "L"}${spot.x.toFixed(1)} ${spot.y.toFixed(1)}`).join("");
 
 /** The plan itself, at one scale; no state. Also drawn on the layout sheet. */
 export function PlanDrawing(props: PlanProps) {
   const { view, scale, size, inHand, preview, optionKey, compact } = props;
   const to = (point: { x: number; y: number }) => spotAt(scale, point);
   return (
-    <svg width={size.width} height={size.height} viewBox={`0 0 ${size.width} ${size.height}`} className="block select-none" aria-hidden="true">
+    <svg
+      width={size.width}
+      height={size.height}
+      viewBox={`0 0 ${size.width} ${size.height}`}
+      className="block select-none"
+      aria-hidden="true"
+    >
       <Joints {...{ scale, size }} />
       <Openings view={view} to={to} />
       <FrameLines view={view} to={to} />
@@ -52,8 +64,10 @@ function Joints({ scale, size }: { scale: Scale; size: Size }) {
   const every = 4 * 304.8 * scale.k;
   if (every < 24) return null;
   const lines: string[] = [];
-  for (let x = ((scale.ox % every) + every) % every; x < size.width; x += every) lines.push(`M${x.toFixed(1)} 0V${size.height}`);
-  for (let y = ((scale.oy % every) + every) % every; y < size.height; y += every) lines.push(`M0 ${y.toFixed(1)}H${size.width}`);
+  for (let x = ((scale.ox % every) + every) % every; x < size.width; x += every)
+    lines.push(`M${x.toFixed(1)} 0V${size.height}`);
+  for (let y = ((scale.oy % every) + every) % every; y < size.height; y += every)
+    lines.push(`M0 ${y.toFixed(1)}H${size.width}`);
   return <path d={lines.join("")} stroke="var(--concrete-200)" fill="none" />;
 }
 
@@ -73,7 +87,14 @@ function Marks({ view, to }: { view: LayoutView; to: To }) {
           <g key={mark.label}>
             <circle cx={at.x} cy={at.y} r="5.5" fill="var(--brass)" stroke="var(--ink)" />
             <circle cx={at.x} cy={at.y} r="1.4" fill="var(--ink)" />
-            <text x={at.x} y={at.y + (mark.y < 0 ? 24 : -11)} textAnchor="middle" fontSize="20" fontWeight="700" {...HALO}>
+            <text
+              x={at.x}
+              y={at.y + (mark.y < 0 ? 24 : -11)}
+              textAnchor="middle"
+              fontSize="20"
+              fontWeight="700"
+              {...HALO}
+            >
               {mark.label}
             </text>
           </g>
@@ -90,14 +111,31 @@ function Openings({ view, to }: { view: LayoutView; to: To }) {
     // The outer edge is where the lips were dropped; how deep the opening is was not measured, so it stays open inward.
     const inward = (side === "left" ? -1 : 1) * 220;
     const corners = [rear, { x: rear.x, y: rear.y + inward }, { x: front.x, y: front.y + inward }, front];
-    return <path key={side} d={path(corners.map(to))} fill="var(--concrete-200)" stroke="var(--concrete-500)" strokeWidth="1.6" strokeLinejoin="round" />;
+    return (
+      <path
+        key={side}
+        d={path(corners.map(to))}
+        fill="var(--concrete-200)"
+        stroke="var(--concrete-500)"
+        strokeWidth="1.6"
+        strokeLinejoin="round"
+      />
+    );
   });
 }
 
 function FrameLines({ view, to }: { view: LayoutView; to: To }) {
   const rails = (["left", "right"] as const).map((side) => {
     const [front, rear] = [standing(view, "datum-front", side), standing(view, "datum-rear", side)];
-    return front && rear ? <path key={side} d={path([to(rear), to(front)])} stroke="var(--concrete-700)" strokeWidth="1.3" strokeDasharray="7 4" /> : null;
+    return front && rear ? (
+      <path
+        key={side}
+        d={path([to(rear), to(front)])}
+        stroke="var(--concrete-700)"
+        strokeWidth="1.3"
+        strokeDasharray="7 4"
+      />
+    ) : null;
   });
   if (!view.frame) return rails;
   const { frame } = view;
@@ -125,7 +163,9 @@ function AxleLineDrawn({ view, to, optionKey }: { view: LayoutView; to: To; opti
   const centre = option ? axleEnds(view, null, mm(1000)) : null;
   return (
     <g>
-      {centre ? <path d={path(centre.map(to))} stroke="var(--concrete-500)" strokeWidth="1.3" strokeDasharray="2 4" /> : null}
+      {centre ? (
+        <path d={path(centre.map(to))} stroke="var(--concrete-500)" strokeWidth="1.3" strokeDasharray="2 4" />
+      ) : null}
       <path d={line} stroke="var(--line)" strokeWidth="8" opacity=".16" strokeLinecap="round" />
       <path d={line} stroke="var(--line)" strokeWidth="2.2" />
       <text x={top.x + 8} y={top.y + 14} fontSize="16" fontWeight="700" fill="var(--line)" {...HALO}>
@@ -145,7 +185,17 @@ function Tyres({ view, to, optionKey }: { view: LayoutView; to: To; optionKey: s
     const outer = opening.centre.offset;
     const middle = outer - Math.sign(outer) * (tyreWidth / 2);
     const corners = frameBox(view, mm(station - tyreRadius), mm(station + tyreRadius), middle, tyreWidth / 2);
-    return <path key={side} d={`${path(corners.map(to))}Z`} fill="var(--concrete-300)" fillOpacity=".35" stroke="var(--concrete-500)" strokeDasharray="9 4" strokeLinejoin="round" />;
+    return (
+      <path
+        key={side}
+        d={`${path(corners.map(to))}Z`}
+        fill="var(--concrete-300)"
+        fillOpacity=".35"
+        stroke="var(--concrete-500)"
+        strokeDasharray="9 4"
+        strokeLinejoin="round"
+      />
+    );
   });
 }
 
@@ -161,7 +211,10 @@ function Holes({ view, to, optionKey }: { view: LayoutView; to: To; optionKey: s
       <g key={i === 0 ? "left" : "right"}>
         {option ? (
           <path
-            d={path([to(toFloor(frame, framePoint(option.hole.station, offset))), to(toFloor(frame, framePoint(option.axleStation, offset)))])}
+            d={path([
+              to(toFloor(frame, framePoint(option.hole.station, offset))),
+              to(toFloor(frame, framePoint(option.axleStation, offset))),
+            ])}
             stroke="var(--brass)"
             strokeWidth="5"
             opacity=".55"
@@ -171,30 +224,74 @@ function Holes({ view, to, optionKey }: { view: LayoutView; to: To; optionKey: s
         {view.holes.map((hole) => {
           const at = to(toFloor(frame, framePoint(hole.station, offset)));
           const used = option?.hole.id === hole.id;
-          return <circle key={hole.id} cx={at.x} cy={at.y} r={used ? 6 : 4.5} fill={used ? "var(--brass)" : "var(--concrete-100)"} stroke="var(--ink)" strokeWidth="1.6" />;
+          return (
+            <circle
+              key={hole.id}
+              cx={at.x}
+              cy={at.y}
+              r={used ? 6 : 4.5}
+              fill={used ? "var(--brass)" : "var(--concrete-100)"}
+              stroke="var(--ink)"
+              strokeWidth="1.6"
+            />
+          );
         })}
       </g>
     );
   });
 }
 
-function Cross({ at, colour, width = 2.2, reach = 7, ring = false }: { at: Spot; colour: string; width?: number; reach?: number; ring?: boolean }) {
+function Cross({
+  at,
+  colour,
+  width = 2.2,
+  reach = 7,
+  ring = false,
+}: {
+  at: Spot;
+  colour: string;
+  width?: number;
+  reach?: number;
+  ring?: boolean;
+}) {
   return (
     <g stroke={colour} fill="none">
-      {ring ? <circle cx={at.x} cy={at.y} r="13" fill="var(--brass-wash)" fillOpacity=".7" stroke="var(--brass-ink)" strokeWidth="2.5" /> : null}
-      <path d={`M${at.x - reach} ${at.y}h${2 * reach}M${at.x} ${at.y - reach}v${2 * reach}`} strokeWidth={width} />
+      {ring ? (
+        <circle
+          cx={at.x}
+          cy={at.y}
+          r="13"
+          fill="var(--brass-wash)"
+          fillOpacity=".7"
+          stroke="var(--brass-ink)"
+          strokeWidth="2.5"
+        />
+      ) : null}
+      <path
+        d={`M${at.x - reach} ${at.y}h${2 * reach}M${at.x} ${at.y - reach}v${2 * reach}`}
+        strokeWidth={width}
+      />
     </g>
   );
 }
 
 function Drops({ view, to, size, scale, inHand }: PlanProps & { to: To }) {
-  const placed = view.drops.flatMap((drop) => (drop.reading ? [{ drop, reading: drop.reading, spot: to(drop.reading.at) }] : []));
+  const placed = view.drops.flatMap((drop) =>
+    drop.reading ? [{ drop, reading: drop.reading, spot: to(drop.reading.at) }] : [],
+  );
   const crosses: Box[] = placed.map(({ spot }) => ({ x: spot.x - 8, y: spot.y - 8, width: 16, height: 16 }));
   const labels = placeLabels(
     placed.map(({ drop, reading, spot }): Label => {
       const side = drop.side === "left" ? -1 : 1;
       const ahead = drop.point.endsWith("rear") ? -1 : drop.point.endsWith("front") ? 1 : 0.2;
-      return { key: `${drop.point}:${drop.side}`, text: dropLabel(reading), spot, size: 15, lean: { x: ahead, y: side * 0.6 }, weight: 600 };
+      return {
+        key: `${drop.point}:${drop.side}`,
+        text: dropLabel(reading),
+        spot,
+        size: 15,
+        lean: { x: ahead, y: side * 0.6 },
+        weight: 600,
+      };
     }),
     crosses,
     { x: 0, y: 0, width: size.width, height: size.height },
@@ -205,7 +302,11 @@ function Drops({ view, to, size, scale, inHand }: PlanProps & { to: To }) {
         const held = inHand?.point === drop.point && inHand.side === drop.side;
         const ellipse = ellipseFor(view, reading);
         const drawn = ELLIPSE_DRAWN * scale.k;
-        const colour = reading.suspect ? "var(--oxide)" : reading.stands ? "var(--ink)" : "var(--concrete-500)";
+        const colour = reading.suspect
+          ? "var(--oxide)"
+          : reading.stands
+            ? "var(--ink)"
+            : "var(--concrete-500)";
         return (
           <g key={`${drop.point}:${drop.side}`}>
             <ellipse
@@ -220,12 +321,22 @@ function Drops({ view, to, size, scale, inHand }: PlanProps & { to: To }) {
               strokeWidth=".9"
             />
             <Cross at={spot} colour={colour} ring={held} />
-            {reading.stands ? null : <circle cx={spot.x} cy={spot.y} r="10" fill="none" stroke={colour} strokeDasharray="2 3" />}
+            {reading.stands ? null : (
+              <circle cx={spot.x} cy={spot.y} r="10" fill="none" stroke={colour} strokeDasharray="2 3" />
+            )}
           </g>
         );
       })}
       {labels.map((label) => (
-        <text key={label.key} x={label.at.x} y={label.at.y} textAnchor={label.anchor} fontSize={label.size} fontWeight="600" {...HALO}>
+        <text
+          key={label.key}
+          x={label.at.x}
+          y={label.at.y}
+          textAnchor={label.anchor}
+          fontSize={label.size}
+          fontWeight="600"
+          {...HALO}
+        >
           {label.text}
         </text>
       ))}
@@ -240,15 +351,31 @@ function Dimension({ view, to, optionKey }: { view: LayoutView; to: To; optionKe
   if (!view.frame || station === undefined || !foot) return null;
   const { frame } = view;
   const offset = toFrame(frame, foot).offset - 330;
-  const [from, till] = [to(toFloor(frame, framePoint(0, offset))), to(toFloor(frame, framePoint(station, offset)))];
+  const [from, till] = [
+    to(toFloor(frame, framePoint(0, offset))),
+    to(toFloor(frame, framePoint(station, offset))),
+  ];
   const [foot0, footS] = [to(foot), to(toFloor(frame, framePoint(station, offset + 330)))];
   const middle = { x: (from.x + till.x) / 2, y: (from.y + till.y) / 2 };
   return (
     <g stroke="var(--ink)" fill="none">
-      <path d={`${path([foot0, { x: from.x, y: from.y + 6 }])}${path([footS, { x: till.x, y: till.y + 6 }])}`} strokeWidth=".9" />
+      <path
+        d={`${path([foot0, { x: from.x, y: from.y + 6 }])}${path([footS, { x: till.x, y: till.y + 6 }])}`}
+        strokeWidth=".9"
+      />
       <path d={path([from, till])} strokeWidth="1.1" />
       <path d={`M${from.x - 5} ${from.y + 5}l10 -10M${till.x - 5} ${till.y + 5}l10 -10`} strokeWidth="1.6" />
-      <text x={middle.x} y={middle.y + 7} textAnchor="middle" fontSize="21" fontWeight="700" fill="var(--ink)" style={{ fontFamily: "var(--font)" }} {...HALO} strokeWidth={9}>
+      <text
+        x={middle.x}
+        y={middle.y + 7}
+        textAnchor="middle"
+        fontSize="21"
+        fontWeight="700"
+        fill="var(--ink)"
+        style={{ fontFamily: "var(--font)" }}
+        {...HALO}
+        strokeWidth={9}
+      >
         {formatDecimalInches(mm(station))}
       </text>
     </g>
@@ -257,7 +384,11 @@ function Dimension({ view, to, optionKey }: { view: LayoutView; to: To; optionKe
 
 function ScaleBar({ view, scale }: { view: LayoutView; scale: Scale }) {
   const inches = view.unit === "in";
-  const length = barLength(inches ? [25.4, 76.2, 152.4, 304.8, 609.6, 1219.2] : [10, 50, 100, 200, 500, 1000], scale.k, 130);
+  const length = barLength(
+    inches ? [25.4, 76.2, 152.4, 304.8, 609.6, 1219.2] : [10, 50, 100, 200, 500, 1000],
+    scale.k,
+    130,
+  );
   const width = length * scale.k;
   const words = inches ? `${Math.round(length / 25.4)} in` : `${length} mm`;
   return (
@@ -265,7 +396,12 @@ function ScaleBar({ view, scale }: { view: LayoutView; scale: Scale }) {
       <text x="12" y="20" fontSize="14" fontWeight="500" fill="var(--concrete-700)" {...HALO}>
         ellipses drawn {ELLIPSE_DRAWN} times, k = 2 · nose →
       </text>
-      <path d={`M12 36h${width}M12 31v10M${12 + width} 31v10`} stroke="var(--ink)" strokeWidth="1.5" fill="none" />
+      <path
+        d={`M12 36h${width}M12 31v10M${12 + width} 31v10`}
+        stroke="var(--ink)"
+        strokeWidth="1.5"
+        fill="none"
+      />
       <text x={20 + width} y="41" fontSize="14" fontWeight="600" {...HALO}>
         {words}
       </text>

@@ -45,18 +45,36 @@ export function ellipseFor(view: LayoutView, reading: DropReadingView): Ellipse 
 }
 
 /** An option by its key; null when there is none. */
-export const optionOf = (view: LayoutView, key: string | null): Option | null => view.options?.find((option) => option.key === key) ?? null;
+export const optionOf = (view: LayoutView, key: string | null): Option | null =>
+  view.options?.find((option) => option.key === key) ?? null;
 
 /** The axle line across the floor, between two offsets of the frame. */
-export function axleEnds(view: LayoutView, option: Option | null, reach: Millimetres): [FloorPoint, FloorPoint] | null {
+export function axleEnds(
+  view: LayoutView,
+  option: Option | null,
+  reach: Millimetres,
+): [FloorPoint, FloorPoint] | null {
   if (!view.frame || !view.axle) return null;
   const { frame } = view;
-  if (option) return [toFloor(frame, framePoint(option.axleStation, reach)), toFloor(frame, framePoint(option.axleStation, -reach))];
-  return [toFloor(frame, axlePoint(view.axle.line, reach)), toFloor(frame, axlePoint(view.axle.line, mm(-reach)))];
+  if (option)
+    return [
+      toFloor(frame, framePoint(option.axleStation, reach)),
+      toFloor(frame, framePoint(option.axleStation, -reach)),
+    ];
+  return [
+    toFloor(frame, axlePoint(view.axle.line, reach)),
+    toFloor(frame, axlePoint(view.axle.line, mm(-reach))),
+  ];
 }
 
 /** The four corners of a rectangle on the frame, as places on the floor. */
-export function frameBox(view: LayoutView, from: Millimetres, to: Millimetres, offset: number, half: number): FloorPoint[] {
+export function frameBox(
+  view: LayoutView,
+  from: Millimetres,
+  to: Millimetres,
+  offset: number,
+  half: number,
+): FloorPoint[] {
   if (!view.frame) return [];
   const { frame } = view;
   return [
@@ -71,9 +89,13 @@ export function frameBox(view: LayoutView, from: Millimetres, to: Millimetres, o
 export function planWords(view: LayoutView): string {
   const kept = view.drops.filter((drop) => drop.reading).length;
   const parts = [`${kept} of ${view.drops.length} points dropped.`];
-  if (view.frame) parts.push(`The frame centre line is turned ${formatDegrees(view.frame.angle)} from A to B.`);
+  if (view.frame)
+    parts.push(`The frame centre line is turned ${formatDegrees(view.frame.angle)} from A to B.`);
   if (view.openings) parts.push(view.openings.words);
-  if (view.axle) parts.push(`The axle line crosses it ${formatDecimalInches(view.axle.line.station)} inches ahead of the rear datum pair.`);
+  if (view.axle)
+    parts.push(
+      `The axle line crosses it ${formatDecimalInches(view.axle.line.station)} inches ahead of the rear datum pair.`,
+    );
   const suspect = view.drops.filter((drop) => drop.reading?.suspect).map((drop) => drop.label);
   if (suspect.length > 0) parts.push(`The tapes do not meet at ${suspect.join(" and ")}.`);
   return parts.join(" ");

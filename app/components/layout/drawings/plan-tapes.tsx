@@ -12,7 +12,9 @@ type Props = {
 
 /** The tapes to the point in hand, in brass; the one that a known slip would mend is dashed in oxide. */
 export function Tapes({ view, to, inHand, preview }: Props) {
-  const drop = inHand ? view.drops.find((one) => one.point === inHand.point && one.side === inHand.side) : null;
+  const drop = inHand
+    ? view.drops.find((one) => one.point === inHand.point && one.side === inHand.side)
+    : null;
   const reading = drop?.reading ?? null;
   const at = preview?.at ?? reading?.at;
   const marks = preview ? preview.ties : (reading?.ties.map((tie) => tie.mark) ?? []);

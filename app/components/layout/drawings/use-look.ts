@@ -3,6 +3,13 @@ import { kept, type Look, type Size, shifted, WHOLE, zoomedAt } from "./viewport
 
 const STEP = 1.3;
 const NUDGE = 40;
+const ZOOM_KEYS: Record<string, number> = { "+": STEP, "=": STEP, "-": 1 / STEP };
+const PAN_KEYS: Record<string, readonly [number, number]> = {
+  ArrowLeft: [1, 0],
+  ArrowRight: [-1, 0],
+  ArrowUp: [0, 1],
+  ArrowDown: [0, -1],
+};
 /** A press that moves less than this picks; more shifts the drawing. */
 const SLACK = 6;
 
@@ -36,7 +43,14 @@ export function useLook(onPress: (x: number, y: number) => void) {
     const onWheel = (event: WheelEvent) => {
       event.preventDefault();
       const frame = element.getBoundingClientRect();
-      setLook((now) => zoomedAt(now, { x: event.clientX - frame.left, y: event.clientY - frame.top }, event.deltaY < 0 ? STEP : 1 / STEP, size));
+      setLook((now) =>
+        zoomedAt(
+          now,
+          { x: event.clientX - frame.left, y: event.clientY - frame.top },
+          event.deltaY < 0 ? STEP : 1 / STEP,
+          size,
+        ),
+      );
     };
     element.addEventListener("wheel", onWheel, { passive: false });
     return () => element.removeEventListener("wheel", onWheel);
@@ -62,7 +76,9 @@ export function useLook(onPress: (x: number, y: number) => void) {
       event.currentTarget.setPointerCapture(event.pointerId);
       const [other] = others;
       if (!other) return setLook((look) => shifted(look, now.x - before.x, now.y - before.y, size));
-      const grown = Math.hypot(now.x - other.x, now.y - other.y) / Math.max(1, Math.hypot(before.x - other.x, before.y - other.y));
+      const grown =
+        Math.hypot(now.x - other.x, now.y - other.y) /
+        Math.max(1, Math.hypot(before.x - other.x, before.y - other.y));
       setLook((look) => zoomedAt(look, { x: (now.x + other.x) / 2, y: (now.y + other.y) / 2 }, grown, size));
     },
     onPointerUp(event: PointerEvent<HTMLElement>) {
@@ -78,22 +94,24 @@ export function useLook(onPress: (x: number, y: number) => void) {
     },
     onKeyDown(event: KeyboardEvent<HTMLElement>) {
       const centre = { x: size.width / 2, y: size.height / 2 };
-      const act: Record<string, () => Look> = {
-        "+": () => zoomedAt(look, centre, STEP, size),
-        "=": () => zoomedAt(look, centre, STEP, size),
-        "-": () => zoomedAt(look, centre, 1 / STEP, size),
-        "0": () => WHOLE,
-        ArrowLeft: () => shifted(look, NUDGE, 0, size),
-        ArrowRight: () => shifted(look, -NUDGE, 0, size),
-        ArrowUp: () => shifted(look, 0, NUDGE, size),
-        ArrowDown: () => shifted(look, 0, -NUDGE, size),
-      };
-      const next = act[event.key];
-      if (!next || (look.zoom === 1 && event.key.startsWith("Arrow"))) return;
+      const factor = ZOOM_KEYS[event.key];
+      const way = PAN_KEYS[event.key];
+      if (factor === undefined && (!way || look.zoom === 1) && event.key !== "0") return;
       event.preventDefault();
-      setLook(next());
+      if (factor !== undefined) setLook(zoomedAt(look, centre, factor, size));
+      else if (way) setLook(shifted(look, way[0] * NUDGE, way[1] * NUDGE, size));
+      else setLook(WHOLE);
     },
   };
-  const zoomBy = (factor: number) => setLook((now) => zoomedAt(now, { x: size.width / 2, y: size.height / 2 }, factor, size));
-  return { box, size, look, handlers, zoomIn: () => zoomBy(STEP), zoomOut: () => zoomBy(1 / STEP), whole: () => setLook(WHOLE) };
+  const zoomBy = (factor: number) =>
+    setLook((now) => zoomedAt(now, { x: size.width / 2, y: size.height / 2 }, factor, size));
+  return {
+    box,
+    size,
+    look,
+    handlers,
+    zoomIn: () => zoomBy(STEP),
+    zoomOut: () => zoomBy(1 / STEP),
+    whole: () => setLook(WHOLE),
+  };
 }

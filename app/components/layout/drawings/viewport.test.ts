@@ -20,9 +20,19 @@ const pad = { top: 20, right: 30, bottom: 40, left: 10 };
 const span = { minX: -100, maxX: 3000, minY: -1200, maxY: 900 };
 
 test("a span holds every point, and there is none without points", () => {
-  expect(spanOf([{ x: 1, y: 5 }, { x: -2, y: 7 }])).toEqual({ minX: -2, maxX: 1, minY: 5, maxY: 7 });
+  expect(
+    spanOf([
+      { x: 1, y: 5 },
+      { x: -2, y: 7 },
+    ]),
+  ).toEqual({ minX: -2, maxX: 1, minY: 5, maxY: 7 });
   expect(spanOf([])).toBeNull();
-  expect(widened({ minX: 0, maxX: 1, minY: 0, maxY: 1 }, 2)).toEqual({ minX: -2, maxX: 3, minY: -2, maxY: 3 });
+  expect(widened({ minX: 0, maxX: 1, minY: 0, maxY: 1 }, 2)).toEqual({
+    minX: -2,
+    maxX: 3,
+    minY: -2,
+    maxY: 3,
+  });
 });
 
 test("the fit shows the whole span within the padding, at one scale both ways", () => {

@@ -1,8 +1,8 @@
 import type { ReactNode } from "react";
+import { VEHICLE_KIND } from "../../../domain/builds/vehicle-kinds";
 import { cautionFor } from "../../../domain/layout/caution";
 import type { Option } from "../../../domain/layout/options";
 import type { LayoutView } from "../../../domain/layout/view";
-import { VEHICLE_KIND } from "../../../domain/builds/vehicle-kinds";
 import { formatDegrees } from "../../../domain/units/angle";
 import { formatInches, type Millimetres } from "../../../domain/units/length";
 import { Inches } from "../../../ui/length";
@@ -19,7 +19,8 @@ type Props = { view: LayoutView; option: Option; qr: ReactNode; printedAt: strin
 /** Why the sheet is dead, in words; null while it is good. */
 export function voidReason(view: LayoutView): string | null {
   if (view.approval?.state === "void") return `${view.approval.voided?.reason ?? "A number changed"}.`;
-  if (view.level?.state !== "true") return `The level does not stand${view.level?.voided ? `: ${view.level.voided.reason}` : ""}.`;
+  if (view.level?.state !== "true")
+    return `The level does not stand${view.level?.voided ? `: ${view.level.voided.reason}` : ""}.`;
   if (!view.standsInBay) return `The vehicle left Bay ${view.bay.number}.`;
   return null;
 }
@@ -30,7 +31,9 @@ export function LayoutSheet({ view, option, qr, printedAt }: Props) {
   const dead = voidReason(view);
   const { approval, level } = view;
   const when = (at: string) => `${dayAndDate(at, zone)} ${clock(at, zone)}`;
-  const crew = [...new Set(view.drops.flatMap((drop) => (drop.reading?.stands ? [drop.reading.made.name] : [])))];
+  const crew = [
+    ...new Set(view.drops.flatMap((drop) => (drop.reading?.stands ? [drop.reading.made.name] : []))),
+  ];
   const kept = view.drops.filter((drop) => drop.reading?.stands).length;
   return (
     <article className={`sheet ${dead ? "sheet-dead" : ""}`} aria-label="Layout sheet">
@@ -47,12 +50,15 @@ export function LayoutSheet({ view, option, qr, printedAt }: Props) {
             {view.vehicle.nickname} <small>{view.vehicle.code}</small>
           </h1>
           <p>
-            {VEHICLE_KIND[view.vehicle.kind].label}, front axle{view.vehicle.tyreTyped ? `, ${view.vehicle.tyreTyped} tyres` : ""}
+            {VEHICLE_KIND[view.vehicle.kind].label}, front axle
+            {view.vehicle.tyreTyped ? `, ${view.vehicle.tyreTyped} tyres` : ""}
           </p>
           <p>Spring {shortName(option)}</p>
           <p className="sheet-revision">
             <b>Layout sheet · revision {approval?.sheetRevision ?? 0}</b>
-            {approval && approval.sheetRevision > 1 ? <span>replaces {approval.sheetRevision - 1}</span> : null}
+            {approval && approval.sheetRevision > 1 ? (
+              <span>replaces {approval.sheetRevision - 1}</span>
+            ) : null}
             <span>printed {when(printedAt)}</span>
           </p>
         </div>
@@ -67,10 +73,39 @@ export function LayoutSheet({ view, option, qr, printedAt }: Props) {
       </p>
       <SheetDrawing view={view} option={option} />
       <div className="sheet-numbers">
-        <Mark n={1} title="Axle line, ahead of rear datum pair" value={option.axleStation} within={option.plusMinus} detail="Square to the frame centre line, at full compression with the spring flat." />
-        <Mark n={2} title={`Hanger hole ${option.hole.number}, both sides`} value={option.hole.station} within={option.plusMinus} detail={`Ahead of the rear datum pair. ${holeWords(view, option)}`} />
-        <Mark n={3} title={`Hole ${option.hole.number} back to the axle line, flat`} value={option.half} within={option.plusMinus} detail="Then square: both diagonals alike within 1/8 in." />
-        <Mark n={4} title="From the opening's centre" value={option.shift} within={option.plusMinus} signed detail={option.approach === null ? "Ahead of it is +." : `Ahead of it is +. Approach ${formatDegrees(option.approach)}.`} />
+        <Mark
+          n={1}
+          title="Axle line, ahead of rear datum pair"
+          value={option.axleStation}
+          within={option.plusMinus}
+          detail="Square to the frame centre line, at full compression with the spring flat."
+        />
+        <Mark
+          n={2}
+          title={`Hanger hole ${option.hole.number}, both sides`}
+          value={option.hole.station}
+          within={option.plusMinus}
+          detail={`Ahead of the rear datum pair. ${holeWords(view, option)}`}
+        />
+        <Mark
+          n={3}
+          title={`Hole ${option.hole.number} back to the axle line, flat`}
+          value={option.half}
+          within={option.plusMinus}
+          detail="Then square: both diagonals alike within 1/8 in."
+        />
+        <Mark
+          n={4}
+          title="From the opening's centre"
+          value={option.shift}
+          within={option.plusMinus}
+          signed
+          detail={
+            option.approach === null
+              ? "Ahead of it is +."
+              : `Ahead of it is +. Approach ${formatDegrees(option.approach)}.`
+          }
+        />
       </div>
       <div className="sheet-ground">
         <div>
@@ -80,7 +115,8 @@ export function LayoutSheet({ view, option, qr, printedAt }: Props) {
           </p>
           {level ? (
             <p>
-              {levelWords(level)}. Allowed {formatDegrees(level.allowedDeg)}. Read {when(level.made.at)} by {level.made.name}. {kept} drops by {crew.join(", ")}.
+              {levelWords(level)}. Allowed {formatDegrees(level.allowedDeg)}. Read {when(level.made.at)} by{" "}
+              {level.made.name}. {kept} drops by {crew.join(", ")}.
             </p>
           ) : null}
         </div>
@@ -102,8 +138,14 @@ export function LayoutSheet({ view, option, qr, printedAt }: Props) {
       <footer className="sheet-cautions">
         <Sign name="caution" size={34} />
         <p>
-          {[...cautionFor("stands"), ...cautionFor("weld"), ...cautionFor("tack"), ...cautionFor("approval")].join(" ")} Brake and steering changes are
-          inspected as local law asks. These figures are an aid to layout, not an engineering certificate.
+          {[
+            ...cautionFor("stands"),
+            ...cautionFor("weld"),
+            ...cautionFor("tack"),
+            ...cautionFor("approval"),
+          ].join(" ")}{" "}
+          Brake and steering changes are inspected as local law asks. These figures are an aid to layout, not
+          an engineering certificate.
           {view.shop.isDemo ? " Demo shop: made-up figures." : ""}
         </p>
       </footer>
@@ -118,12 +160,27 @@ export function LayoutSheet({ view, option, qr, printedAt }: Props) {
 }
 
 function holeWords(view: LayoutView, option: Option): string {
-  const place = view.holes.length < 2 ? "" : option.hole.number === 1 ? "The rearmost hole. " : option.hole.number === view.holes.length ? "The foremost hole. " : "";
-  const first = view.hanger.holes.find((hole) => hole.number === option.hole.number)?.ahead ?? (0 as Millimetres);
+  const place =
+    view.holes.length < 2
+      ? ""
+      : option.hole.number === 1
+        ? "The rearmost hole. "
+        : option.hole.number === view.holes.length
+          ? "The foremost hole. "
+          : "";
+  const first =
+    view.hanger.holes.find((hole) => hole.number === option.hole.number)?.ahead ?? (0 as Millimetres);
   return first > 0 ? `${place}${formatInches(first)} in ahead of hole 1.` : place;
 }
 
-type MarkProps = { n: number; title: string; value: Millimetres; within: Millimetres; detail: string; signed?: boolean };
+type MarkProps = {
+  n: number;
+  title: string;
+  value: Millimetres;
+  within: Millimetres;
+  detail: string;
+  signed?: boolean;
+};
 
 function Mark({ n, title, value, within, detail, signed = false }: MarkProps) {
   return (
@@ -132,7 +189,8 @@ function Mark({ n, title, value, within, detail, signed = false }: MarkProps) {
       <div>
         <h2>{title}</h2>
         <p className="sheet-value">
-          <Inches mm={value} signed={signed} /> <small>in</small> <small>± {formatInches(within, { denominator: 32 })}</small>
+          <Inches mm={value} signed={signed} /> <small>in</small>{" "}
+          <small>± {formatInches(within, { denominator: 32 })}</small>
         </p>
         <p>{detail}</p>
       </div>

@@ -6,5 +6,7 @@ import type { Route } from "./+types/approve";
 
 export async function action({ request, params, context }: Route.ActionArgs) {
   const form = await request.formData();
-  return answer(form, () => approveOption(serviceContext(context), idParam(params.layoutId), readForm(form, ApproveForm).key || null));
+  return answer(form, () =>
+    approveOption(serviceContext(context), idParam(params.layoutId), readForm(form, ApproveForm).key || null),
+  );
 }

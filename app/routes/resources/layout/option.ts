@@ -6,5 +6,7 @@ import type { Route } from "./+types/option";
 
 export async function action({ request, params, context }: Route.ActionArgs) {
   const form = await request.formData();
-  return answer(form, () => chooseOption(serviceContext(context), idParam(params.layoutId), readForm(form, OptionForm).key));
+  return answer(form, () =>
+    chooseOption(serviceContext(context), idParam(params.layoutId), readForm(form, OptionForm).key),
+  );
 }

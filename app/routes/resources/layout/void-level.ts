@@ -6,5 +6,7 @@ import type { Route } from "./+types/void-level";
 
 export async function action({ request, params, context }: Route.ActionArgs) {
   const form = await request.formData();
-  return answer(form, () => voidLevelByHand(serviceContext(context), idParam(params.layoutId), readForm(form, VoidForm).reason));
+  return answer(form, () =>
+    voidLevelByHand(serviceContext(context), idParam(params.layoutId), readForm(form, VoidForm).reason),
+  );
 }
