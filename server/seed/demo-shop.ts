@@ -14,7 +14,6 @@ import {
   makeShop,
   makeSpring,
   makeStint,
-  PAD_MARKS,
   putOn,
 } from "./factories";
 
@@ -40,6 +39,9 @@ const ZONES = [
   "America/Los_Angeles",
   "Pacific/Honolulu",
 ];
+/** Two marks on the centre line are enough to measure by offsets. */
+const LINE_MARKS: Record<string, [number, number]> = { A: [0, 0], B: [120, 0] };
+
 const MID_MORNING = 10.5;
 
 /** The zone of the list in which it is nearest to mid-morning. */
@@ -126,7 +128,7 @@ export async function makeDemoShop(
       widthFt: 17.3,
       mouth: "west",
       rated: true,
-      marks: PAD_MARKS,
+      marks: LINE_MARKS,
     },
     {
       number: 7,
@@ -137,7 +139,7 @@ export async function makeDemoShop(
       widthFt: 15,
       mouth: "west",
       rated: true,
-      marks: PAD_MARKS,
+      marks: LINE_MARKS,
     },
     {
       number: 8,

@@ -168,7 +168,7 @@ for (const one of PAGES)
     for (const size of one.sizes) {
       await page.setViewportSize(size);
       await page.goto(path);
-      await expect(page.getByText(one.says).first()).toBeVisible();
+      await expect(page.getByText(one.says).filter({ visible: true }).first()).toBeVisible();
       // Fonts in, live channel joined: the page as it stays.
       await page.evaluate(() => document.fonts.ready);
       const name = `${one.name}-${size.width}x${size.height}`;

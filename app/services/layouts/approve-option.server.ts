@@ -1,12 +1,21 @@
-import { eq } from "drizzle-orm";
-import { schema } from "../../db/client.server";
+import { and, eq, isNull } from "drizzle-orm";
+import { schema, type Tx } from "../../db/client.server";
 import { formatDecimalInches, mm } from "../../domain/units/length";
 import { type Context, change } from "../change.server";
 import { Refusal } from "../errors";
 import { advanceStages } from "./advance-stages.server";
 import { layoutTouches, measurer, openStep } from "./step-guard.server";
 
-const { approvals, layouts } = schema;
+const { approvals, holds, layouts } = schema;
+
+async function waitsForCustomer(tx: Tx, buildId: number): Promise<boolean> {
+  const [hold] = await tx
+    .select({ id: holds.id })
+    .from(holds)
+    .where(and(eq(holds.buildId, buildId), eq(holds.kind, "customer"), isNull(holds.liftedAt)))
+    .limit(1);
+  return hold !== undefined;
+}
 
 /**
  * A foreman signs the option in hand: from here on it may be marked. Makes the next revision of the layout sheet.
@@ -42,7 +51,13 @@ export async function approveOption(
       approvedBy: actor.personId,
       approvedAt: ctx.now(),
     });
-    await advanceStages(tx, head.build.id, ctx.now(), { done: ["level", "layout", "approval"], begun: null });
+    await advanceStages(tx, head.build.id, ctx.now(), {
+      // While the customer has not answered, the Approval stage waits for them.
+      done: (await waitsForCustomer(tx, head.build.id))
+        ? ["level", "layout"]
+        : ["level", "layout", "approval"],
+      begun: null,
+    });
     const station = formatDecimalInches(mm(choice.choice.axleStationMm));
     note({
       verb: "approve-option",

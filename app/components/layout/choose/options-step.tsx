@@ -45,7 +45,7 @@ export function OptionsStep({ view, may }: { view: LayoutView; may: May }) {
   const stand = options.filter((option) => option.stands).length;
   const put = (option: Option) => sending.send(`/layouts/${view.id}/option`, { key: option.key });
   return (
-    <div className="grid min-h-0 xl:grid-cols-[minmax(0,1fr)_minmax(26rem,34rem)]">
+    <div className="grid min-h-0 grid-cols-[minmax(0,1fr)] xl:grid-cols-[minmax(0,1fr)_minmax(26rem,34rem)]">
       <section aria-label="Options" className="order-2 grid min-w-0 content-start xl:order-1">
         <Head view={view} chosen={chosen} />
         <div className="flex flex-wrap items-center gap-2 border-b-2 border-ink bg-chalk px-4 py-3">
