@@ -1,6 +1,7 @@
 /**
  * Who may know whom. Knowledge flows one way:
  *   domain <- validation <- db <- auth <- services <- routes
+ *   domain <- validation <- calc <- routes
  *   ui <- components <- routes;  domain, validation, realtime/events <- components
  */
 const layer = (name, from, to, comment, extra = {}) => ({
@@ -32,6 +33,12 @@ module.exports = {
       "^app/validation/",
       "^app/(?!domain|validation)",
       "validation may use the domain only",
+    ),
+    layer(
+      "calc-knows-domain",
+      "^app/calc/",
+      "^app/(?!domain|validation|calc)",
+      "a calculation asked for from outside is a schema over the domain",
     ),
     layer(
       "db-knows-validation",
@@ -73,7 +80,7 @@ module.exports = {
     layer(
       "http-knows-services",
       "^app/http/",
-      "^app/(?!domain|validation|db|auth|services|http|context|env\\.server|components/frame/areas)",
+      "^app/(?!domain|validation|calc|db|auth|services|http|context|env\\.server|components/frame/areas)",
       "the web glue may use services and below",
     ),
     layer("nobody-imports-a-route", "^app/(?!routes|routes\\.ts)", "^app/routes/", "routes are the top"),

@@ -6,7 +6,7 @@ export default defineConfig({
     projects: [
       {
         extends: true,
-        test: { name: "unit", include: ["app/**/*.test.{ts,tsx}", "tests/unit/**/*.test.ts"] },
+        test: { name: "unit", include: ["app/**/*.test.{ts,tsx}", "tests/published/**/*.test.ts"] },
       },
       {
         extends: true,

@@ -69,7 +69,7 @@ export function OptionTable({ view, options, inHand, looked, pinned, sort, onSor
     document.getElementById(`option-${next.key}`)?.focus();
   };
   return (
-    <div className="overflow-x-auto bg-chalk">
+    <div className="relative overflow-x-auto bg-chalk">
       <table className="w-full border-collapse text-[16.5px]" onKeyDown={walk}>
         <caption className="sr-only">Springs of the rack in the holes of the hanger</caption>
         <thead className="border-b border-concrete-300">
