@@ -6,7 +6,10 @@ export default defineConfig({
     projects: [
       {
         extends: true,
-        test: { name: "unit", include: ["app/**/*.test.{ts,tsx}", "tests/published/**/*.test.ts"] },
+        test: {
+          name: "unit",
+          include: ["app/**/*.test.{ts,tsx}", "server/**/*.test.ts", "tests/published/**/*.test.ts"],
+        },
       },
       {
         extends: true,

@@ -1,4 +1,3 @@
-import { addMinutes } from "date-fns";
 import type { Db } from "../../app/db/client.server";
 import { floorPoint, framePoint } from "../../app/domain/geometry/point";
 import type { DropPointId, DropSide } from "../../app/domain/layout/drops";
@@ -24,7 +23,8 @@ import { voidLevelByHand } from "../../app/services/layouts/void-level-by-hand.s
 export type DemoLayoutsInput = {
   db: Db;
   shopId: number;
-  now: Date;
+  /** So many minutes of open shop ago. */
+  ago: (minutes: number) => Date;
   id: (person: string) => number;
   build: (vehicle: string) => number;
   spring: (rackNumber: number) => number;
@@ -89,11 +89,11 @@ const PLACES: Record<(typeof STANDS)[number], [string, string]> = {
 
 /** Layouts of the demo: one half way, one on a void level, one waiting for the customer, two signed. */
 export async function demoLayouts(input: DemoLayoutsInput): Promise<void> {
-  const { db, shopId, now, id, build, spring, hole } = input;
+  const { db, shopId, ago, id, build, spring, hole } = input;
   const as = (key: string, name: string, role: Role, minutesAgo: number): Context => ({
     db,
     publish: () => {},
-    now: () => addMinutes(now, -minutesAgo),
+    now: () => ago(minutesAgo),
     actor: { shopId, role, personId: id(key), deviceId: null, name, initials: "", sessionHash: "" },
   });
 
@@ -145,16 +145,16 @@ export async function demoLayouts(input: DemoLayoutsInput): Promise<void> {
   await confirmMarks(as("pilar", "Pilar Dunmore", "tech", 38), mule, length("120"));
   await dropAll(as("pilar", "Pilar Dunmore", "tech", 20), mule, [...OPENINGS, ...DATUMS.slice(0, 2)]);
 
-  const biscuit = await measureAll("biscuit", as("mina", "Mina Fairweather", "tech", 900));
-  await chooseOption(ida(880), biscuit, optionKey(spring(22), false, hole(1)));
-  await approveOption(ida(870), biscuit, null);
+  const biscuit = await measureAll("biscuit", as("mina", "Mina Fairweather", "tech", 420));
+  await chooseOption(ida(300), biscuit, optionKey(spring(22), false, hole(1)));
+  await approveOption(ida(200), biscuit, null);
   await voidLevelByHand(as("mina", "Mina Fairweather", "tech", 44), biscuit, "stand 3 was touched");
 
   const sunday = await measureAll("sunday", as("pilar", "Pilar Dunmore", "tech", 240));
   await chooseOption(ida(200), sunday, optionKey(spring(14), false, hole(2)));
   await approveOption(ida(142), sunday, null);
 
-  const hatchet = await measureAll("hatchet", as("cato", "Cato Reyes", "tech", 130));
-  await chooseOption(ida(125), hatchet, optionKey(spring(14), false, hole(3)));
-  await approveOption(ida(120), hatchet, null);
+  const hatchet = await measureAll("hatchet", as("cato", "Cato Reyes", "tech", 970));
+  await chooseOption(ida(960), hatchet, optionKey(spring(14), false, hole(3)));
+  await approveOption(ida(900), hatchet, null);
 }

@@ -2,9 +2,11 @@ import { TZDate } from "@date-fns/tz";
 import { addDays, addHours, addMinutes, startOfDay } from "date-fns";
 import { hashPassword } from "../../app/auth/authenticator.server";
 import { type Db, schema } from "../../app/db/client.server";
-import type { StageKind } from "../../app/domain/builds/stages";
+import { BUILD_TEMPLATES, type BuildTemplateId, type StageKind } from "../../app/domain/builds/stages";
 import type { Role, Skill } from "../../app/domain/people/roles";
+import { demoHistory } from "./demo-history";
 import { demoLayouts } from "./demo-layouts";
+import { planWeek } from "./demo-week";
 import {
   type MadeBuild,
   makeBay,
@@ -13,9 +15,9 @@ import {
   makePerson,
   makeShop,
   makeSpring,
-  makeStint,
   putOn,
 } from "./factories";
+import { workingTimeBefore } from "./working-time";
 
 /*
  * The demo shop: made up from the ground to the people, and marked as demo on every screen. Vehicles by kind and
@@ -70,6 +72,22 @@ const PEOPLE: readonly { key: string; name: string; role: Role; skills?: readonl
 
 export type SignIn = { role: Role; name: string; email: string };
 
+/** When the stages before one were finished, each taking its hours of open shop, the last of them at `since`. */
+function finishTimes(template: BuildTemplateId, at: StageKind, since: Date, zone: string): Date[] {
+  const { stages } = BUILD_TEMPLATES[template];
+  const done = stages.slice(
+    0,
+    stages.findIndex((stage) => stage.kind === at),
+  );
+  const times: Date[] = [];
+  let end = since;
+  for (const stage of done.toReversed()) {
+    times.unshift(end);
+    end = workingTimeBefore(end, stage.hours * 60, zone);
+  }
+  return times;
+}
+
 /** Fills an empty database. @returns who can sign in, all with the password given */
 export async function makeDemoShop(
   db: Db,
@@ -90,7 +108,8 @@ export async function makeDemoShop(
   /** A time of the shop's day, some days from today. */
   const at = (day: number, hour: number, minute = 0) =>
     new Date(addMinutes(addHours(addDays(today, day), hour), minute).getTime());
-  const ago = (minutes: number) => addMinutes(now, -minutes);
+  /** So many minutes of open shop ago. */
+  const ago = (minutes: number) => workingTimeBefore(now, minutes, zone);
 
   const passwordHash = await hashPassword(password);
   const who: Record<string, number> = {};
@@ -172,7 +191,12 @@ export async function makeDemoShop(
 
   const by = id("rosa");
   const tyre = { words: "35 × 12.5", loadedRadius: "16.5", radius: "17.5", width: "12.5" };
-  const build = (b: Omit<Parameters<typeof makeBuild>[2], "by">) => makeBuild(db, shopId, { by, ...b });
+  const build = ({ since, ...b }: Omit<Parameters<typeof makeBuild>[2], "by"> & { since?: Date }) =>
+    makeBuild(db, shopId, {
+      by,
+      ...b,
+      ...(since && b.at ? { finishedAt: finishTimes(b.template ?? "front-leaf", b.at, since, zone) } : {}),
+    });
   const vehicles: Record<string, MadeBuild> = {
     mule: await build({
       nickname: "Old Mule",
@@ -184,7 +208,8 @@ export async function makeDemoShop(
       bookedInAt: at(-8, 9),
       promisedAt: at(3, 15),
       bayId: bayId(5),
-      standsSince: ago(400),
+      standsSince: at(-1, 15),
+      since: ago(41),
       at: "layout",
       tyre,
       wheelbaseIn: 133,
@@ -199,6 +224,7 @@ export async function makeDemoShop(
       promisedAt: at(2, 12),
       bayId: bayId(1),
       standsSince: at(-2, 7),
+      since: at(0, 7),
       at: "mock-up",
       tyre,
       wheelbaseIn: 118,
@@ -214,6 +240,7 @@ export async function makeDemoShop(
       promisedAt: at(1, 12),
       bayId: bayId(2),
       standsSince: at(-1, 7),
+      since: ago(72),
       at: "torque",
       pieces: { done: 14, of: 22, word: "bolts" },
       wanted: "Rear springs and shackles renewed.",
@@ -228,6 +255,7 @@ export async function makeDemoShop(
       promisedAt: at(2, 10),
       bayId: bayId(3),
       standsSince: at(-1, 13),
+      since: at(-1, 15),
       at: "fit",
       pieces: { done: 1, of: 5, word: "springs" },
       wanted: "Sagging rear, one leaf cracked.",
@@ -240,7 +268,8 @@ export async function makeDemoShop(
       bookedInAt: at(-14, 9),
       promisedAt: at(2, 16, 30),
       bayId: bayId(6),
-      standsSince: at(-1, 7),
+      standsSince: at(-2, 7),
+      since: at(0, 7),
       at: "weld",
       pieces: { done: 4, of: 10, word: "brackets" },
       wanted: "All hangers new on a repaired frame.",
@@ -254,6 +283,7 @@ export async function makeDemoShop(
       promisedAt: at(6, 12),
       bayId: bayId(7),
       standsSince: at(-1, 9),
+      since: ago(142),
       at: "approval",
       tyre,
       wheelbaseIn: 93.5,
@@ -267,6 +297,7 @@ export async function makeDemoShop(
       promisedAt: at(0, 15, 30),
       bayId: bayId(8),
       standsSince: ago(200),
+      since: ago(200),
       at: "hand-over",
       tyre,
       wheelbaseIn: 140,
@@ -349,58 +380,12 @@ export async function makeDemoShop(
   await demoLayouts({
     db,
     shopId,
-    now,
+    ago,
     id,
     build: (key) => made(key).buildId,
     spring: (rackNumber) => rack.get(rackNumber) ?? 0,
     hole: (number) => holes[number - 1] ?? 0,
   });
+  await demoHistory(db, shopId, { booked: id("rosa"), moved: id("ida") });
   return { shop: name, signIns };
-}
-
-type Plan = {
-  db: Db;
-  shopId: number;
-  at: (day: number, hour: number, minute?: number) => Date;
-  bayId: (number: number) => number;
-  id: (key: string) => number;
-  stage: (key: string, kind: StageKind) => number | undefined;
-};
-
-/** A week of stints, two days back and four ahead. */
-async function planWeek({ db, shopId, at, bayId, id, stage }: Plan): Promise<void> {
-  const week: readonly [string, StageKind, number, [number, number], [number, number], string[]][] = [
-    ["biscuit", "level", 1, [-2, 7], [-2, 9], ["mina"]],
-    ["biscuit", "layout", 1, [-2, 9], [-2, 14], ["mina"]],
-    ["biscuit", "mock-up", 1, [0, 7], [0, 12], ["mina"]],
-    ["biscuit", "tack", 1, [0, 13], [0, 16], ["mina"]],
-    ["pelican", "fit", 2, [-1, 8], [-1, 15], ["june"]],
-    ["pelican", "torque", 2, [0, 8], [0, 11], ["june"]],
-    ["gravy", "fit", 3, [1, 8], [1, 12], ["cato"]],
-    ["gravy", "torque", 3, [1, 13], [1, 15], ["june"]],
-    ["mule", "level", 5, [0, 6], [0, 8], ["wes"]],
-    ["mule", "layout", 5, [0, 8], [0, 13], ["wes", "pilar"]],
-    ["mule", "mock-up", 5, [1, 7], [1, 13], ["wes", "pilar"]],
-    ["mule", "tack", 5, [1, 13], [1, 16], ["wes"]],
-    ["mule", "weld", 6, [2, 12], [2, 17], ["bram"]],
-    ["hatchet", "weld", 6, [0, 8], [0, 17], ["bram", "cato"]],
-    ["hatchet", "torque", 2, [2, 7], [2, 11], ["june"]],
-    ["sunday", "mock-up", 7, [2, 8], [2, 12], ["otis"]],
-    ["copper", "hand-over", 8, [0, 15], [0, 16], []],
-    ["dusty", "level", 1, [2, 7], [2, 9], ["mina"]],
-    ["dusty", "layout", 1, [2, 9], [2, 15], ["mina"]],
-    ["moth", "strip", 4, [1, 7], [1, 10], ["otis"]],
-    ["plow", "strip", 4, [3, 7], [3, 10], ["sam"]],
-  ];
-  for (const [key, kind, number, from, to, crew] of week) {
-    const stageId = stage(key, kind);
-    if (stageId === undefined) throw new Error(`${key} has no stage ${kind}`);
-    await makeStint(db, shopId, {
-      stageId,
-      bayId: bayId(number),
-      startsAt: at(...from),
-      endsAt: at(...to),
-      crew: crew.map(id),
-    });
-  }
 }

@@ -237,6 +237,8 @@ export async function makeBuild(
     /** Stages before this one are done; this one is under way. */
     at?: StageKind;
     atState?: "open" | "under-way";
+    /** When each stage that is done was finished, first stage first; left out: since it stands where it stands. */
+    finishedAt?: readonly Date[];
     pieces?: { done: number; of: number; word: string };
     tyre?: { words: string; loadedRadius: string; radius: string; width: string };
     wheelbaseIn?: number;
@@ -298,6 +300,7 @@ export async function makeBuild(
   const template = BUILD_TEMPLATES[build.template ?? "front-leaf"].stages;
   const atIndex = build.at === undefined ? 0 : template.findIndex((stage) => stage.kind === build.at);
   if (atIndex < 0) throw new Error(`The template has no stage ${build.at}`);
+  const finishedAt = (position: number) => build.finishedAt?.[position] ?? build.standsSince ?? now;
   const stages = new Map<StageKind, number>();
   for (const [position, stage] of template.entries()) {
     const here = build.at !== undefined && position === atIndex;
@@ -319,8 +322,8 @@ export async function makeBuild(
           piecesDone: here ? (build.pieces?.done ?? null) : null,
           piecesOf: here ? (build.pieces?.of ?? null) : null,
           piecesWord: here ? (build.pieces?.word ?? null) : null,
-          startedAt: done || underWay ? (build.standsSince ?? now) : null,
-          finishedAt: done ? (build.standsSince ?? now) : null,
+          startedAt: done || underWay ? finishedAt(position - 1) : null,
+          finishedAt: done ? finishedAt(position) : null,
         })
         .$returningId(),
     );
