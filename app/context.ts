@@ -14,5 +14,7 @@ export type App = {
 export const appContext = createContext<App>();
 /** NULL: nobody is signed in. Set by the root middleware. */
 export const actorContext = createContext<Actor | null>(null);
+/** True: this address tried too often lately; the action answers so in words. */
+export const tooManyContext = createContext(false);
 /** Undefined in development, where the dev server's own scripts carry no nonce. */
 export const nonceContext = createContext<string | undefined>(undefined);

@@ -6,7 +6,7 @@ import helmet from "helmet";
 import pino from "pino";
 import { pinoHttp } from "pino-http";
 import { RouterContextProvider, type ServerBuild } from "react-router";
-import { appContext, nonceContext } from "../app/context";
+import { appContext, nonceContext, tooManyContext } from "../app/context";
 import { openDatabase } from "../app/db/client.server";
 import { isUpToDate } from "../app/db/migrate.server";
 import { env } from "../app/env.server";
@@ -72,7 +72,11 @@ export async function createApp({ io, migrationsDir, loadBuild }: Options) {
       limit: settings.SIGN_IN_PER_MINUTE,
       standardHeaders: "draft-8",
       legacyHeaders: false,
-      message: { message: "Too many tries from this address. Wait a minute." },
+      // The page itself says so, with what was typed still in it.
+      handler: (_req, res, next) => {
+        res.locals.tooMany = true;
+        next();
+      },
     }),
   );
   app.use((_req, res, next) => {
@@ -87,6 +91,7 @@ export async function createApp({ io, migrationsDir, loadBuild }: Options) {
       getLoadContext(_req, res) {
         const context = new RouterContextProvider();
         context.set(appContext, { db, publish: realtime.publish, dropSession: realtime.dropSession, now });
+        context.set(tooManyContext, res.locals.tooMany === true);
         context.set(nonceContext, production ? (res.locals.nonce as string) : undefined);
         return context;
       },

@@ -12,7 +12,8 @@ describe("spanInWords", () => {
     [44.9 * MIN, "44 min"],
     [60 * MIN, "1 h 00"],
     [130 * MIN, "2 h 10"],
-    [47 * 60 * MIN + 59 * MIN, "47 h 59"],
+    [23 * 60 * MIN + 59 * MIN, "23 h 59"],
+    [24 * 60 * MIN, "1 day"],
     [48 * 60 * MIN, "2 days"],
   ])("%d ms is %s", (ms, words) => expect(spanInWords(ms)).toBe(words));
 

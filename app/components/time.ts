@@ -39,7 +39,7 @@ function partsIn(at: string | Date, timeZone: string): Parts {
 }
 
 /**
- * A length of time in words: "under a minute", "44 min", "2 h 10", "3 days". Whole units, rounded down; days from 48
+ * A length of time in words: "under a minute", "44 min", "2 h 10", "1 day", "3 days". Whole units, rounded down; days from 24
  * hours on. A negative length counts as none.
  * @param ms milliseconds
  */
@@ -47,8 +47,9 @@ export function spanInWords(ms: number): string {
   const minutes = Math.floor(Math.max(0, ms) / MINUTE_MS);
   if (minutes < 1) return "under a minute";
   if (minutes < 60) return `${minutes} min`;
-  if (minutes < 48 * 60) return `${Math.floor(minutes / 60)} h ${String(minutes % 60).padStart(2, "0")}`;
-  return `${Math.floor(minutes / (24 * 60))} days`;
+  if (minutes < 24 * 60) return `${Math.floor(minutes / 60)} h ${String(minutes % 60).padStart(2, "0")}`;
+  const days = Math.floor(minutes / (24 * 60));
+  return days === 1 ? "1 day" : `${days} days`;
 }
 
 /** How long ago that was, in words as `spanInWords`. */

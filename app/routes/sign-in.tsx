@@ -3,7 +3,7 @@ import { makeAuthenticator, SignInRefused, SignInSlowedDown } from "~/auth/authe
 import { sessionCookie } from "~/auth/cookie.server";
 import { endSession, startSession } from "~/auth/sessions.server";
 import { SignInPage } from "~/components/sign-in/sign-in-page";
-import { actorContext, appContext } from "~/context";
+import { actorContext, appContext, tooManyContext } from "~/context";
 import { readDemoShop } from "~/db/queries/sign-in.server";
 import { safeReturn } from "~/http/request.server";
 import type { Route } from "./+types/sign-in";
@@ -22,6 +22,11 @@ export async function loader({ context }: Route.LoaderArgs) {
 export async function action({ request, context }: Route.ActionArgs) {
   const { db, now, dropSession } = context.get(appContext);
   const typed = String((await request.clone().formData()).get("email") ?? "").slice(0, 190);
+  if (context.get(tooManyContext))
+    return data(
+      { message: "Too many tries from this address. Wait a minute.", email: typed },
+      { status: 429 },
+    );
   try {
     const { personId, shopId } = await makeAuthenticator(db, now).authenticate("form", request);
     const before = context.get(actorContext);

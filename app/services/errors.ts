@@ -5,6 +5,7 @@
  *   not-found  no such thing in this shop (404)
  *   conflict   somebody was faster, or the state of things forbids it (409)
  *   ask-first  possible, but it costs something that must be confirmed (409)
+ *   too-many   tried too often from one address: wait (429)
  */
 export const REFUSAL_STATUS = {
   invalid: 400,
@@ -12,6 +13,7 @@ export const REFUSAL_STATUS = {
   "not-found": 404,
   conflict: 409,
   "ask-first": 409,
+  "too-many": 429,
 } as const;
 export type RefusalKind = keyof typeof REFUSAL_STATUS;
 

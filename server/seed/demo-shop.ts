@@ -166,7 +166,7 @@ export async function makeDemoShop(
       xFt: 0,
       yFt: 54.5,
       lengthFt: 22.5,
-      widthFt: 9.2,
+      widthFt: 11.4,
       mouth: "east",
       outside: true,
     },

@@ -1,10 +1,11 @@
 import { Form, Link, useNavigation } from "react-router";
 import { z } from "zod";
 import { Shell } from "~/components/frame/shell";
-import { appContext } from "~/context";
+import { appContext, tooManyContext } from "~/context";
 import { readForm } from "~/http/form.server";
 import { answer, requireActor, serviceContext } from "~/http/request.server";
 import { readShell } from "~/http/shell.server";
+import { Refusal } from "~/services/errors";
 import { confirmPairing, listDevices, revokeDevice } from "~/services/pair-device.server";
 import { Button } from "~/ui/button";
 import { Field, SelectField } from "~/ui/field";
@@ -27,6 +28,8 @@ const Revoke = z.object({ deviceId: z.coerce.number().int().positive() });
 export async function action({ request, context }: Route.ActionArgs) {
   const form = await request.formData();
   return answer(form, async () => {
+    if (context.get(tooManyContext))
+      throw new Refusal("too-many", "Too many codes from this address. Wait a minute.");
     const ctx = serviceContext(context);
     if (form.get("do") !== "revoke") return confirmPairing(ctx, readForm(form, PairForm));
     const { words, sessionHashes } = await revokeDevice(ctx, readForm(form, Revoke).deviceId);
