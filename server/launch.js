@@ -73,9 +73,11 @@ async function close() {
   giveUp.unref();
   const ended = new Promise((resolve) => http.close(resolve));
   io.disconnectSockets(true);
-  http.closeIdleConnections();
+  // A connection is idle as soon as its last answer is out: not waiting for its keep-alive to run out.
+  const sweep = setInterval(() => http.closeIdleConnections(), 100);
   const hurry = setTimeout(() => http.closeAllConnections(), PATIENCE_MS);
   await ended;
+  clearInterval(sweep);
   clearTimeout(hurry);
   await shop.close();
   await vite?.close();

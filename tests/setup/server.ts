@@ -30,7 +30,9 @@ export type TestServer = {
 };
 
 /** Starts the built server on this worker's database. The build is made before the integration tests run. */
-export async function startServer(over: { port?: number } = {}): Promise<TestServer> {
+export async function startServer(
+  over: { port?: number; env?: Record<string, string> } = {},
+): Promise<TestServer> {
   const port = over.port ?? (await freePort());
   const child = spawn(process.execPath, ["server/launch.js"], {
     env: {
@@ -42,6 +44,7 @@ export async function startServer(over: { port?: number } = {}): Promise<TestSer
       SESSION_SECRET: SECRET,
       LOG_LEVEL: "error",
       SIGN_IN_PER_MINUTE: "1000",
+      ...over.env,
     },
     stdio: ["ignore", "inherit", "inherit", "ipc"],
   });
