@@ -40,7 +40,7 @@ export async function startServer(
       NODE_ENV: "production",
       PORT: String(port),
       HOST: "127.0.0.1",
-      DATABASE_URL: workerUrl(),
+      DATABASE_URL: over.env?.DATABASE_URL ?? workerUrl(),
       SESSION_SECRET: SECRET,
       LOG_LEVEL: "error",
       SIGN_IN_PER_MINUTE: "1000",
