@@ -48,7 +48,8 @@ export function eyesOfArc(leaf: MainLeaf, curvature: number): EyesFromPin {
 /** One eye from where its half begins to bend. Everything from the sine and cosine of half the end's slope: exact near flat. */
 function eyeOfArc(bends: number, offset: number, curvature: number): { along: number; up: number } {
   const slope = curvature * bends;
-  if (slope === 0) return { along: bends, up: offset };
+  // The next terms are below what a double holds; and the quotients below lose their digits when a slope is next to nothing.
+  if (Math.abs(slope) < 1e-8) return { along: bends - offset * slope, up: (bends * slope) / 2 + offset };
   const [s, c] = [Math.sin(slope / 2), Math.cos(slope / 2)];
   const [sine, versine] = [2 * s * c, 2 * s * s];
   return {
