@@ -13,6 +13,8 @@ const Env = z.object({
   LOG_LEVEL: z.enum(["fatal", "error", "warn", "info", "debug", "silent"]).default("info"),
   /** Sign-in tries a minute from one address; a whole shop shares one. */
   SIGN_IN_PER_MINUTE: z.coerce.number().int().min(1).default(30),
+  /** Calculations a minute asked for by one token, or from one address without one. */
+  CALC_PER_MINUTE: z.coerce.number().int().min(1).default(240),
 });
 export type Env = z.infer<typeof Env>;
 

@@ -11,6 +11,7 @@ import {
 import type { Route } from "./+types/root";
 import { sessionSecret } from "./auth/cookie.server";
 import { actorFromSecret } from "./auth/sessions.server";
+import { actorFromToken, bearerOf } from "./auth/tokens.server";
 import { FaultPage } from "./components/frame/fault-page";
 import { actorContext, appContext } from "./context";
 import { guardRequest } from "./http/request.server";
@@ -20,7 +21,11 @@ import { SignSprite } from "./ui/sign";
 export const middleware: Route.MiddlewareFunction[] = [
   async ({ request, context }) => {
     const { db, now } = context.get(appContext);
-    const actor = await actorFromSecret(db, await sessionSecret(request.headers.get("cookie")), now());
+    // A request with a token is a program's: its cookies, if any, count for nothing.
+    const token = bearerOf(request.headers.get("authorization"));
+    const actor = token
+      ? await actorFromToken(db, token, now())
+      : await actorFromSecret(db, await sessionSecret(request.headers.get("cookie")), now());
     context.set(actorContext, actor);
     guardRequest(request, actor);
   },

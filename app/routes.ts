@@ -39,6 +39,11 @@ export default [
   route("setup", "routes/setup/setup.tsx"),
   route("devices", "routes/setup/devices.tsx"),
 
+  route("tokens", "routes/setup/tokens.tsx"),
+
   route("api/v1/board", "routes/api/board.ts"),
+  route("api/v1/calc/:name", "routes/api/calc.ts"),
+  route("api/v1/openapi.json", "routes/api/openapi.ts"),
+  route("api/docs", "routes/api/docs.tsx"),
   route("*", "routes/not-found.tsx"),
 ] satisfies RouteConfig;

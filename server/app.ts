@@ -1,11 +1,13 @@
 import { randomBytes } from "node:crypto";
 import { createRequestHandler } from "@react-router/express";
 import express, { type RequestHandler } from "express";
-import { rateLimit } from "express-rate-limit";
+import { ipKeyGenerator, rateLimit } from "express-rate-limit";
 import helmet from "helmet";
 import pino from "pino";
 import { pinoHttp } from "pino-http";
 import { RouterContextProvider, type ServerBuild } from "react-router";
+import { hashOf } from "../app/auth/sessions.server";
+import { bearerOf } from "../app/auth/tokens.server";
 import { appContext, nonceContext, tooManyContext } from "../app/context";
 import { openDatabase } from "../app/db/client.server";
 import { isUpToDate } from "../app/db/migrate.server";
@@ -65,19 +67,10 @@ export async function createApp({ io, migrationsDir, loadBuild }: Options) {
   });
   app.use(securityHeaders(production, settings.COOKIE_SECURE === "1"));
   app.use(sameOrigin);
+  app.post(["/sign-in{.data}", "/devices{.data}"], limited(settings.SIGN_IN_PER_MINUTE));
   app.post(
-    ["/sign-in{.data}", "/devices{.data}"],
-    rateLimit({
-      windowMs: 60_000,
-      limit: settings.SIGN_IN_PER_MINUTE,
-      standardHeaders: "draft-8",
-      legacyHeaders: false,
-      // The page itself says so, with what was typed still in it.
-      handler: (_req, res, next) => {
-        res.locals.tooMany = true;
-        next();
-      },
-    }),
+    "/api/v1/calc/:name",
+    limited(settings.CALC_PER_MINUTE, (req) => hashOf(tokenOf(req) ?? "")),
   );
   app.use((_req, res, next) => {
     // Pages are made for one person: nothing between us and them keeps a copy.
@@ -107,6 +100,25 @@ export async function createApp({ io, migrationsDir, loadBuild }: Options) {
     },
   };
 }
+
+/**
+ * Marks requests beyond so many a minute, by address unless a key tells them apart; the route answers 429 in its own
+ * words, with what was typed.
+ */
+function limited(perMinute: number, keyOf?: (req: express.Request) => string): RequestHandler {
+  return rateLimit({
+    windowMs: 60_000,
+    limit: perMinute,
+    standardHeaders: "draft-8",
+    legacyHeaders: false,
+    keyGenerator: (req) => (keyOf && tokenOf(req) ? keyOf(req) : ipKeyGenerator(req.ip ?? "")),
+    handler: (_req, res, next) => {
+      res.locals.tooMany = true;
+      next();
+    },
+  });
+}
+const tokenOf = (req: express.Request) => bearerOf(req.get("authorization") ?? null);
 
 function securityHeaders(production: boolean, https: boolean): RequestHandler {
   return helmet({

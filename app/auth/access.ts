@@ -47,7 +47,12 @@ export const ACCESS: readonly { path: string; GET?: Need; POST?: Need }[] = [
   { path: "/setup", GET: "setup:see", POST: "setup:edit" },
   { path: "/devices", GET: "devices:pair", POST: "devices:pair" },
 
+  { path: "/tokens", GET: "tokens:make", POST: "tokens:make" },
+
   { path: "/api/v1/board", GET: "board:see" },
+  { path: "/api/v1/calc/:name", POST: "calc:use" },
+  { path: "/api/v1/openapi.json", GET: "anyone" },
+  { path: "/api/docs", GET: "anyone" },
   // What is not found is said to anyone, in words, and looks the same to all.
   { path: "/*", GET: "anyone" },
 ];

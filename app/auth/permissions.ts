@@ -21,6 +21,8 @@ export const PERMISSIONS = [
   "setup:see",
   "setup:edit",
   "devices:pair",
+  "tokens:make",
+  "calc:use",
 ] as const;
 export type Permission = (typeof PERMISSIONS)[number];
 
@@ -45,6 +47,7 @@ const MAY: Record<ActorRole, readonly Permission[]> = {
     "wall:see",
     "setup:see",
     "devices:pair",
+    "calc:use",
   ],
   tech: [
     "board:see",
@@ -56,6 +59,7 @@ const MAY: Record<ActorRole, readonly Permission[]> = {
     "layouts:see",
     "layouts:measure",
     "springs:see",
+    "calc:use",
   ],
   counter: [
     "board:see",
@@ -66,8 +70,10 @@ const MAY: Record<ActorRole, readonly Permission[]> = {
     "builds:book-in",
     "tags:print",
     "layouts:see",
+    "calc:use",
   ],
   display: ["board:see", "wall:see"],
+  token: ["calc:use"],
 };
 
 /** May an actor in this role do that? The one place where it is decided. */

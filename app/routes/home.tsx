@@ -10,6 +10,7 @@ const FIRST_PAGE: Record<ActorRole, string> = {
   tech: "/scan",
   counter: "/counter",
   display: "/wall",
+  token: "/api/docs",
 };
 
 export function loader({ context }: Route.LoaderArgs) {

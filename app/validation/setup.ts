@@ -62,3 +62,11 @@ export const PairForm = z.object({
     .max(60, "Keep it under 60 letters."),
   kind: z.enum(["wall", "post"], "Choose what it is."),
 });
+
+export const TokenForm = z.object({
+  name: z
+    .string()
+    .trim()
+    .min(1, "Give the token a name: the program that will use it.")
+    .max(60, "Keep it under 60 letters."),
+});

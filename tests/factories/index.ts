@@ -1,7 +1,7 @@
 import type { Actor } from "~/auth/actor";
 import { hashPassword } from "~/auth/authenticator.server";
 import type { Db } from "~/db/client.server";
-import type { ActorRole } from "~/domain/people/roles";
+import type { ActorRole, Role } from "~/domain/people/roles";
 import type { Context } from "~/services/change.server";
 import {
   makeBay,
@@ -49,7 +49,7 @@ export async function makeTestShop(
   const passwordHash = options.password === undefined ? undefined : await hashPassword(options.password);
   const person = async (
     name: string,
-    role: Exclude<ActorRole, "display">,
+    role: Role,
     skills: Parameters<typeof makePerson>[2]["skills"] = [],
   ): Promise<TestPerson> => {
     const email = `${name.split(" ")[0]?.toLowerCase()}.${mark}@test.example`;

@@ -1,3 +1,4 @@
+export * from "./api-tokens";
 export * from "./bays";
 export * from "./builds";
 export * from "./columns";

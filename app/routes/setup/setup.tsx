@@ -75,9 +75,16 @@ export default function Setup({ loaderData, actionData }: Route.ComponentProps) 
       <main className="mx-auto w-full max-w-4xl p-6">
         <div className="flex items-baseline justify-between gap-4">
           <h1 className="font-label text-3xl font-semibold">Setup</h1>
-          <Link className="font-medium text-line underline" to="/devices">
-            Displays
-          </Link>
+          <nav className="flex gap-5" aria-label="More of Setup">
+            <Link className="font-medium text-line underline" to="/devices">
+              Displays
+            </Link>
+            {mayEdit ? (
+              <Link className="font-medium text-line underline" to="/tokens">
+                Tokens
+              </Link>
+            ) : null}
+          </nav>
         </div>
         {mayEdit ? null : <p className="mt-2 text-concrete-700">Only the owner changes these.</p>}
         <Form method="post" className="mt-6 grid gap-8" key={shell.now}>
