@@ -25,7 +25,7 @@ const fault = (outcome: Outcome<unknown>) => (outcome.ok ? JSON.stringify(outcom
 const near = (...values: number[]) => values.map((n) => expect.closeTo(n, 9));
 const plain = (front: number, rear: number) => value(mainLeaf({ front: inches(front), rear: inches(rear) }));
 
-const half = fc.double({ min: 300, max: 1000, noNaN: true });
+const half = fc.double({ min: 400, max: 1000, noNaN: true });
 const offset = fc.double({ min: -60, max: 60, noNaN: true });
 const anyLeaf: fc.Arbitrary<MainLeaf> = fc
   .record({
