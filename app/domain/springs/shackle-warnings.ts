@@ -26,7 +26,7 @@ export function placeWarnings(places: Places, near: Degrees): ShackleWarning[] {
     const key = place.ok ? `${place.value.arch} ${words}` : `${words}`;
     if (words === null || (at === "bump" && said.has(key))) continue;
     said.add(key);
-    warnings.push({ at, words: `${NAMES[at]}: ${words}` });
+    warnings.push({ at, words: `${NAMES[at]}: ${words.charAt(0).toLowerCase()}${words.slice(1)}` });
   }
   return warnings;
 }
