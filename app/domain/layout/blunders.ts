@@ -43,7 +43,7 @@ export function suggestBlunders(
   unit: LengthUnit,
 ): Suggestion[] {
   const found: Suggestion[] = [];
-  for (const { ties: changed, side: on, slip, ...candidate } of candidates(ties, side)) {
+  for (const { ties: changed, side: on, slip, ...candidate } of candidates(ties, side, unit)) {
     const fit = adjustTies(changed, on, sigma);
     if (!fit.ok || isSuspect(fit.value)) continue;
     const within = mm(Math.max(...fit.value.residuals.map((residual) => Math.abs(residual.residual))));
@@ -69,15 +69,19 @@ function wordsFor(slip: string, reading: Millimetres | null, within: Millimetres
   return `Looks like ${slip}: ${value} fits within ${close}.`;
 }
 
-/** The whole inches of a reading with two neighbouring digits swapped, or one 6 turned into a 9 and the other way. */
-function misread(length: Millimetres): { kind: "digits-swapped" | "six-for-nine"; reading: Millimetres }[] {
-  const total = toInches(length);
+/** The whole inches (or millimetres) of a reading with two neighbouring digits swapped, or one 6 turned into a 9 and the other way. */
+function misread(
+  length: Millimetres,
+  unit: LengthUnit,
+): { kind: "digits-swapped" | "six-for-nine"; reading: Millimetres }[] {
+  const total = unit === "in" ? toInches(length) : length;
   const whole = Math.floor(total + 1e-9);
+  const readingOf = unit === "in" ? inches : mm;
   const digits = String(whole);
   const results: { kind: "digits-swapped" | "six-for-nine"; reading: Millimetres }[] = [];
   const add = (kind: "digits-swapped" | "six-for-nine", text: string) => {
     if (text !== digits && !text.startsWith("0"))
-      results.push({ kind, reading: inches(Number(text) + total - whole) });
+      results.push({ kind, reading: readingOf(Number(text) + total - whole) });
   };
   for (let i = 0; i + 1 < digits.length; i++)
     add("digits-swapped", `${digits.slice(0, i)}${digits[i + 1]}${digits[i]}${digits.slice(i + 2)}`);
@@ -88,7 +92,7 @@ function misread(length: Millimetres): { kind: "digits-swapped" | "six-for-nine"
   return results;
 }
 
-function candidates(ties: readonly Tie[], side: 1 | -1): Candidate[] {
+function candidates(ties: readonly Tie[], side: 1 | -1, unit: LengthUnit): Candidate[] {
   const list: Candidate[] = [];
   ties.forEach((tie, i) => {
     const one = (kind: Suggestion["kind"], reading: number, slip: string) => {
@@ -107,7 +111,7 @@ function candidates(ties: readonly Tie[], side: 1 | -1): Candidate[] {
     one("inch-lost", tie.distance + MM_PER_INCH, `an inch taken off twice ${from}`);
     one("centimetres", tie.distance / 2.54, `centimetres read for inches ${from}`);
     one("centimetres", tie.distance * 2.54, `inches read for centimetres ${from}`);
-    for (const { kind, reading } of misread(tie.distance))
+    for (const { kind, reading } of misread(tie.distance, unit))
       one(kind, reading, `${kind === "digits-swapped" ? "two digits swapped" : "a 6 for a 9"} ${from}`);
     ties.slice(i + 1).forEach((other) => {
       const swapped = ties.map((t) =>
