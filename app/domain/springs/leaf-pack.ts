@@ -41,6 +41,9 @@ export type LeafPack = {
 /** Young's modulus of spring steel, MPa: the round figure of textbooks (200 to 210 thousand). */
 export const SPRING_STEEL_MODULUS = 206_000;
 
+/** Thinner, narrower or shorter (mm), or softer (MPa), is a slip of the finger, and too little to divide by (ours, no source). */
+export const LEAST_FIGURE = 0.1;
+
 export type LeafStress = { fullLength: number | null; graduated: number | null; largest: number };
 
 /** The numbers that the formulas want. */
@@ -83,8 +86,8 @@ function figures(pack: LeafPack): Outcome<Figures> {
   if (!counts.ok) return counts;
   const span = effectiveSpan(pack.span, pack.seat);
   if (!span.ok) return span;
-  if (!(pack.width > 0 && pack.thickness > 0 && pack.modulus > 0))
-    return problem("Width, thickness and modulus are more than nothing.");
+  if (Math.min(pack.width, pack.thickness, pack.modulus, span.value) < LEAST_FIGURE)
+    return problem("Width, thickness, effective span and modulus are more than nothing.");
   const { full, graduated } = counts.value;
   return ok({
     full,

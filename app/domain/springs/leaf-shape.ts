@@ -26,13 +26,23 @@ export const STEEPEST_END = Math.PI / 3;
 /** An arch is met to within this, in mm. */
 const NEAR_ENOUGH = 1e-9;
 
-/** What bends of each half. */
+/**
+ * What bends of each half: the half less its share of the clamped part.
+ * @returns millimetres
+ * @example bending(leaf of 650 and 700 mm, 100 mm clamped) // 600 and 650
+ */
 export const bending = (leaf: MainLeaf): { front: number; rear: number } => ({
   front: leaf.front - leaf.clamped / 2,
   rear: leaf.rear - leaf.clamped / 2,
 });
 
-/** Where the eyes stand from the pin when the leaf has one curvature all along, 1/mm; positive: eyes up. */
+/**
+ * Where the eyes stand from the pin when the leaf has one curvature all along: R sin θ along and R(1 − cos θ) up, each with
+ * the eye's own offset turned by θ.
+ * @param curvature 1/mm; positive: eyes up
+ * @returns millimetres; always numbers
+ * @example eyesOfArc(leaf of 500 and 500 mm, 0.001) // 479.4255 along, 61.2087 up, either eye
+ */
 export function eyesOfArc(leaf: MainLeaf, curvature: number): EyesFromPin {
   const straight = leaf.clamped / 2;
   const front = eyeOfArc(leaf.front - straight, leaf.eyeOffset.front, curvature);
@@ -58,19 +68,31 @@ function eyeOfArc(bends: number, offset: number, curvature: number): { along: nu
   };
 }
 
-/** The pin below the line of the eyes, mm. */
+/**
+ * The pin below the line of the eyes.
+ * @returns millimetres
+ * @example archOf({ frontAlong: 600, frontUp: 50, rearAlong: 600, rearUp: 50 }) // 50
+ */
 export function archOf({ frontAlong, frontUp, rearAlong, rearUp }: EyesFromPin): number {
   const [along, up] = [frontAlong + rearAlong, frontUp - rearUp];
   return (frontUp * rearAlong + rearUp * frontAlong) / Math.sqrt(along * along + up * up);
 }
 
-/** Front eye to the foot of the pin on the line of the eyes, mm. */
+/**
+ * Front eye to the foot of the pin on the line of the eyes.
+ * @returns millimetres
+ * @example fromFrontOf({ frontAlong: 600, frontUp: 50, rearAlong: 700, rearUp: 50 }) // 600
+ */
 export function fromFrontOf({ frontAlong, frontUp, rearAlong, rearUp }: EyesFromPin): number {
   const [along, up] = [frontAlong + rearAlong, frontUp - rearUp];
   return (frontAlong * along + frontUp * up) / Math.sqrt(along * along + up * up);
 }
 
-/** All of it, with the person's measures. */
+/**
+ * The leaf's shape from where its eyes stand.
+ * @returns millimetres and degrees
+ * @example shapeOf({ frontAlong: 600, frontUp: 50, rearAlong: 700, rearUp: 50 }) // eye distance 1300, arch 50, seat angle 0
+ */
 export function shapeOf(eyes: EyesFromPin): LeafShape {
   const [along, up] = [eyes.frontAlong + eyes.rearAlong, eyes.frontUp - eyes.rearUp];
   const [distance, fromFront] = [Math.hypot(along, up), fromFrontOf(eyes)];
@@ -83,7 +105,12 @@ export function shapeOf(eyes: EyesFromPin): LeafShape {
   };
 }
 
-/** The curvature at which the leaf has an arch, 1/mm; null when no bend within STEEPEST_END gives it. */
+/**
+ * The curvature at which the leaf has an arch.
+ * @param arch the pin below the line of the eyes, millimetres
+ * @returns 1/mm; null when no bend within STEEPEST_END gives it
+ * @example curvatureAt(leaf of 500 and 500 mm, 61.2087) // 0.001
+ */
 export function curvatureAt(leaf: MainLeaf, arch: number): number | null {
   const { front, rear } = bending(leaf);
   const most = STEEPEST_END / Math.max(front, rear);

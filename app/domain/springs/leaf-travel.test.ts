@@ -4,7 +4,16 @@ import type { Outcome } from "../outcome";
 import { degrees, toRadians } from "../units/angle";
 import { inches, mm, toInches } from "../units/length";
 import { segmentFrom } from "./arc";
-import { curvatureAt, eyesOfArc, flatArch, leafAtArch } from "./leaf-shape";
+import {
+  archOf,
+  bending,
+  curvatureAt,
+  eyesOfArc,
+  flatArch,
+  fromFrontOf,
+  leafAtArch,
+  shapeOf,
+} from "./leaf-shape";
 import {
   archSteps,
   eyeLineSlope,
@@ -96,6 +105,25 @@ describe("mainLeaf", () => {
   ])("says what is wrong with %j", (input, words) => expect(fault(mainLeaf(input))).toMatch(words));
 });
 
+describe("leaf shape", () => {
+  it("does the examples", () => {
+    const clamped = value(mainLeaf({ front: mm(650), rear: mm(700), clamped: mm(100) }));
+    expect(bending(clamped)).toEqual({ front: 600, rear: 650 });
+    const even = value(mainLeaf({ front: mm(500), rear: mm(500) }));
+    const eyes = eyesOfArc(even, 0.001);
+    expect([eyes.frontAlong, eyes.rearAlong]).toEqual([
+      expect.closeTo(479.4255, 4),
+      expect.closeTo(479.4255, 4),
+    ]);
+    expect([eyes.frontUp, eyes.rearUp]).toEqual([expect.closeTo(61.2087, 4), expect.closeTo(61.2087, 4)]);
+    const seen = { frontAlong: 600, frontUp: 50, rearAlong: 700, rearUp: 50 };
+    expect([archOf(seen), fromFrontOf(seen)]).toEqual([50, 600]);
+    expect(shapeOf(seen)).toMatchObject({ eyeDistance: 1300, arch: 50, fromRear: 700 });
+    expect(shapeOf(seen).seatAngle).toBeCloseTo(0, 12);
+    expect(curvatureAt(even, archOf(eyes))).toBeCloseTo(0.001, 10);
+  });
+});
+
 describe("leafAtArch", () => {
   it("does the example, which is the circular segment", () => {
     const { eyeDistance, fromFront, seatAngle } = value(leafAtArch(plain(26, 26), inches(5)));
@@ -150,7 +178,7 @@ describe("leafAtArch", () => {
         const bend = curvatureAt(bare, arch) ?? Number.NaN;
         let [length, x, z] = [0, 0, 0];
         for (let i = 1; i <= 2000; i++) {
-          const part = value(mainLeaf({ front: mm((bare.front * i) / 2000), rear: bare.rear }));
+          const part = { ...bare, front: mm((bare.front * i) / 2000) };
           const { frontAlong, frontUp } = eyesOfArc(part, bend);
           length += Math.hypot(frontAlong - x, frontUp - z);
           [x, z] = [frontAlong, frontUp];

@@ -27,21 +27,25 @@ export type MainLeafInput = {
 /** An eye further off than this share of what bends of the shorter half is no eye of a leaf spring (ours, no source). */
 export const LARGEST_EYE_OFFSET = 1 / 4;
 
+/** Less than this is not a half of a spring but a slip of the finger, and too little to divide by (ours, no source). */
+export const SHORTEST_HALF = mm(1);
+
 const NOUGHT = mm(0);
 
 /**
  * A main leaf that can be reckoned with.
  * @param input millimetres; nothing clamped and eyes in line with the leaf unless told
- * @returns a problem when a half is not longer than nothing, the clamp takes all of it, or an eye stands too far off
+ * @returns a problem when a half is shorter than 1 mm, the clamp takes all of it, or an eye stands too far off
  * @example mainLeaf({ front: inches(24), rear: inches(28) }) // clamped 0, eye offsets 0
  */
 export function mainLeaf({ front, rear, clamped = NOUGHT, eyeOffset }: MainLeafInput): Outcome<MainLeaf> {
   const offset = { front: eyeOffset?.front ?? NOUGHT, rear: eyeOffset?.rear ?? NOUGHT };
-  if (front <= 0 || rear <= 0)
-    return problem("Both halves are longer than nothing: the pin stands between the eyes.");
+  if (front < SHORTEST_HALF || rear < SHORTEST_HALF)
+    return problem("Both halves are longer than 1 mm: the pin stands between the eyes.");
   if (clamped < 0) return problem("The clamped length cannot be negative.");
   const bends = Math.min(front, rear) - clamped / 2;
-  if (bends <= 0) return problem("The U-bolts clamp the whole of the shorter half: nothing is left to bend.");
+  if (bends < SHORTEST_HALF)
+    return problem("The U-bolts clamp the whole of the shorter half: nothing is left to bend.");
   if (Math.max(Math.abs(offset.front), Math.abs(offset.rear)) > LARGEST_EYE_OFFSET * bends)
     return problem("The eye centre stands too far off the leaf for so short a half.");
   return ok({ front, rear, clamped, eyeOffset: offset });

@@ -27,6 +27,9 @@ export const USUAL_SHACKLE_ANGLE = degrees(90);
 /** A shackle nearer to straight than this is about to go over centre. Common practice, no source. */
 export const NEAR_STRAIGHT = degrees(5);
 
+/** Two points nearer to each other than this (mm) are one (ours, no source). */
+const SAME_POINT = 1e-3;
+
 /** To which hand of the way from the fixed eye to the moving one the hanger lies: 1 left, −1 right, seen with ahead to the right. */
 const hand = (fixedEye: FixedEye, load: ShackleLoad): 1 | -1 =>
   (fixedEye === "behind") === (load === "compression") ? 1 : -1;
@@ -53,7 +56,7 @@ export function placeHanger(wanted: {
   angle?: Degrees | undefined;
 }): Outcome<HangerPlace> {
   const { fixedEye, eye, eyeDistance, movingEyeHigher, shackle, load, angle = USUAL_SHACKLE_ANGLE } = wanted;
-  if (eyeDistance <= 0 || shackle <= 0)
+  if (eyeDistance < SAME_POINT || shackle < SAME_POINT)
     return problem("Eye distance and shackle length are more than nothing.");
   if (Math.abs(movingEyeHigher) >= eyeDistance)
     return problem("The eyes differ more in height than they are apart.");
@@ -86,7 +89,7 @@ export function movingEye(mounting: ShackleMounting, eyeDistance: Millimetres): 
   const { fixedEye, eye, hanger, shackle, load } = mounting;
   const [x, z] = [hanger.station - eye.station, hanger.height - eye.height];
   const base = Math.hypot(x, z);
-  if (eyeDistance <= 0 || shackle <= 0 || base === 0)
+  if (Math.min(eyeDistance, shackle, base) < SAME_POINT)
     return problem("Eye distance, shackle and the distance of the hangers are more than nothing.");
   if (eyeDistance > base + shackle)
     return problem(
