@@ -41,7 +41,7 @@ export const bending = (leaf: MainLeaf): { front: number; rear: number } => ({
  * the eye's own offset turned by θ.
  * @param curvature 1/mm; positive: eyes up
  * @returns millimetres; always numbers
- * @example eyesOfArc(leaf of 500 and 500 mm, 0.001) // 479.4255 along, 61.2087 up, either eye
+ * @example eyesOfArc(leaf of 500 and 500 mm, 0.001) // 479.4255 along, 122.4174 up, either eye
  */
 export function eyesOfArc(leaf: MainLeaf, curvature: number): EyesFromPin {
   const straight = leaf.clamped / 2;
@@ -109,7 +109,7 @@ export function shapeOf(eyes: EyesFromPin): LeafShape {
  * The curvature at which the leaf has an arch.
  * @param arch the pin below the line of the eyes, millimetres
  * @returns 1/mm; null when no bend within STEEPEST_END gives it
- * @example curvatureAt(leaf of 500 and 500 mm, 61.2087) // 0.001
+ * @example curvatureAt(leaf of 500 and 500 mm, 122.4174) // 0.001
  */
 export function curvatureAt(leaf: MainLeaf, arch: number): number | null {
   const { front, rear } = bending(leaf);
