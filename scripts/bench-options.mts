@@ -1,7 +1,8 @@
 /**
  * How long an option table takes and how it grows: `npm run bench`. Times are this machine's; the growth is what counts.
  */
-import { type OptionSearch, optionSearch } from "../app/domain/layout/option-search";
+import { optionSearch } from "../app/domain/layout/option-search";
+import type { OptionSearch } from "../app/domain/layout/option-types";
 import { degrees } from "../app/domain/units/angle";
 import { inches, mm } from "../app/domain/units/length";
 

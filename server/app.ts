@@ -67,6 +67,7 @@ export async function createApp({ io, migrationsDir, loadBuild }: Options) {
   });
   app.use(securityHeaders(production, settings.COOKIE_SECURE === "1"));
   app.use(sameOrigin);
+  app.use(shortBodies);
   app.post(["/sign-in{.data}", "/devices{.data}"], limited(settings.SIGN_IN_PER_MINUTE));
   app.post(
     "/api/v1/calc/:name",
@@ -100,6 +101,19 @@ export async function createApp({ io, migrationsDir, loadBuild }: Options) {
     },
   };
 }
+
+/** Longer than any form or list of figures that the shop sends. */
+const LONGEST_BODY = 1024 * 1024;
+
+/** Refuses bodies that are too long, or do not say how long they are, before anything reads them. */
+const shortBodies: RequestHandler = (req, res, next) => {
+  const length = req.get("content-length");
+  if (req.get("transfer-encoding") !== undefined)
+    res.set("Connection", "close").status(411).json({ message: "Say how long the body is." });
+  else if (length !== undefined && Number(length) > LONGEST_BODY)
+    res.set("Connection", "close").status(413).json({ message: "That is more than can be sent at once." });
+  else next();
+};
 
 /**
  * Marks requests beyond so many a minute, by address unless a key tells them apart; the route answers 429 in its own

@@ -1,7 +1,8 @@
 import { z } from "zod";
 import { reasonsAgainst } from "../domain/layout/option-limits";
 import { alikeTo } from "../domain/layout/option-order";
-import { type OptionColumns, type OptionSearch, optionSearch } from "../domain/layout/option-search";
+import { optionSearch } from "../domain/layout/option-search";
+import type { OptionColumns, OptionSearch } from "../domain/layout/option-types";
 import { ok } from "../domain/outcome";
 import { degrees } from "../domain/units/angle";
 import { type Millimetres, mm } from "../domain/units/length";

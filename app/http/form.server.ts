@@ -1,5 +1,15 @@
+import { data } from "react-router";
 import type { z } from "zod";
 import { Refusal } from "../services/errors";
+
+/** The form of a request. @throws 400 in words when the body is no form: no browser of ours sends such a thing */
+export async function formOf(request: Request): Promise<FormData> {
+  try {
+    return await request.formData();
+  } catch {
+    throw data({ message: "What was sent cannot be read as a form." }, { status: 400 });
+  }
+}
 
 /**
  * Reads a form by a schema. Repeated names become lists only where the schema's caller asks for them.

@@ -5,6 +5,7 @@ import { endSession, startSession } from "~/auth/sessions.server";
 import { SignInPage } from "~/components/sign-in/sign-in-page";
 import { actorContext, appContext, tooManyContext } from "~/context";
 import { readDemoShop } from "~/db/queries/sign-in.server";
+import { formOf } from "~/http/form.server";
 import { safeReturn } from "~/http/request.server";
 import type { Route } from "./+types/sign-in";
 
@@ -21,7 +22,7 @@ export async function loader({ context }: Route.LoaderArgs) {
 /** `?to=`: where to go on to. A session that this browser had is ended: every sign-in gets a new one. */
 export async function action({ request, context }: Route.ActionArgs) {
   const { db, now, dropSession } = context.get(appContext);
-  const typed = String((await request.clone().formData()).get("email") ?? "").slice(0, 190);
+  const typed = String((await formOf(request.clone())).get("email") ?? "").slice(0, 190);
   if (context.get(tooManyContext))
     return data(
       { message: "Too many tries from this address. Wait a minute.", email: typed },

@@ -1,6 +1,6 @@
 import { type Degrees, formatDegrees } from "../units/angle";
 import { formatLength, type LengthUnit, mm } from "../units/length";
-import type { OptionColumns, OptionSearch } from "./option-search";
+import type { OptionColumns, OptionSearch } from "./option-types";
 
 /** The limits that an option can fail, each a bit of OptionColumns.rejected. */
 export const Rejection = {

@@ -1,7 +1,4 @@
-import type { OptionColumns, OptionSearch } from "./option-search";
-
-/** What comes first: nearest to the opening's centre, steepest own angle, most room at lock, least changed wheelbase. */
-export type OptionOrder = "centre" | "angle" | "room" | "wheelbase";
+import type { OptionColumns, OptionSearch } from "./option-types";
 
 const known = (...values: (number | undefined)[]) =>
   values.find((value) => value !== undefined && !Number.isNaN(value)) ?? Number.NaN;

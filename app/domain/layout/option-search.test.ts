@@ -6,7 +6,8 @@ import { degrees, toRadians } from "../units/angle";
 import { inches, mm, toInches } from "../units/length";
 import { Rejection, reasonsAgainst } from "./option-limits";
 import { alikeTo } from "./option-order";
-import { type OptionSearch, optionSearch } from "./option-search";
+import { optionSearch } from "./option-search";
+import type { OptionSearch } from "./option-types";
 
 /** The measured case: holes, springs and tyre as in measured-case.test.ts; figures worked out independently. */
 const measured: OptionSearch = {

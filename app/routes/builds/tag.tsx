@@ -4,7 +4,7 @@ import { Shell } from "~/components/frame/shell";
 import { TagPage } from "~/components/tag/tag-page";
 import { appContext } from "~/context";
 import { readBuildTag } from "~/db/queries/tags.server";
-import { readForm } from "~/http/form.server";
+import { formOf, readForm } from "~/http/form.server";
 import { answer, idParam, publicOrigin, requireActor, serviceContext } from "~/http/request.server";
 import { readShell } from "~/http/shell.server";
 import { replaceTag } from "~/services/replace-tag.server";
@@ -35,7 +35,7 @@ export async function loader({ request, params, context }: Route.LoaderArgs) {
 
 /** A lost tag is replaced: `code` is the one that was on the screen. */
 export async function action({ request, params, context }: Route.ActionArgs) {
-  const form = await request.formData();
+  const form = await formOf(request);
   return answer(form, async () => {
     const { code } = readForm(
       form,

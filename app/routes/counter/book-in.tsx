@@ -4,7 +4,7 @@ import { Shell } from "~/components/frame/shell";
 import { appContext } from "~/context";
 import { readCustomers } from "~/db/queries/builds.server";
 import { readShop } from "~/db/queries/shop.server";
-import { readForm } from "~/http/form.server";
+import { formOf, readForm } from "~/http/form.server";
 import { answer, requireActor, serviceContext } from "~/http/request.server";
 import { readShell } from "~/http/shell.server";
 import { bookIn } from "~/services/book-in.server";
@@ -25,7 +25,7 @@ export async function loader({ context }: Route.LoaderArgs) {
 export async function action({ request, context }: Route.ActionArgs) {
   const actor = requireActor(context, "builds:book-in");
   const { unit } = await readShop(context.get(appContext).db, actor.shopId);
-  const form = await request.formData();
+  const form = await formOf(request);
   const result = await answer(form, () => bookIn(serviceContext(context), readForm(form, bookInForm(unit))));
   if (result.data.ok) throw redirect(`/builds/${result.data.buildId}?booked-in=1`);
   return result;

@@ -1,4 +1,4 @@
-import { readForm } from "~/http/form.server";
+import { formOf, readForm } from "~/http/form.server";
 import { answer, idParam, serviceContext } from "~/http/request.server";
 import { setStage } from "~/services/set-stage.server";
 import { SetStageForm } from "~/validation/floor";
@@ -6,6 +6,6 @@ import type { Route } from "./+types/set-stage";
 
 export async function action({ request, params, context }: Route.ActionArgs) {
   const buildId = idParam(params.buildId);
-  const form = await request.formData();
+  const form = await formOf(request);
   return answer(form, () => setStage(serviceContext(context), { buildId, ...readForm(form, SetStageForm) }));
 }

@@ -1,7 +1,8 @@
+import { formOf } from "~/http/form.server";
 import { answer, serviceContext } from "~/http/request.server";
 import { undoFloor } from "~/services/undo-floor.server";
 import type { Route } from "./+types/undo-floor";
 
 export async function action({ request, context }: Route.ActionArgs) {
-  return answer(await request.formData(), () => undoFloor(serviceContext(context)));
+  return answer(await formOf(request), () => undoFloor(serviceContext(context)));
 }

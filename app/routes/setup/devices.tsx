@@ -2,7 +2,7 @@ import { Form, Link, useNavigation } from "react-router";
 import { z } from "zod";
 import { Shell } from "~/components/frame/shell";
 import { appContext, tooManyContext } from "~/context";
-import { readForm } from "~/http/form.server";
+import { formOf, readForm } from "~/http/form.server";
 import { answer, requireActor, serviceContext } from "~/http/request.server";
 import { readShell } from "~/http/shell.server";
 import { Refusal } from "~/services/errors";
@@ -26,7 +26,7 @@ export async function loader({ context }: Route.LoaderArgs) {
 const Revoke = z.object({ deviceId: z.coerce.number().int().positive() });
 
 export async function action({ request, context }: Route.ActionArgs) {
-  const form = await request.formData();
+  const form = await formOf(request);
   return answer(form, async () => {
     if (context.get(tooManyContext))
       throw new Refusal("too-many", "Too many codes from this address. Wait a minute.");

@@ -4,7 +4,7 @@ import { Shell } from "~/components/frame/shell";
 import { appContext } from "~/context";
 import { readShop } from "~/db/queries/shop.server";
 import { formatLength, mm } from "~/domain/units/length";
-import { readForm } from "~/http/form.server";
+import { formOf, readForm } from "~/http/form.server";
 import { answer, requireActor, serviceContext } from "~/http/request.server";
 import { readShell } from "~/http/shell.server";
 import { changeSetup } from "~/services/change-setup.server";
@@ -40,7 +40,7 @@ export async function loader({ context }: Route.LoaderArgs) {
 }
 
 export async function action({ request, context }: Route.ActionArgs) {
-  const form = await request.formData();
+  const form = await formOf(request);
   return answer(form, async () => {
     const ctx = serviceContext(context);
     const shop = await readShop(ctx.db, ctx.actor.shopId);

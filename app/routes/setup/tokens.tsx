@@ -3,7 +3,7 @@ import { z } from "zod";
 import { Shell } from "~/components/frame/shell";
 import { dayAndDate, whenInWords } from "~/components/time";
 import { appContext } from "~/context";
-import { readForm } from "~/http/form.server";
+import { formOf, readForm } from "~/http/form.server";
 import { answer, requireActor, serviceContext } from "~/http/request.server";
 import { readShell } from "~/http/shell.server";
 import { listTokens, makeToken, revokeToken } from "~/services/api-tokens.server";
@@ -31,7 +31,7 @@ export async function loader({ context }: Route.LoaderArgs) {
 const Revoke = z.object({ tokenId: z.coerce.number().int().positive() });
 
 export async function action({ request, context }: Route.ActionArgs) {
-  const form = await request.formData();
+  const form = await formOf(request);
   return answer<{ words: string; token?: string }>(form, async () => {
     const ctx = serviceContext(context);
     if (form.get("do") === "revoke") return revokeToken(ctx, readForm(form, Revoke).tokenId);

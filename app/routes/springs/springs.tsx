@@ -7,7 +7,7 @@ import { SpringsPage } from "~/components/springs/springs-page";
 import { appContext } from "~/context";
 import { readShop } from "~/db/queries/shop.server";
 import { readHangers, readNextRackNumber, readRack } from "~/db/queries/springs.server";
-import { readForm } from "~/http/form.server";
+import { formOf, readForm } from "~/http/form.server";
 import { answer, requireActor, serviceContext } from "~/http/request.server";
 import { readShell } from "~/http/shell.server";
 import { useLiveTouch } from "~/realtime/use-live";
@@ -44,7 +44,7 @@ const TakeOut = z.object({ springId: z.string().regex(/^\d+$/, "Which spring?").
 /** `do`: "add" a spring to the rack, or "take-out" one. */
 export async function action({ request, context }: Route.ActionArgs) {
   const actor = requireActor(context, "springs:edit");
-  const form = await request.formData();
+  const form = await formOf(request);
   const ctx = serviceContext(context);
   if (form.get("do") === "take-out")
     return answer(form, () => takeOutSpring(ctx, readForm(form, TakeOut).springId));
