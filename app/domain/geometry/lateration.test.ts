@@ -4,7 +4,10 @@ import { mm } from "../units/length";
 import { searchBlunders } from "./blunder-search";
 import { adjustDistances, type DistanceNetwork, type NamedPoint } from "./lateration";
 
-const at = (name: string, ...coordinates: number[]): NamedPoint => ({ name, at: coordinates.map(mm) });
+const at = (name: string, ...coordinates: number[]): NamedPoint => ({
+  name,
+  at: coordinates.map((value) => mm(value)),
+});
 const lengthOf = (a: NamedPoint, b: NamedPoint) =>
   Math.hypot(...a.at.map((value, i) => value - (b.at[i] ?? 0)));
 const SPACE = [at("A", 0, 0, 0), at("B", 3000, 0, 0), at("C", 0, 2500, 0), at("D", 0, 0, 2000)];
@@ -59,7 +62,7 @@ describe("adjustDistances", () => {
         fc.double({ min: -3, max: 3, noNaN: true }),
         (errors, angle) => {
           const base = network(FLOOR, at("P", 1400, 900), errors);
-          const turn = ({ name, at: [x = 0, y = 0] }: NamedPoint) =>
+          const turn = ({ name, at: [x = mm(0), y = mm(0)] }: NamedPoint) =>
             at(
               name,
               x * Math.cos(angle) - y * Math.sin(angle) + 700,

@@ -53,7 +53,7 @@ export type Adjusted = {
 const ROUNDS = 60;
 
 /** Both places where two tapes meet; none when they do not reach each other. */
-function meetings(first: Tie, second: Tie): readonly FloorPoint[] {
+export function meetings(first: Tie, second: Tie): readonly FloorPoint[] {
   const base = distance(first.at, second.at);
   if (base === 0) return [];
   const along = (first.distance ** 2 - second.distance ** 2 + base ** 2) / (2 * base);
