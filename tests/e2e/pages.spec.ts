@@ -147,6 +147,14 @@ const PAGES: PageCase[] = [
   },
   { name: "setup", who: "owner", path: () => "/setup", sizes: [DESK, UPRIGHT, PHONE], says: /Slope allowed/ },
   { name: "devices", who: "foreman", path: () => "/devices", sizes: [DESK, PHONE], says: /Pair a display/ },
+  { name: "tokens", who: "owner", path: () => "/tokens", sizes: [DESK, PHONE], says: /Make a token/ },
+  {
+    name: "calculations",
+    who: "nobody",
+    path: () => "/api/docs",
+    sizes: [DESK, UPRIGHT, PHONE],
+    says: /Leaf spring/i,
+  },
   {
     name: "not-found",
     who: "foreman",

@@ -1,6 +1,6 @@
 import type { RouteConfigEntry } from "@react-router/dev/routes";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
-import { makeBuild, makeTestShop, type TestShop } from "#tests/factories";
+import { contextFor, makeBuild, makeTestShop, type TestShop } from "#tests/factories";
 import { testDatabase } from "#tests/setup/database";
 import { cookieFor, startServer, type TestServer } from "#tests/setup/server";
 import { ACCESS, type Need } from "~/auth/access";
@@ -8,6 +8,7 @@ import { may } from "~/auth/permissions";
 import { schema } from "~/db/client.server";
 import { ACTOR_ROLES, type ActorRole } from "~/domain/people/roles";
 import routes from "~/routes";
+import { makeToken } from "~/services/api-tokens.server";
 
 /** Every path of routes.ts, nested ones joined. */
 function pathsOf(entries: readonly RouteConfigEntry[], above = ""): string[] {
@@ -28,6 +29,7 @@ let server: TestServer;
 let shop: TestShop;
 let ids: Record<string, string>;
 const cookies: Partial<Record<Who, string>> = {};
+let token: string;
 
 beforeAll(async () => {
   const db = await testDatabase();
@@ -37,7 +39,7 @@ beforeAll(async () => {
     code: "WXK3",
     by: shop.people.foreman.personId ?? 0,
   });
-  ids = { buildId: String(build.buildId), layoutId: "999999", code: "WXK3", step: "level" };
+  ids = { buildId: String(build.buildId), layoutId: "999999", code: "WXK3", step: "level", name: "leaf" };
   const [device] = await db
     .insert(schema.devices)
     .values({
@@ -53,6 +55,7 @@ beforeAll(async () => {
   cookies.tech = await cookieFor(db, shop.people.tech);
   cookies.counter = await cookieFor(db, shop.people.counter);
   cookies.display = await cookieFor(db, shop.display, device?.id ?? null);
+  token = (await makeToken(contextFor(db, shop.people.owner), "Walker")).token;
   server = await startServer();
 });
 afterAll(() => server?.stop());
@@ -64,6 +67,7 @@ const ask = (method: string, path: string, who: Who) =>
     headers: {
       accept: "text/html",
       ...(cookies[who] ? { cookie: cookies[who] } : {}),
+      ...(who === "token" ? { authorization: `Bearer ${token}` } : {}),
       ...(method === "POST"
         ? { origin: server.origin, "content-type": "application/x-www-form-urlencoded" }
         : {}),
