@@ -56,7 +56,7 @@ export function axleUncertainty(
   method: AxleMethod,
   asked: Millimetres = mm(0),
 ): Outcome<AxleUncertainty> {
-  const points = pointsOf(drops);
+  const points = eachDrop((drop) => drops[drop].point);
   const line = lineOf(points, method, asked);
   if (!line.ok) return line;
   const bySource = new Map<string, { group: string; station: number; turn: number }>();
@@ -95,8 +95,12 @@ export function axleUncertainty(
 type Points = Record<AxleDrop, FloorPoint>;
 type Answer = { station: number; turn: number };
 
-const pointsOf = (drops: AxleDrops): Points =>
-  Object.fromEntries(AXLE_DROPS.map((drop) => [drop, drops[drop].point])) as Points;
+/**
+ * One of something for each drop of an axle line.
+ * @example eachDrop((drop) => drop.length).datumFrontLeft // 14
+ */
+export const eachDrop = <T>(of: (drop: AxleDrop) => T): Record<AxleDrop, T> =>
+  Object.fromEntries(AXLE_DROPS.map((drop) => [drop, of(drop)])) as Record<AxleDrop, T>;
 
 function lineOf(points: Points, method: AxleMethod, asked: Millimetres): Outcome<AxleLine> {
   const frame = frameFromDatums({

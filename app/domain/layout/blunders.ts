@@ -8,7 +8,7 @@ import {
   mm,
   toInches,
 } from "../units/length";
-import { adjustTies, isSuspect, type Tie } from "./tie-fit";
+import { adjustTies, isOnSide, isSuspect, type Tie } from "./tie-fit";
 
 /** A slip of this trade that would make the tapes meet. */
 export type Suggestion = {
@@ -45,7 +45,7 @@ export function suggestBlunders(
   const found: Suggestion[] = [];
   for (const { ties: changed, side: on, slip, ...candidate } of candidates(ties, side, unit)) {
     const fit = adjustTies(changed, on, sigma);
-    if (!fit.ok || isSuspect(fit.value)) continue;
+    if (!fit.ok || isSuspect(fit.value) || !isOnSide(fit.value, on)) continue;
     const within = mm(Math.max(...fit.value.residuals.map((residual) => Math.abs(residual.residual))));
     const twin = found.find(
       (other) =>

@@ -8,6 +8,7 @@ import {
   adjustTies,
   type Ellipse,
   ellipseOf,
+  isOnSide,
   isSuspect,
   type Tie,
   type TieResidual,
@@ -46,7 +47,7 @@ export type TieFit = Omit<Adjusted, "residuals"> & {
   checked: boolean;
   residuals: TieResidual[];
   ellipse: Ellipse;
-  /** The tapes disagree beyond chance. */
+  /** The tapes disagree beyond chance, with each other or with the side that was named. */
   suspect: boolean;
   /** Blunders that would explain it. Nothing is ever changed by itself. */
   suggestions: Suggestion[];
@@ -79,7 +80,7 @@ export function pointFromTies(
   const fit = adjustTies(ties, sign, sigma, unit);
   if (!fit.ok) return fit;
   const checked = fit.value.redundancy > 0;
-  const suspect = isSuspect(fit.value);
+  const suspect = isSuspect(fit.value) || !isOnSide(fit.value, sign);
   const suggestions = suspect ? suggestBlunders(ties, sign, sigma, unit) : [];
   return ok({
     ...fit.value,

@@ -185,6 +185,13 @@ export const isSuspect = (fit: Adjusted): boolean =>
   fit.residuals.some((r) => r.standardised !== null && Math.abs(r.standardised) > CRITICAL_W);
 
 /**
+ * Does the point lie on the side that was named, as far as its own uncertainty can tell?
+ * @example isOnSide(fit, 1) // false when the tapes meet to the right beyond chance
+ */
+export const isOnSide = (fit: Adjusted, side: 1 | -1): boolean =>
+  fit.point.y * side >= -CRITICAL_W * Math.sqrt(fit.covariance.yy);
+
+/**
  * Share of drops that fall within k times the standard ellipse: 1 − exp(−k²/2), of the plane normal law.
  * Source: any text on adjustment, e.g. Ghilani, Adjustment Computations, ch. 19 (from memory).
  * @example ellipseCoverage(2) // 0.8647
