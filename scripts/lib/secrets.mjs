@@ -10,6 +10,17 @@ import { Problem } from "./output.mjs";
  * @returns {{ databaseRoot: string, databaseApp: string, session: string }}
  */
 export function readSecrets(home) {
+  try {
+    return readOrMake(home);
+  } catch (error) {
+    if (error.code !== "EACCES" && error.code !== "EPERM" && error.code !== "EROFS") throw error;
+    throw new Problem(`${home} cannot be written: ${error.message}.`, {
+      todo: "run the command as the user to whom this folder belongs, or give yourself the right to write in it.",
+    });
+  }
+}
+
+function readOrMake(home) {
   const file = join(home, "secrets.json");
   mkdirSync(home, { recursive: true, mode: 0o700 });
   const made = { databaseRoot: random(), databaseApp: random(), session: random() };

@@ -109,6 +109,92 @@ const THREE = network(
   1,
 );
 
+const BENNING = network(
+  { 1: [3000, 2000], 2: [1000, 2000], 3: [3000, 2100], 4: [1000, 2100], 5: [2000, 1000] },
+  { 6: [2000, 2000] },
+  [
+    ["6", "1", 1000],
+    ["6", "2", 1000],
+    ["6", "3", 1005],
+    ["6", "4", 1005],
+    ["6", "5", 1000],
+  ],
+  0.02,
+);
+const SQUARE = network(
+  { 1: [0, 1000], 2: [1000, 1000] },
+  { 3: [0, 0], 4: [1000, 0] },
+  [
+    ["1", "3", 1000.02],
+    ["1", "4", 1414.2],
+    ["2", "3", 1414.24],
+    ["2", "4", 999.98],
+    ["3", "4", 1000],
+  ],
+  0.01,
+);
+/** Twenty-four distances with the square root of ten times its cofactor each, as they were published. */
+const WEISS_DISTANCES = [
+  ["4", "6", 709.927, 1.7],
+  ["2", "6", 392.55, 0.6],
+  ["2", "4", 642.409, 1.3],
+  ["3", "4", 939.941, 1.2],
+  ["3", "9", 566.555, 0.8],
+  ["4", "9", 1050.204, 1.1],
+  ["1", "4", 1210.478, 0.8],
+  ["1", "5", 901.755, 0.8],
+  ["5", "8", 1206.806, 1],
+  ["4", "8", 1634.747, 1.3],
+  ["4", "5", 498.107, 1.6],
+  ["2", "5", 904.962, 1.4],
+  ["2", "7", 1630.454, 1.1],
+  ["1", "7", 849.005, 0.8],
+  ["1", "9", 601.906, 1.2],
+  ["8", "9", 666.874, 1.3],
+  ["7", "8", 667.595, 0.6],
+  ["5", "7", 823.99, 1.6],
+  ["5", "6", 722.631, 1.3],
+  ["6", "9", 1193.036, 0.7],
+  ["5", "9", 572.094, 0.7],
+  ["3", "5", 504.968, 1.7],
+  ["3", "7", 591.506, 1.6],
+  ["7", "9", 328.667, 0.9],
+] as const;
+const WEISS: DistanceNetwork = {
+  ...network(
+    {
+      1: [4506.299, 9001.123],
+      2: [2798.622, 9502.49],
+      3: [3803.973, 9894.233],
+      8: [4904.569, 9413.376],
+    },
+    {
+      4: [3299.98, 9100.838],
+      5: [3697.824, 9400.545],
+      6: [3080.37, 9775.9],
+      7: [4393.265, 9842.503],
+      9: [4251.061, 9546.226],
+    },
+    [],
+    1,
+  ),
+  distances: WEISS_DISTANCES.map(([from, to, distance, variance]) => ({
+    from,
+    to,
+    distance: mm(distance),
+    sigma: mm(Math.sqrt(variance)),
+  })),
+};
+const benning = (place: string): Source => ({
+  name: "Benning, Statistik in Geodäsie, Geoinformation und Bauwesen",
+  place,
+  status: "read",
+});
+const weiss: Source = {
+  name: "Weiss et al., Detection of erroneous values in local geodetic networks",
+  place: "Acta Montanistica Slovaca 15 (2010), pp. 62–70, as transcribed by Krumm",
+  status: "read",
+};
 const strang: Source = {
   name: "Strang and Borre, Linear Algebra, Geodesy, and GPS",
   place: "example 10.1, p. 345, as transcribed by Krumm",
@@ -322,6 +408,51 @@ const checks: Check[] = [
     },
     want: [6861.31679, 3727.81857, 0.0775, 0.1542],
     within: 0.00005,
+  },
+  {
+    about: "point 6 of a network with five fixed points",
+    source: benning("example 8-8, pp. 285–291 (2011), as transcribed by Krumm"),
+    got: () => coordinates(must(adjustDistances(BENNING))),
+    want: [2000, 1999.9976],
+    within: 0.00005,
+  },
+  {
+    about: "standard deviations of point 6",
+    source: benning("example 8-8, pp. 285–291 (2011), as transcribed by Krumm"),
+    got: () => scaledSigmas(must(adjustDistances(BENNING))),
+    want: [0.00504, 0.00996],
+    within: 0.000005,
+  },
+  {
+    about: "points 3 and 4 of a square with both diagonals",
+    source: benning("example 8-2, p. 256 (2011), adjusted by Krumm"),
+    got: () => coordinates(must(adjustDistances(SQUARE))),
+    want: [-0.0096, -0.0226, 999.993, 0.0174],
+    within: 0.00005,
+  },
+  {
+    about: "standard deviations of points 3 and 4",
+    source: benning("example 8-2, p. 256 (2011), adjusted by Krumm"),
+    got: () => scaledSigmas(must(adjustDistances(SQUARE))),
+    want: [0.00901, 0.00637, 0.00901, 0.00637],
+    within: 0.000005,
+  },
+  {
+    about: "five points from twenty-four distances of different weight, adjusted together",
+    source: weiss,
+    got: () => coordinates(must(adjustDistances(WEISS))),
+    want: [
+      3299.9644, 9100.8289, 3697.8223, 9400.5394, 3080.3184, 9775.8943, 4393.216, 9842.5618, 4251.0495,
+      9546.2298,
+    ],
+    within: 0.00005,
+  },
+  {
+    about: "standard deviations of the five points",
+    source: weiss,
+    got: () => scaledSigmas(must(adjustDistances(WEISS))),
+    want: [0.00752, 0.01121, 0.0067, 0.01207, 0.00924, 0.01193, 0.00817, 0.00879, 0.00728, 0.01016],
+    within: 0.000005,
   },
   ...(
     [
