@@ -4,6 +4,7 @@ export * from "./builds";
 export * from "./columns";
 export * from "./floor";
 export * from "./journal";
+export * from "./layout-work";
 export * from "./layouts";
 export * from "./people";
 export * from "./shop";

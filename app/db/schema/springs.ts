@@ -1,5 +1,5 @@
 import { sql } from "drizzle-orm";
-import { check, mysqlTable, smallint, unique, varchar } from "drizzle-orm/mysql-core";
+import { check, decimal, mysqlTable, smallint, unique, varchar } from "drizzle-orm/mysql-core";
 import { asTyped, id, lengthMm, moment, ref } from "./columns";
 import { shops } from "./shop";
 
@@ -20,6 +20,20 @@ export const springs = mysqlTable(
     leafWidthMm: lengthMm().notNull(),
     leafWidthTyped: asTyped().notNull(),
     note: varchar({ length: 120 }).notNull().default(""),
+    /** Thickness of a leaf; NULL: not measured, then no rate is computed. */
+    leafThicknessMm: lengthMm(),
+    leafThicknessTyped: asTyped(),
+    /** The pin below the line of the eyes with no load. NULL: not measured. */
+    archMm: lengthMm(),
+    archTyped: asTyped(),
+    /** Measured on the bench, N/mm. NULL: not measured; a computed rate is never stored here. */
+    rateNPerMm: decimal({ mode: "number", precision: 12, scale: 6 }),
+    /** Bushings and eyes in words: rubber 1 1/2, bronze … */
+    bushings: varchar({ length: 60 }).notNull().default(""),
+    /** Where it lies: A3, wall left … */
+    place: varchar({ length: 40 }).notNull().default(""),
+    /** How many of them; a pair is 2. */
+    inStock: smallint({ unsigned: true }).notNull().default(2),
     addedAt: moment().notNull(),
     /** NULL: in the rack. */
     takenOutAt: moment(),
