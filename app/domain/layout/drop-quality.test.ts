@@ -277,8 +277,8 @@ describe("repeatedReadings", () => {
       standsOut: null,
       words: "The two readings differ by 1 in: read it a third time.",
     }));
-  it("says that one reading is checked by nothing, and that none is none", () => {
-    expect(read(60)).toMatchObject({ deviation: null, agree: true, words: "Read once: nothing checks it." });
+  it("says of one reading that it is one, and that none is none", () => {
+    expect(read(60)).toMatchObject({ deviation: null, agree: true, words: "Read once." });
     expect(repeatedReadings([], SIGMA).ok).toBe(false);
   });
 });

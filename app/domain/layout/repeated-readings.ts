@@ -70,7 +70,7 @@ function wordsFor(
   unit: LengthUnit,
 ): string {
   const size = (value: number) => formatLength(mm(Math.abs(value)), unit, { denominator: 32 });
-  if (count === 1) return "Read once: nothing checks it.";
+  if (count === 1) return "Read once.";
   if (agree) return `Read ${count} times, all within ${size(spread)}.`;
   if (!standsOut) return `The two readings differ by ${size(spread)}: read it a third time.`;
   const place = `${size(standsOut.away)} ${standsOut.away > 0 ? "more" : "less"} than the others`;
