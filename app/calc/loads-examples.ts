@@ -1,0 +1,83 @@
+/** Worked examples of loads, as its page shows them. */
+export const LOADS_EXAMPLES = [
+  {
+    title: "Four wheels on scales",
+    input: {
+      what: "corners" as const,
+      leftFrontNewtons: 4200,
+      rightFrontNewtons: 4100,
+      leftRearNewtons: 3300,
+      rightRearNewtons: 3500,
+      wheelbase: 2800,
+      frontTrack: 1500,
+      rearTrack: 1480,
+    },
+    output: {
+      what: "corners" as const,
+      weightNewtons: 15100,
+      frontNewtons: 8300,
+      rearNewtons: 6800,
+      frontShare: 0.549668874,
+      leftShare: 0.496688742,
+      crossShare: 0.509933775,
+      behindFront: 1260.92715,
+      leftOfCentre: -4.83443709,
+    },
+  },
+  {
+    title: "Rear axle lifted 500 mm, tyres of two sizes",
+    input: {
+      what: "cgHeight" as const,
+      weightNewtons: 15100,
+      wheelbase: 2800,
+      levelLoadNewtons: 8300,
+      liftedLoadNewtons: 8680,
+      lift: 500,
+      downRadius: 350,
+      liftedRadius: 365,
+    },
+    output: {
+      what: "cgHeight" as const,
+      height: 744.437673,
+      aboveAxles: 387.682706,
+      tilt: 10.2915796,
+      heightPerNewton: 1.02021765,
+    },
+  },
+  {
+    title: "Half a g under power",
+    input: {
+      what: "transfer" as const,
+      frontNewtons: 8300,
+      rearNewtons: 6800,
+      cgHeight: 600,
+      wheelbase: 2800,
+      accelerationG: 0.5,
+    },
+    output: {
+      what: "transfer" as const,
+      frontNewtons: 6682.14286,
+      rearNewtons: 8417.85714,
+      toRearNewtons: 1617.85714,
+      liftsAtG: 2.56512141,
+    },
+  },
+  {
+    title: "Front axle moved 100 mm forward",
+    input: {
+      what: "move" as const,
+      frontNewtons: 8300,
+      rearNewtons: 6800,
+      wheelbase: 2800,
+      frontForward: 100,
+      frontUnsprungNewtons: 1500,
+      rearUnsprungNewtons: 1600,
+    },
+    output: {
+      what: "move" as const,
+      frontNewtons: 8065.51724,
+      rearNewtons: 7034.48276,
+      wheelbase: 2900,
+    },
+  },
+];
