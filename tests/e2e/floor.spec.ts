@@ -82,6 +82,7 @@ test("by keyboard: picked up, walked from place to place, put down; and put back
 
   await page.keyboard.press("Space");
   await expect(page.getByText("Keyed stood here")).toBeVisible();
+  await expect(page.locator('[data-place="yard"]')).toHaveAttribute("data-over", "true");
   // From the yard, which comes last, the places come round in their order.
   for (const n of [1, 2]) {
     await page.keyboard.press("ArrowDown");

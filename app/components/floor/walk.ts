@@ -40,7 +40,8 @@ export function makeWalk() {
       .filter((container) => aims(active, container))
       .sort((a, b) => Number(a.data.current?.order) - Number(b.data.current?.order))
       .flatMap((container) => {
-        const rect = droppableRects.get(container.id);
+        // Just picked up, the places are not measured yet: a quick key must not be lost.
+        const rect = droppableRects.get(container.id) ?? container.node.current?.getBoundingClientRect();
         if (!rect || rect.width === 0) return [];
         return [{ key: String(container.id), x: rect.left + rect.width / 2, y: rect.top + rect.height / 2 }];
       });
