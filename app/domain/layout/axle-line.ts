@@ -23,7 +23,10 @@ export type OpeningComparison = {
   words: string;
 };
 
-/** Centre of a wheel opening: the middle of its front and rear drop. */
+/**
+ * Centre of a wheel opening: the middle of its front and rear drop.
+ * @example openingCentre(floorPoint(2000, 760), floorPoint(1200, 764)) // (1600, 762)
+ */
 export const openingCentre = (front: FloorPoint, rear: FloorPoint): FloorPoint => middle(front, rear);
 
 /** Differences below a sixteenth's half are not spoken of. */
@@ -31,7 +34,8 @@ const SPOKEN = 25.4 / 32;
 
 /**
  * Both wheel openings in the frame's axes, and how they differ: bodies shift on frames and sheet metal gets repaired.
- * @returns a problem when an edge lies on the wrong side of its other edge
+ * @returns a problem when an edge lies on the wrong side of its other edge, or the left opening right of the right one
+ * @example compareOpenings(frame, drops).value.lengthDifference // 3.2 where the left opening is 1/8 in longer
  */
 export function compareOpenings(
   frame: Frame,
@@ -50,6 +54,8 @@ export function compareOpenings(
   for (const [side, one] of [["left", left] as const, ["right", right] as const])
     if (one.length <= 0)
       return problem(`The ${side} opening's front edge lies behind its rear edge: were the two swapped?`);
+  if (left.centre.offset <= right.centre.offset)
+    return problem("The openings look swapped: the left one lies right of the other.");
   const floorDifference = mm(
     openingCentre(drops.left.front, drops.left.rear).x - openingCentre(drops.right.front, drops.right.rear).x,
   );
@@ -95,7 +101,9 @@ export type AxleLine = {
 /**
  * The axle line at full compression: square to the frame and as near to both centres as can be, through both centres,
  * or square at an offset ahead of the middle that was asked for.
+ * @param centres as compareOpenings gives them: the left one lies left of the right one
  * @param asked how far ahead of the square line; only with `asked`
+ * @example axleLine({ left: framePoint(1010, 760), right: framePoint(990, -760) }, "square").station // 1000
  */
 export function axleLine(
   centres: { left: FramePoint; right: FramePoint },
@@ -124,6 +132,9 @@ export function axleLine(
   };
 }
 
-/** Where the line passes at an offset from the frame centre line. */
+/**
+ * Where the line passes at an offset from the frame centre line.
+ * @example axlePoint({ ...line, station: mm(1000), turn: degrees(0.7162) }, mm(800)).station // 990
+ */
 export const axlePoint = (line: AxleLine, offset: Millimetres): FramePoint =>
   framePoint(line.station - Math.tan((line.turn * Math.PI) / 180) * offset, offset);

@@ -35,6 +35,7 @@ type Candidate = Omit<Suggestion, "words" | "within"> & { ties: Tie[]; side: 1 |
  * Known blunders that would make all tapes agree: an inch burnt or lost, centimetres read for inches, two digits
  * swapped, 6 for 9, two marks' readings swapped, left for right. Each is tried alone, the best fit first.
  * Source of the list: common practice, no source.
+ * @example suggestBlunders(ties, 1, inches(1 / 32), "in")[0].kind // "inch-burnt" where 64 3/16 was read for 63 3/16
  */
 export function suggestBlunders(
   ties: readonly Tie[],

@@ -85,6 +85,7 @@ describe("tape ties, whatever the point", () => {
         const [best] = fit.suggestions;
         return fit.suspect && worst.mark === burnt && best?.kind === "inch-burnt" && best.mark === burnt;
       }),
+      { numRuns: 40 },
     ));
   it.each([
     ["36 typed for 63", 63, 36, "digits-swapped"],

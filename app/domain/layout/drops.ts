@@ -29,7 +29,8 @@ export { CRITICAL_W, type Ellipse, ellipseOf, type Tie, type TieResidual } from 
 /**
  * A drop measured square to the A–B line.
  * @param reading station from A along the line; offset without a sign, the side says which way
- * @returns a problem when the offset is negative, or a centre point is given an offset
+ * @returns a problem when the offset is negative
+ * @example pointFromOffset({ station: mm(1000), offset: mm(300), side: "right" }) // (1000, −300)
  */
 export function pointFromOffset(reading: {
   station: Millimetres;
@@ -62,6 +63,7 @@ export type TieFit = Omit<Adjusted, "residuals"> & {
  * alone would have to read.
  * @param sigma standard uncertainty of one tape
  * @returns a problem when tapes do not reach each other, one is not above zero, or a mark is named twice
+ * @example pointFromTies(ties, "right", mm(0.8)).value.point // (43.2, −57.6) in from 72 and 96 in, marks 120 in apart
  */
 export function pointFromTies(
   ties: readonly Tie[],

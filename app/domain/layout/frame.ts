@@ -28,6 +28,7 @@ const NEAREST = mm(300);
 /**
  * The frame centre line through the middles of the front and the rear datum pair.
  * @returns a problem when the pairs lie on each other or left and right are swapped
+ * @example frameFromDatums(pairs).value.angle // −0.179 for the pairs of the measured case
  */
 export function frameFromDatums(pairs: DatumPairs): Outcome<Frame> {
   const front = middle(pairs.frontLeft, pairs.frontRight);
@@ -44,13 +45,19 @@ export function frameFromDatums(pairs: DatumPairs): Outcome<Frame> {
   return ok(frame);
 }
 
-/** A floor point in the frame's axes. */
+/**
+ * A floor point in the frame's axes.
+ * @example toFrame({ origin: floorPoint(500, 0), angle: degrees(90) }, floorPoint(500, 1000)) // station 1000, offset 0
+ */
 export function toFrame(frame: Frame, point: FloorPoint): FramePoint {
   const v = turned(floorPoint(point.x - frame.origin.x, point.y - frame.origin.y), degrees(-frame.angle));
   return framePoint(v.x, v.y);
 }
 
-/** A point of the frame's axes on the floor. */
+/**
+ * A point of the frame's axes on the floor.
+ * @example toFloor({ origin: floorPoint(500, 0), angle: degrees(90) }, framePoint(1000, 0)) // (500, 1000)
+ */
 export function toFloor(frame: Frame, point: FramePoint): FloorPoint {
   const v = turned(floorPoint(point.station, point.offset), frame.angle);
   return floorPoint(frame.origin.x + v.x, frame.origin.y + v.y);

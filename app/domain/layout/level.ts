@@ -21,6 +21,7 @@ export type LevelReading = {
  * Slope from a gauge read, turned end for end and read again: the gauge's own error cancels.
  * @returns slope = (first − turned)/2, the gauge's offset = (first + turned)/2
  * Source: reversal, as for any spirit level (common practice).
+ * @example gaugeSlope(degrees(0.4), degrees(0.2)) // slope 0.1, the gauge's own error 0.3
  */
 export function gaugeSlope(first: Degrees, turned: Degrees): { slope: Degrees; gaugeOffset: Degrees } {
   return { slope: degrees((first - turned) / 2), gaugeOffset: degrees((first + turned) / 2) };
@@ -30,6 +31,7 @@ export function gaugeSlope(first: Degrees, turned: Degrees): { slope: Degrees; g
  * Level from heights at three stands or more: the plane z = c + a·x + b·y that fits them best, pitch = atan a,
  * roll = −atan b. Three stands always fit: twist shows from the fourth on.
  * @returns a problem when there are fewer than three, or all stand in one line
+ * @example levelFromHeights(stands).value.noseHigh // 0.5968 where the front stands 1/8 in higher a foot
  */
 export function levelFromHeights(stands: readonly StandHeight[]): Outcome<LevelReading> {
   if (stands.length < 3)
@@ -66,6 +68,7 @@ export const GAUGE_RESOLUTION = degrees(0.1);
 /**
  * Level from an angle gauge, read both ways round on both rails (nose up positive) and on the front and the rear
  * cross-member (right side up positive).
+ * @example levelFromAngles(readings).noseHigh // 0.1 where both rails read 0.4 and, turned, 0.2
  */
 export function levelFromAngles(readings: GaugeReadings, resolution: Degrees = GAUGE_RESOLUTION): GaugeLevel {
   const at = (place: GaugePlace) => gaugeSlope(readings[place].first, readings[place].turned);
@@ -84,14 +87,21 @@ export function levelFromAngles(readings: GaugeReadings, resolution: Degrees = G
   };
 }
 
-/** The slope at which a point so high lands so far out: asin(e/h). @throws RangeError when e is not within h */
+/**
+ * The slope at which a point so high lands so far out: asin(e/h).
+ * @throws RangeError when e is not within h: slopeTolerance says it in words
+ * @example allowedSlope(inches(0.524), inches(30)) // 1.0008
+ */
 export function allowedSlope(allowedError: Millimetres, height: Millimetres): Degrees {
   if (!(height > 0) || allowedError < 0 || allowedError > height)
     throw new RangeError(`No slope puts a point ${height} mm high out by ${allowedError} mm`);
   return toDegrees(Math.asin(allowedError / height));
 }
 
-/** How far a point so high lands from where it would on a true frame: h·sin θ, sign of the slope kept. */
+/**
+ * How far a point so high lands from where it would on a true frame: h·sin θ, sign of the slope kept.
+ * @example landsOut(inches(30), degrees(1)) // 0.524 in
+ */
 export const landsOut = (height: Millimetres, slope: Degrees): Millimetres =>
   mm(height * Math.sin(toRadians(slope)));
 
@@ -103,6 +113,7 @@ const SPOKEN = 0.005;
 /**
  * The verdict on a level in words: "Right side high 0.60°, nose high 0.10°." the larger first; "Level both ways."
  * True when neither direction exceeds what is allowed; compared unrounded, equal is true.
+ * @example levelVerdict({ noseHigh: degrees(0.0977), rightHigh: degrees(0.5968) }, degrees(0.1)).isTrue // false
  */
 export function levelVerdict(
   reading: Pick<LevelReading, "noseHigh" | "rightHigh">,
@@ -144,6 +155,7 @@ export type StandCorrections = {
  * rounded to the shim, halves up. `raise` lifts all to the highest point of the plane; `either` also lowers, and picks
  * the height at which the fewest stands move, then the least movement.
  * @returns a problem as levelFromHeights
+ * @example standCorrections(stands, { mode: "raise", shim: inches(1 / 16) }).value.moves // 5/16, 0, 1/2 and 3/16 in
  */
 export function standCorrections(
   stands: readonly StandHeight[],

@@ -52,7 +52,10 @@ export type Adjusted = {
 /** How much the start may be moved on before the adjustment counts as failed. */
 const ROUNDS = 60;
 
-/** Both places where two tapes meet; none when they do not reach each other. */
+/**
+ * Both places where two tapes meet; none when they do not reach each other, or the marks lie on each other.
+ * @example meetings(a, b) // (432, 576) and (432, −576) for 720 and 960 from marks 1200 mm apart on the line
+ */
 export function meetings(first: Tie, second: Tie): readonly FloorPoint[] {
   const base = distance(first.at, second.at);
   if (base === 0) return [];
@@ -65,14 +68,10 @@ export function meetings(first: Tie, second: Tie): readonly FloorPoint[] {
   return [floorPoint(foot.x - uy * off, foot.y + ux * off), floorPoint(foot.x + uy * off, foot.y - ux * off)];
 }
 
-/** Where two tapes meet, on a side of the A–B line (+1 left, −1 right); null when they do not reach each other. */
-export function twoTapes(first: Tie, second: Tie, side: 1 | -1): FloorPoint | null {
-  const [one, other] = meetings(first, second);
-  if (!one || !other) return null;
-  return one.y * side >= other.y * side ? one : other;
-}
-
-/** How squarely two tapes cross at a point: 1 square, 0 along each other. */
+/**
+ * How squarely two tapes cross at a point: 1 square, 0 along each other.
+ * @example crossing(a, b, point) // 1 where marks 1200 mm apart are taped 720 and 960
+ */
 export function crossing(a: Tie, b: Tie, point: FloorPoint): number {
   const va = floorPoint(point.x - a.at.x, point.y - a.at.y);
   const vb = floorPoint(point.x - b.at.x, point.y - b.at.y);
@@ -130,6 +129,7 @@ function apartWords(ties: readonly Tie[], unit: LengthUnit): string {
  * The point that fits all tapes best, by Gauss–Newton on the distances, each weighted by its own uncertainty.
  * @param sigma standard uncertainty of a tape that says nothing else
  * @returns a problem when no two tapes reach each other, or the point cannot be told from them
+ * @example adjustTies(ties, 1, mm(0.01)).value.point // (170.7029, 170.7234) for the three ties of the published check
  */
 export function adjustTies(
   ties: readonly Tie[],
@@ -180,7 +180,10 @@ function adjustedAt(point: FloorPoint, ties: readonly Tie[], fit: Fit, sigma: Mi
   };
 }
 
-/** Do any of the tapes disagree with the others beyond chance? */
+/**
+ * Do any of the tapes disagree with the others beyond chance?
+ * @example isSuspect(fit) // true where an inch was burnt on one of three tapes
+ */
 export const isSuspect = (fit: Adjusted): boolean =>
   fit.residuals.some((r) => r.standardised !== null && Math.abs(r.standardised) > CRITICAL_W);
 
@@ -208,7 +211,10 @@ export function ellipseFactor(coverage: number): number {
   return Math.sqrt(-2 * Math.log(1 - coverage));
 }
 
-/** The k = 2 uncertainty ellipse of a covariance; the angle is that of the major half-axis, from A to B. */
+/**
+ * The uncertainty ellipse of a covariance, k = 2 unless told; the angle is that of the major half-axis, from A to B.
+ * @example ellipseOf({ xx: 4, xy: 0, yy: 1 }) // major 4, minor 2, angle 0
+ */
 export function ellipseOf({ xx, xy, yy }: Adjusted["covariance"], k = 2): Ellipse {
   const [mean, half] = [(xx + yy) / 2, Math.hypot((xx - yy) / 2, xy)];
   return {
