@@ -203,6 +203,14 @@ describe("linkTravel", () => {
       if (i > 0) expect(row.pinionAngle).toBeLessThan(rows[i - 1]?.pinionAngle ?? Number.NaN);
     }
   });
+  it("takes anti-squat in bump from the raised ground, the lowered centre of gravity and the new wheelbase", () => {
+    const bar: LinkedAxle = { kind: "ladderBar", pivot: sidePoint(900, 350), axle: sidePoint(0, 350) };
+    const row = value(linkPosition(bar, setting, mm(100)));
+    const ahead = 900 - Math.sqrt(900 ** 2 - 100 ** 2);
+    expect(row.forward).toBeCloseTo(ahead, 9);
+    expect(row.centreAboveGround).toBeCloseTo(250, 9);
+    expect(row.antiSquat).toBeCloseTo((100 * (250 / (900 - ahead)) * (2800 - ahead)) / 500, 9);
+  });
   it("says what cannot be", () => {
     expect(fault(linkTravel(axle, setting, { droop: mm(-1), bump: mm(80), steps: 2 }))).toMatch(/positive/);
     expect(fault(linkTravel(axle, setting, { droop: mm(0), bump: mm(900), steps: 2 }))).toMatch(
