@@ -115,7 +115,7 @@ describe("bolts", () => {
     const share = fc.double({ min: 0.05, max: 1, noNaN: true });
     fc.assert(
       fc.property(fc.constantFrom(...THREADS), share, share, (one, a, b) => {
-        fc.pre(a < b);
+        fc.pre(b - a > 1e-6);
         const grade = one.series === "metric coarse" ? "10.9" : "8";
         const [low, high] = [a, b].map((clampShare) => value(boltTightening(one, grade, { clampShare })));
         expect(high?.clamp).toBeGreaterThan(low?.clamp ?? Number.NaN);

@@ -36,14 +36,14 @@ const at = (centre: ReturnType<typeof instantCentre>) => {
   return found.point;
 };
 
-/** Four-links as they are built: links 400 to 900 long ahead of the axle, within 20° of level, brackets 120 to 400 apart. */
+/** Four-links as they are built: links 400 to 900 long ahead of the axle, within 10° of level, brackets 200 to 400 apart. */
 const fourLinks = fc
   .record({
     lowerLength: fc.double({ min: 400, max: 900, noNaN: true }),
     upperLength: fc.double({ min: 400, max: 900, noNaN: true }),
-    lowerSlope: fc.double({ min: -20, max: 20, noNaN: true }),
-    upperSlope: fc.double({ min: -20, max: 20, noNaN: true }),
-    bracket: fc.double({ min: 120, max: 400, noNaN: true }),
+    lowerSlope: fc.double({ min: -10, max: 10, noNaN: true }),
+    upperSlope: fc.double({ min: -10, max: 10, noNaN: true }),
+    bracket: fc.double({ min: 200, max: 400, noNaN: true }),
     setBack: fc.double({ min: -80, max: 80, noNaN: true }),
   })
   .map((of): FourLink => {
