@@ -33,6 +33,8 @@ export default [
   route("layouts/:layoutId/drop", "routes/resources/layout/drop.ts"),
   route("layouts/:layoutId/axle-line", "routes/resources/layout/axle-line.ts"),
   route("layouts/:layoutId/option", "routes/resources/layout/option.ts"),
+  route("layouts/:layoutId/look", "routes/resources/layout/look.ts"),
+  route("layouts/:layoutId/waive-look", "routes/resources/layout/waive-look.ts"),
   route("layouts/:layoutId/approve", "routes/resources/layout/approve.ts"),
 
   route("springs", "routes/springs/springs.tsx"),

@@ -41,6 +41,8 @@ export const ACCESS: readonly { path: string; GET?: Need; POST?: Need }[] = [
   { path: "/layouts/:layoutId/drop", POST: "layouts:measure" },
   { path: "/layouts/:layoutId/axle-line", POST: "layouts:measure" },
   { path: "/layouts/:layoutId/option", POST: "layouts:measure" },
+  { path: "/layouts/:layoutId/look", POST: "layouts:measure" },
+  { path: "/layouts/:layoutId/waive-look", POST: "options:approve" },
   { path: "/layouts/:layoutId/approve", POST: "options:approve" },
 
   { path: "/springs", GET: "springs:see", POST: "springs:edit" },

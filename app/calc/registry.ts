@@ -1,10 +1,29 @@
+import { axleLineCalc } from "./axle-line";
 import type { Calc } from "./calc";
+import { dropsCalc } from "./drops";
+import { fourLinkCalc } from "./four-link";
+import { hardwareCalc } from "./hardware";
 import { leafCalc } from "./leaf";
 import { leafPackCalc } from "./leaf-pack";
+import { levelCalc } from "./level";
+import { loadsCalc } from "./loads";
 import { optionsCalc } from "./options";
 import { shackleCalc } from "./shackle";
+import { surveyCalc } from "./survey";
 
 /** Every calculation that can be asked for, in the order of the page. */
-export const CALCS: readonly Calc[] = [leafCalc, leafPackCalc, shackleCalc, optionsCalc] as readonly Calc[];
+export const CALCS = [
+  levelCalc,
+  surveyCalc,
+  dropsCalc,
+  axleLineCalc,
+  leafCalc,
+  leafPackCalc,
+  shackleCalc,
+  optionsCalc,
+  fourLinkCalc,
+  loadsCalc,
+  hardwareCalc,
+] as readonly Calc[];
 
 export const findCalc = (name: string): Calc | undefined => CALCS.find((calc) => calc.name === name);

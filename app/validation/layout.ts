@@ -190,3 +190,35 @@ export const StartLayoutForm = z.object({
     )
     .default("ahead"),
 });
+
+export type LookForm = {
+  point: DropPointId;
+  side: (typeof DROP_SIDES)[number];
+  station: Typed;
+  offset: Typed;
+  clientKey: string;
+};
+
+/** A second look at a point, along and off the line. */
+export function readLookForm(form: FormData, unit: LengthUnit): FormRead<LookForm> {
+  const faults = new Faults();
+  const text = (name: string) => String(form.get(name) ?? "").trim();
+  const point = dropPoint(text("point"));
+  const side = DROP_SIDES.find((one) => one === text("side"));
+  if (!point) faults.add("point", "There is no such point.");
+  if (!side || (point && !point.sides.includes(side))) faults.add("side", "Choose the side.");
+  const clientKey = text("clientKey").toLowerCase();
+  if (!UUID.test(clientKey)) faults.add("form", "The reading has no key of its own: load the page again.");
+  const station = length(form, "station", unit, faults);
+  const offset = length(form, "offset", unit, faults);
+  return faults.any || !point || !side
+    ? { ok: false, fields: faults.fields }
+    : { ok: true, value: { point: point.id, side, station, offset, clientKey } };
+}
+
+export function readWaiverForm(form: FormData): FormRead<string> {
+  const reason = String(form.get("reason") ?? "").trim();
+  if (reason.length < 4) return { ok: false, fields: { reason: "Say why: the sheet prints it." } };
+  if (reason.length > 160) return { ok: false, fields: { reason: "Keep the reason under 160 letters." } };
+  return { ok: true, value: reason };
+}

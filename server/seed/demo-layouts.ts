@@ -14,6 +14,7 @@ import { chooseOption } from "../../app/services/layouts/choose-option.server";
 import { confirmMarks } from "../../app/services/layouts/confirm-marks.server";
 import { keepDrop } from "../../app/services/layouts/keep-drop.server";
 import { startLayout } from "../../app/services/layouts/start-layout.server";
+import { takeSecondLook } from "../../app/services/layouts/take-second-look.server";
 import { voidLevelByHand } from "../../app/services/layouts/void-level-by-hand.server";
 
 /*
@@ -136,6 +137,17 @@ export async function demoLayouts(input: DemoLayoutsInput): Promise<void> {
     await chooseAxleLine(who, layoutId, { method: "square", asked: null });
     return layoutId;
   };
+  /** Somebody else reads the hanger holes again, which weigh most, and finds them within a thirty-second. */
+  const lookAgain = async (who: Context, layoutId: number) => {
+    for (const { point, side, station, offset } of REST.filter((drop) => drop.point === "hanger-hole"))
+      await takeSecondLook(who, layoutId, {
+        point,
+        side,
+        station: length(station),
+        offset: length(formatInches(mm(length(offset).mm + inches(1 / 32)), { denominator: 32 })),
+        clientKey: crypto.randomUUID(),
+      });
+  };
   const ida = (minutesAgo: number) => as("ida", "Ida Kestrel", "foreman", minutesAgo);
 
   const wes = as("wes", "Wes Tolliver", "tech", 41);
@@ -147,14 +159,17 @@ export async function demoLayouts(input: DemoLayoutsInput): Promise<void> {
 
   const biscuit = await measureAll("biscuit", as("mina", "Mina Fairweather", "tech", 420));
   await chooseOption(ida(300), biscuit, optionKey(spring(22), false, hole(1)));
+  await lookAgain(as("pilar", "Pilar Dunmore", "tech", 240), biscuit);
   await approveOption(ida(200), biscuit, null);
   await voidLevelByHand(as("mina", "Mina Fairweather", "tech", 44), biscuit, "stand 3 was touched");
 
   const sunday = await measureAll("sunday", as("pilar", "Pilar Dunmore", "tech", 240));
   await chooseOption(ida(200), sunday, optionKey(spring(14), false, hole(2)));
+  await lookAgain(as("wes", "Wes Tolliver", "tech", 160), sunday);
   await approveOption(ida(142), sunday, null);
 
   const hatchet = await measureAll("hatchet", as("cato", "Cato Reyes", "tech", 970));
   await chooseOption(ida(960), hatchet, optionKey(spring(14), false, hole(3)));
+  await lookAgain(as("bram", "Bram Oduya", "tech", 920), hatchet);
   await approveOption(ida(900), hatchet, null);
 }

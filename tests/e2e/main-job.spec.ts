@@ -234,6 +234,24 @@ test("from booking in to the layout sheet, with the wall showing each change", a
   await tech.getByRole("button", { name: /^Hole 1, axle line 46\.50/ }).click();
   await tech.getByRole("button", { name: "Put in hand: 46.50, hole 1" }).click();
   await expect(tech.getByText(/^In hand: 52 in pin 2 in ahead, hole 1\. Axle line 46\.50\.$/)).toBeVisible();
+  // Nobody signs before a second person has read again what weighs most, without seeing the first figures.
+  await tech.goto(`${layout}/step/second-look`);
+  await expect(tech.getByText("You read this one first: somebody else looks again.").first()).toBeVisible();
+  const second = await as(shop.people.tech2, { viewport: { width: 768, height: 1024 } });
+  await second.goto(`${layout}/step/second-look`);
+  for (const [side, offset] of [
+    ["left", 15.5],
+    ["right", -15.5],
+  ] as const) {
+    const point = second.getByRole("listitem").filter({ hasText: `Hanger hole 1, ${side}` });
+    const read = entriesAt(70.5, offset);
+    await expect(point).not.toContainText(read["Ahead of A"]);
+    await point.getByLabel("Ahead of A").fill(read["Ahead of A"]);
+    await point.getByLabel("Off the line").fill(read["Off the line"]);
+    await point.getByRole("button", { name: "Keep my reading" }).click();
+    await expect(point.getByText("agrees", { exact: false })).toBeVisible();
+  }
+  await expect(second.getByText("Two people read the same.")).toBeVisible();
   await tech.goto(`${layout}/step/approval`);
   await expect(tech.getByText("Waiting for the foreman.")).toBeVisible();
 

@@ -18,7 +18,9 @@ import { confirmMarks } from "~/services/layouts/confirm-marks.server";
 import { type DropEntry, keepDrop } from "~/services/layouts/keep-drop.server";
 import { readLayout } from "~/services/layouts/read-layout.server";
 import { startLayout } from "~/services/layouts/start-layout.server";
+import { takeSecondLook } from "~/services/layouts/take-second-look.server";
 import { voidLevelByHand } from "~/services/layouts/void-level-by-hand.server";
+import { waiveSecondLook } from "~/services/layouts/waive-second-look.server";
 import { moveVehicle } from "~/services/move-vehicle.server";
 
 let db: Db;
@@ -133,6 +135,25 @@ async function toOptions() {
   await keepDrop(tech(), layoutId, onFrame("low-front", "centre", 76, 0, { height: length("22") }));
   await chooseAxleLine(tech(), layoutId, { method: "square", asked: null });
 }
+/** Somebody else reads the points that weigh, off by so much along the line. */
+async function lookAgain(who = as(shop.people.tech2), offIn = 0) {
+  for (const item of (await view()).secondLook.items) {
+    if (item.state === "agrees") continue;
+    const { station, offset: off } = onFrame(
+      item.point,
+      item.side,
+      70.5 + offIn,
+      item.side === "left" ? 15.5 : -15.5,
+    ) as Extract<DropEntry, { method: "offset" }>;
+    await takeSecondLook(who, layoutId, {
+      point: item.point,
+      side: item.side,
+      station,
+      offset: off,
+      clientKey: key(),
+    });
+  }
+}
 const optionOf = (spring: "centred" | "pinAhead", hole: 1 | 2 | 3) =>
   optionKey(shop.springs[spring], false, shop.holes[hole - 1] ?? 0);
 
@@ -197,6 +218,8 @@ describe("the measured case, through the shop's own services", () => {
       expect(figures(spring, hole)[1]).toBeCloseTo(approach, 2);
     }
     await chooseOption(foreman(), layoutId, optionOf("pinAhead", 1));
+    expect((await view()).next).toBe("second-look");
+    await lookAgain();
     expect((await view()).next).toBe("approval");
     expect(await approveOption(foreman(), layoutId, optionOf("pinAhead", 1))).toMatchObject({
       sheetRevision: 1,
@@ -214,6 +237,7 @@ describe("the measured case, through the shop's own services", () => {
       "drops",
       "axle-line",
       "options",
+      "second-look",
       "approval",
     ]);
   });
@@ -265,6 +289,7 @@ describe("steps stay shut until their ground stands", () => {
   it("a move voids the level, shuts what comes after, says how to get it back, and voids the signature", async () => {
     await toOptions();
     await chooseOption(foreman(), layoutId, optionOf("centred", 1));
+    await lookAgain();
     await approveOption(foreman(), layoutId, null);
     const card = (await readBoard(db, shop.shopId, new Date())).bays.find(
       (one) => one.vehicle?.buildId === buildId,
@@ -440,6 +465,7 @@ describe("choosing and signing", () => {
   });
   it("lets only foreman and owner sign, once, and only what they saw", async () => {
     await chooseOption(tech(), layoutId, optionOf("centred", 2));
+    await lookAgain();
     await expect(approveOption(tech(), layoutId, null)).rejects.toMatchObject({ kind: "forbidden" });
     await expect(approveOption(foreman(), layoutId, optionOf("centred", 1))).rejects.toMatchObject({
       message: expect.stringContaining("Another option was put in hand"),
@@ -456,6 +482,7 @@ describe("choosing and signing", () => {
   });
   it("voids the signature when a number under it is read again", async () => {
     await chooseOption(foreman(), layoutId, optionOf("centred", 1));
+    await lookAgain();
     await approveOption(foreman(), layoutId, null);
     await drop("opening-front", "left", "82 1/2", "30 1/4");
     const now = await view();
@@ -529,5 +556,107 @@ describe("who and where", () => {
       next: "marks",
       level: { state: "true", redrop: { state: "void" } },
     });
+  });
+});
+
+describe("the second look", () => {
+  beforeEach(async () => {
+    await toOptions();
+    await chooseOption(foreman(), layoutId, optionOf("centred", 1));
+  });
+  const look = (who: "tech" | "tech2", side: "left" | "right", offIn: number, clientKey = key()) => {
+    const { station, offset: off } = onFrame(
+      "hanger-hole",
+      side,
+      70.5 + offIn,
+      side === "left" ? 15.5 : -15.5,
+    ) as Extract<DropEntry, { method: "offset" }>;
+    return takeSecondLook(as(shop.people[who]), layoutId, {
+      point: "hanger-hole",
+      side,
+      station,
+      offset: off,
+      clientKey,
+    });
+  };
+
+  it("is asked of the points that weigh most, without showing what was read first", async () => {
+    const { secondLook } = await view();
+    expect(secondLook.state).toBe("to-do");
+    expect(secondLook.items.map((item) => [item.label, item.first])).toEqual([
+      ["Hanger hole 1, left", null],
+      ["Hanger hole 1, right", null],
+    ]);
+    await expect(approveOption(foreman(), layoutId, null)).rejects.toMatchObject({
+      kind: "conflict",
+      message: "A second person looks again first.",
+    });
+  });
+  it("is not for the one who read first", async () => {
+    await expect(look("tech", "left", 0)).rejects.toMatchObject({
+      kind: "conflict",
+      message: expect.stringContaining("somebody else looks again"),
+    });
+  });
+  it("passes within both uncertainties, and then shows both", async () => {
+    expect(await look("tech2", "left", 1 / 32)).toMatchObject({ outcome: "agrees" });
+    expect((await view()).secondLook).toMatchObject({ state: "to-do" });
+    await look("tech2", "right", -1 / 16);
+    const { secondLook, next } = await view();
+    expect(secondLook.state).toBe("agrees");
+    expect(secondLook.items[0]?.first?.made.name).toBe("Tess Tech");
+    expect(secondLook.items[0]?.looks[0]?.made.name).toBe("Tom Tech");
+    expect(next).toBe("approval");
+  });
+  it("counts a reading once that was sent twice", async () => {
+    const once = key();
+    await Promise.all([look("tech2", "left", 0, once), look("tech2", "left", 0, once)]);
+    expect((await view()).secondLook.items[0]?.looks).toHaveLength(1);
+  });
+  it("apart, a third reading for the first sets the second aside, and says why", async () => {
+    expect(await look("tech2", "left", 1)).toMatchObject({ outcome: "apart" });
+    expect((await view()).secondLook.state).toBe("apart");
+    await expect(approveOption(foreman(), layoutId, null)).rejects.toMatchObject({
+      message: "Two people's readings are apart: a third one decides.",
+    });
+    expect(await look("tech", "left", 0)).toMatchObject({ outcome: "decided-first" });
+    expect((await view()).secondLook.items[0]).toMatchObject({ state: "agrees" });
+    const rows = await db.select().from(schema.secondLooks).where(eq(schema.secondLooks.layoutId, layoutId));
+    expect(rows.find((row) => row.supersededAt)?.supersededReason).toBe(
+      "A third reading agrees with the first.",
+    );
+  });
+  it("apart, a third reading for the second puts it in the first one's place, and the option has to be chosen anew", async () => {
+    await look("tech2", "left", 1);
+    expect(await look("tech2", "left", 1)).toMatchObject({ outcome: "decided-second" });
+    let now = await view();
+    expect(now.choice).toBeNull();
+    const hole = now.drops.find((one) => one.point === "hanger-hole" && one.side === "left");
+    expect(hole?.reading).toMatchObject({
+      reason: "Second look: a third reading agreed with the second.",
+      made: { name: "Tom Tech" },
+    });
+    expect(hole?.superseded).toHaveLength(1);
+    await chooseOption(foreman(), layoutId, optionOf("centred", 1));
+    now = await view();
+    expect(now.secondLook.items.find((item) => item.side === "left")?.state).toBe("agrees");
+  });
+  it("three readings far from each other decide nothing", async () => {
+    await look("tech2", "left", 1);
+    expect(await look("tech", "left", 3)).toMatchObject({ outcome: "apart" });
+  });
+  it("can be waived by a foreman, with a reason", async () => {
+    await expect(waiveSecondLook(tech(), layoutId, "Alone tonight")).rejects.toMatchObject({
+      kind: "forbidden",
+    });
+    await waiveSecondLook(foreman(), layoutId, "Alone tonight");
+    expect((await view()).secondLook).toMatchObject({ state: "waived", waived: { reason: "Alone tonight" } });
+    expect(await approveOption(foreman(), layoutId, null)).toMatchObject({ sheetRevision: 1 });
+  });
+  it("is wanted again when the point is read again", async () => {
+    await lookAgain();
+    await keepDrop(tech(), layoutId, onFrame("hanger-hole", "left", 70.6, 15.5, { reason: "bob swung" }));
+    await chooseOption(foreman(), layoutId, optionOf("centred", 1));
+    expect((await view()).secondLook.items.map((item) => item.state)).toEqual(["to-do", "agrees"]);
   });
 });

@@ -20,6 +20,7 @@ export function factsOf(view: LayoutView): StepFacts {
     axleLineChosen: view.axle !== null,
     optionsKnown: view.options !== null,
     optionChosen: view.choice !== null && !view.choice.changed,
+    secondLook: view.secondLook.state,
     approval: view.approval?.state ?? "none",
   };
 }

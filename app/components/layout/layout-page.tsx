@@ -12,6 +12,7 @@ import { LayoutHead } from "./layout-head";
 import { LevelStep } from "./level/level-step";
 import { MarksStep } from "./marks/marks-step";
 import type { May } from "./may";
+import { SecondLookStep } from "./second-look/second-look-step";
 import { ShutStep } from "./shut-step";
 import { StandsStep } from "./stands/stands-step";
 import { StepsRail } from "./steps-rail";
@@ -49,7 +50,7 @@ export function LayoutPage({ view, step, may, person, servedAt, live, refresh }:
           ) : (
             <>
               {shut ? <ShutStep view={view} step={step} why={shut} /> : null}
-              {stepIn({ view, step, may: shut ? NOTHING : may, shut: shut !== null, refresh })}
+              {stepIn({ view, step, may: shut ? NOTHING : may, person, shut: shut !== null, refresh })}
             </>
           )}
         </main>
@@ -60,10 +61,10 @@ export function LayoutPage({ view, step, may, person, servedAt, live, refresh }:
 
 const NOTHING: May = { measure: false, approve: false };
 
-type StepProps = Pick<Props, "view" | "step" | "may" | "refresh"> & { shut: boolean };
+type StepProps = Pick<Props, "view" | "step" | "may" | "person" | "refresh"> & { shut: boolean };
 
 /** The step's own screen. A shut one shows only what was done there before, and takes nothing. */
-function stepIn({ view, step, may, shut, refresh }: StepProps): ReactNode {
+function stepIn({ view, step, may, person, shut, refresh }: StepProps): ReactNode {
   switch (step) {
     case "stands":
       return <StandsStep view={view} may={may} done={refresh} />;
@@ -75,6 +76,8 @@ function stepIn({ view, step, may, shut, refresh }: StepProps): ReactNode {
       return shut && !view.axle ? null : <AxleLineStep view={view} may={may} />;
     case "options":
       return shut && !view.options ? null : <OptionsStep view={view} may={may} />;
+    case "second-look":
+      return shut ? null : <SecondLookStep view={view} may={may} person={person} done={refresh} />;
     case "approval":
       return shut && !view.approval ? null : <ApprovalStep view={view} may={may} />;
     default:

@@ -18,6 +18,8 @@ const {
   levelReadings,
   people,
   placements,
+  secondLooks,
+  secondLookWaivers,
   springs,
   tags,
   tieReadings,
@@ -122,6 +124,26 @@ export async function readApproval(tx: Reader, layoutId: number) {
     .where(eq(choices.layoutId, layoutId))
     .orderBy(desc(approvals.id))
     .limit(1);
+  return row ?? null;
+}
+
+/** Every second look of a layout, oldest first, with who took it. */
+export const readSecondLooks = (tx: Reader, layoutId: number) =>
+  tx
+    .select({ look: secondLooks, name: people.name, initials: people.initials })
+    .from(secondLooks)
+    .innerJoin(people, eq(people.id, secondLooks.takenBy))
+    .where(eq(secondLooks.layoutId, layoutId))
+    .orderBy(asc(secondLooks.id));
+export type SecondLookRow = Awaited<ReturnType<typeof readSecondLooks>>[number];
+
+/** Why a choice goes without a second look; null when nobody said that it does. */
+export async function readWaiver(tx: Reader, choiceId: number) {
+  const [row] = await tx
+    .select({ waiver: secondLookWaivers, name: people.name, initials: people.initials })
+    .from(secondLookWaivers)
+    .innerJoin(people, eq(people.id, secondLookWaivers.waivedBy))
+    .where(eq(secondLookWaivers.choiceId, choiceId));
   return row ?? null;
 }
 

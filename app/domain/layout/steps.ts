@@ -6,7 +6,7 @@ export const LAYOUT_STEPS = [
   { id: "drops", label: "Drops", later: false },
   { id: "axle-line", label: "Axle line", later: false },
   { id: "options", label: "Options", later: false },
-  { id: "second-look", label: "Second look", later: true },
+  { id: "second-look", label: "Second look", later: false },
   { id: "approval", label: "Approval", later: false },
   { id: "tack", label: "Tack and square", later: true },
   { id: "weld", label: "Weld and torque", later: true },
@@ -33,6 +33,8 @@ export type StepFacts = {
   /** Axle line and hole are known, so that there are options. */
   optionsKnown: boolean;
   optionChosen: boolean;
+  /** Another person's readings of what weighs most: `apart` while two readings do not agree. */
+  secondLook: "to-do" | "apart" | "agrees" | "waived";
   approval: "none" | "approved" | "void";
 };
 
@@ -44,7 +46,7 @@ export type StepState = {
   note: string;
 };
 
-const AFTER_LEVEL: readonly StepId[] = ["marks", "drops", "axle-line", "options", "approval"];
+const AFTER_LEVEL: readonly StepId[] = ["marks", "drops", "axle-line", "options", "second-look", "approval"];
 
 /**
  * Why a step may not be worked on, and how to get there; null when it may.
@@ -73,7 +75,10 @@ export function whyShut(step: StepId, facts: StepFacts): string | null {
   if (step === "axle-line") return null;
   if (!facts.axleLineChosen) return "Choose the axle line first.";
   if (step === "options") return null;
-  return facts.optionChosen || facts.approval !== "none" ? null : "Put an option in hand first.";
+  if (!facts.optionChosen && facts.approval === "none") return "Put an option in hand first.";
+  if (step === "second-look" || facts.approval !== "none") return null;
+  if (facts.secondLook === "apart") return "Two people's readings are apart: a third one decides.";
+  return facts.secondLook === "to-do" ? "A second person looks again first." : null;
 }
 
 const isDone = (step: StepId, facts: StepFacts): boolean => {
@@ -90,6 +95,8 @@ const isDone = (step: StepId, facts: StepFacts): boolean => {
       return facts.axleLineChosen;
     case "options":
       return facts.optionChosen;
+    case "second-look":
+      return facts.secondLook === "agrees" || facts.secondLook === "waived" || facts.approval === "approved";
     case "approval":
       return facts.approval === "approved";
     default:
@@ -114,6 +121,8 @@ const noteFor = (step: StepId, facts: StepFacts): string => {
     if (facts.redropWanted) return "drop one again";
     return facts.dropsKept > 0 ? `${facts.dropsKept} of ${facts.dropsNeeded} kept` : "";
   }
+  if (step === "second-look")
+    return { "to-do": "", apart: "readings apart", agrees: "agrees", waived: "waived" }[facts.secondLook];
   if (step === "approval")
     return facts.approval === "none" ? "" : facts.approval === "void" ? "void" : "signed";
   return "";

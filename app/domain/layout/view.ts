@@ -82,6 +82,28 @@ export type ChoiceView = {
   changed: boolean;
 };
 
+/** A drop to be looked at again. What the first person read is null until somebody else has read it too. */
+export type LookView = {
+  point: DropPointId;
+  side: DropSide;
+  label: string;
+  where: string;
+  /** Its share of what is unsure in the result. */
+  share: number;
+  state: "to-do" | "apart" | "agrees";
+  /** Who read it first: they cannot look again at their own. */
+  firstBy: string;
+  first: { typed: string; made: Made } | null;
+  looks: { typed: string; made: Made; apart: Millimetres; agrees: boolean }[];
+};
+export type SecondLookView = {
+  state: "to-do" | "apart" | "agrees" | "waived";
+  /** How far two readings may be apart. */
+  within: Millimetres;
+  items: LookView[];
+  waived: { made: Made; reason: string } | null;
+};
+
 export type ApprovalView = {
   state: "approved" | "void";
   sheetRevision: number;
@@ -147,6 +169,7 @@ export type LayoutView = {
   /** Null until axle line and holes are known. */
   options: Option[] | null;
   choice: ChoiceView | null;
+  secondLook: SecondLookView;
   approval: ApprovalView | null;
   /** What is missing for options to be whole, in words: "Drop hanger hole 1 on both sides". */
   missing: string[];

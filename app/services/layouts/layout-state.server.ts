@@ -9,6 +9,8 @@ import {
   readLayoutHead,
   readLevelChecks,
   readRack,
+  readSecondLooks,
+  readWaiver,
 } from "../../db/queries/layouts.server";
 import { readShop } from "../../db/queries/shop.server";
 import { DROP_POINTS, DROPS_NEEDED } from "../../domain/layout/drops";
@@ -19,6 +21,7 @@ import type { LeafSpring } from "../../domain/springs/leaf-spring";
 import { mm } from "../../domain/units/length";
 import { Refusal } from "../errors";
 import { computeGeometry, standingDrops } from "./compute-layout";
+import { secondLookState } from "./second-look-state";
 
 const asRound = (row: LevelCheckRow): Round => ({
   id: row.id,
@@ -62,13 +65,8 @@ export async function loadLayout(tx: Reader, shopId: number, layoutId: number) {
     length: mm(spring.lengthMm),
     frontHalf: mm(spring.frontHalfMm),
   }));
-  const geometry = computeGeometry({
-    head,
-    shop,
-    rack,
-    holes,
-    drops: standingDrops(rows, (row) => ground.standing.has(row.reading.levelCheckId)),
-  });
+  const standing = standingDrops(rows, (row) => ground.standing.has(row.reading.levelCheckId));
+  const geometry = computeGeometry({ head, shop, rack, holes, drops: standing });
   const choiceRow = await readChoice(tx, layoutId);
   const approvalRow = await readApproval(tx, layoutId);
   const choice = choiceRow && {
@@ -81,6 +79,15 @@ export async function loadLayout(tx: Reader, shopId: number, layoutId: number) {
     (option === null ||
       !option.stands ||
       Math.abs(option.axleStation - choice.choice.axleStationMm) > SAME_MM);
+
+  const secondLook = secondLookState({
+    drops: standing,
+    rows,
+    looks: await readSecondLooks(tx, layoutId),
+    method: head.layout.axleMethod,
+    sigma: shop,
+  });
+  const waiver = choice ? await readWaiver(tx, choice.choice.id) : null;
 
   const last = checks.at(-1) ?? null;
   const alive = (row: DropRow) =>
@@ -100,6 +107,7 @@ export async function loadLayout(tx: Reader, shopId: number, layoutId: number) {
     axleLineChosen: head.layout.axleMethod !== null,
     optionsKnown: geometry.options !== null,
     optionChosen: choice !== null && !changed,
+    secondLook: waiver ? "waived" : secondLook.state,
     approval: approvalRow ? (approvalRow.approval.voidedAt ? "void" : "approved") : "none",
   };
   return {
@@ -116,6 +124,8 @@ export async function loadLayout(tx: Reader, shopId: number, layoutId: number) {
     option,
     changed,
     approvalRow,
+    secondLook,
+    waiver,
     facts,
   };
 }

@@ -8,7 +8,8 @@ import {
   readPerson,
 } from "../../db/queries/layouts.server";
 import { floorPoint } from "../../domain/geometry/point";
-import { DROP_POINTS, pointFromTies } from "../../domain/layout/drops";
+import { DROP_POINTS, dropPoint, pointFromTies } from "../../domain/layout/drops";
+import { lookLabel } from "../../domain/layout/second-look";
 import { nextOpenStep, stepStates } from "../../domain/layout/steps";
 import type {
   ChoiceView,
@@ -17,6 +18,7 @@ import type {
   LayoutView,
   LevelView,
   Made,
+  SecondLookView,
   TypedLength,
 } from "../../domain/layout/view";
 import { degrees } from "../../domain/units/angle";
@@ -120,6 +122,7 @@ export function readLayout(db: Db, shopId: number, layoutId: number): Promise<La
       holes: geometry.holes,
       options: geometry.options,
       choice: choiceView,
+      secondLook: secondLookView(loaded),
       approval: approvalRow && {
         state: approvalRow.approval.voidedAt ? "void" : "approved",
         sheetRevision: approvalRow.approval.sheetRevision,
@@ -177,6 +180,34 @@ async function levelView(
       turnedDeg: orNull(reading.turnedDeg, degrees),
     })),
     redrop: { state: redropState, offMm: orNull(check.carryOffMm, mm) },
+  };
+}
+
+/** The first reading stays hidden until a second person has read the point: nobody leans on a number they saw. */
+function secondLookView({ secondLook, waiver }: LoadedLayout): SecondLookView {
+  return {
+    state: waiver ? "waived" : secondLook.state,
+    within: secondLook.within,
+    items: secondLook.items.map((item) => ({
+      point: item.point,
+      side: item.side,
+      label: lookLabel(item),
+      where: dropPoint(item.point)?.where ?? "",
+      share: item.share,
+      state: item.state,
+      firstBy: item.row.name,
+      first:
+        item.state === "to-do"
+          ? null
+          : { typed: readingWords(item.row), made: made(item.row, item.row.reading.takenAt) },
+      looks: item.looks.map(({ look, ...person }) => ({
+        typed: `${look.stationTyped}, ${look.offsetTyped}`,
+        made: made(person, look.takenAt),
+        apart: mm(look.apartMm),
+        agrees: look.agrees,
+      })),
+    })),
+    waived: waiver && { made: made(waiver, waiver.waiver.waivedAt), reason: waiver.waiver.reason },
   };
 }
 
