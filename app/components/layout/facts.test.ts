@@ -43,6 +43,7 @@ function view(over: Partial<LayoutView>): LayoutView {
     axle: null,
     options: null,
     choice: null,
+    secondLook: { state: "to-do", within: 3, items: [], waived: null },
     approval: null,
     steps: [],
     ...over,
