@@ -12,6 +12,8 @@ import { usePost } from "../use-post";
 import { LookEntry } from "./look-entry";
 import "./second-look.css";
 
+const COUNT = ["No", "One", "Two", "Three", "Four"];
+
 type Props = { view: LayoutView; may: May; person: string; done: () => void };
 
 /** A second person reads again what weighs most, without having seen the first figures. */
@@ -96,7 +98,7 @@ function LookVerdict({ view }: { view: LayoutView }) {
           tone="in-hand"
           sign="person"
           size="l"
-          title={left === 1 ? "One point to read again." : `${left} points to read again.`}
+          title={`${COUNT[left] ?? left} ${left === 1 ? "point" : "points"} to read again.`}
           detail="By somebody else than who read them first."
           live
         />
