@@ -10,6 +10,7 @@ import { loadsCalc } from "./loads";
 import { optionsCalc } from "./options";
 import { shackleCalc } from "./shackle";
 import { surveyCalc } from "./survey";
+import { uncertaintyCalc } from "./uncertainty";
 
 /** Every calculation that can be asked for, in the order of the page. */
 export const CALCS = [
@@ -24,6 +25,7 @@ export const CALCS = [
   fourLinkCalc,
   loadsCalc,
   hardwareCalc,
+  uncertaintyCalc,
 ] as readonly Calc[];
 
 export const findCalc = (name: string): Calc | undefined => CALCS.find((calc) => calc.name === name);

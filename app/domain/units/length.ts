@@ -11,13 +11,36 @@ export type InchParts = { sign: "" | "−"; whole: number; numerator: number; de
 const gcd = (a: number, b: number): number => (b === 0 ? a : gcd(b, a % b));
 
 /**
- * A length as whole inches and a reduced fraction, to the nearest 1/denominator; halves away from zero.
- * @param length millimetres
- * @returns numerator 0 (and denominator 1) when there is no fraction; no sign on zero
+ * What becomes of a length that lies half way between two marks of the tape. `away-from-zero` is what people do at the
+ * tape (common practice, no source) and the default; `to-even` is rule A of ISO 80000-1 and of ASTM E29 (from memory).
  */
-export function inchParts(length: Millimetres, denominator: number = 16): InchParts {
+export type Ties = "away-from-zero" | "to-even";
+
+/**
+ * The nearest whole number, by a rule for what lies half way.
+ * @param value 0 or more
+ * @example nearestWhole(2.5, "to-even") // 2
+ */
+export function nearestWhole(value: number, ties: Ties = "away-from-zero"): number {
+  const below = Math.floor(value);
+  if (value - below !== 0.5 || ties === "away-from-zero") return Math.round(value);
+  return below % 2 === 0 ? below : below + 1;
+}
+
+/**
+ * A length as whole inches and a reduced fraction, to the nearest 1/denominator.
+ * @param length millimetres
+ * @param ties what lies half way goes away from zero unless told
+ * @returns numerator 0 (and denominator 1) when there is no fraction; no sign on zero
+ * @example inchParts(inches(12.53125), 16) // 12 9/16; to even: 12 1/2
+ */
+export function inchParts(
+  length: Millimetres,
+  denominator: number = 16,
+  ties: Ties = "away-from-zero",
+): InchParts {
   // Six decimals of an inch are far below any tape; without them 1/64 stored as a decimal could fall just short of a half.
-  const steps = Math.round(Number((Math.abs(toInches(length)) * denominator).toFixed(6)));
+  const steps = nearestWhole(Number((Math.abs(toInches(length)) * denominator).toFixed(6)), ties);
   const whole = Math.floor(steps / denominator);
   const over = steps - whole * denominator;
   const common = over === 0 ? denominator : gcd(over, denominator);
@@ -29,12 +52,12 @@ export function inchParts(length: Millimetres, denominator: number = 16): InchPa
   };
 }
 
-/** "26 1/2", "−1/8", "0": to the nearest 1/denominator (16 unless told), halves away from zero; with `sign` also "+1/8". */
+/** "26 1/2", "−1/8", "0": to the nearest 1/denominator (16 unless told), halves away from zero unless told; with `sign` also "+1/8". */
 export function formatInches(
   length: Millimetres,
-  options: { denominator?: Denominator; sign?: boolean } = {},
+  options: { denominator?: Denominator; sign?: boolean; ties?: Ties } = {},
 ): string {
-  const { sign, whole, numerator, denominator } = inchParts(length, options.denominator ?? 16);
+  const { sign, whole, numerator, denominator } = inchParts(length, options.denominator ?? 16, options.ties);
   const plus = options.sign && sign === "" && (whole > 0 || numerator > 0) ? "+" : "";
   const fraction = numerator === 0 ? "" : `${numerator}/${denominator}`;
   const size =

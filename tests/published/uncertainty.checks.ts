@@ -1,0 +1,343 @@
+import { quantile, sampleCorrelation, standardDeviation } from "simple-statistics";
+import type { Outcome } from "../../app/domain/outcome";
+import { combine, covarianceOf, propagate, type Uncertain } from "../../app/domain/uncertainty/propagate";
+import { correlation, fromHalfWidth, repeated } from "../../app/domain/uncertainty/readings";
+import { coverageFactor } from "../../app/domain/uncertainty/student";
+import type { Source, Topic } from "./check";
+
+const of = <T>(came: Outcome<T>): T => {
+  if (!came.ok) throw new Error(came.problem);
+  return came.value;
+};
+
+/* JCGM 100, H.1: a 50 mm end gauge against a standard; nanometres. */
+const H1: Source = { name: "JCGM 100:2008", place: "H.1, end gauge", status: "read" };
+const H1_MEMORY: Source = { ...H1, status: "from memory" };
+const difference = () =>
+  of(
+    combine(215, [1, 1, 1], {
+      inputs: [
+        { name: "repeated readings", value: 215, uncertainty: 5.8, freedom: 24 },
+        { name: "comparator, random", value: 0, uncertainty: 3.9, freedom: 5 },
+        { name: "comparator, systematic", value: 0, uncertainty: 6.7, freedom: 8 },
+      ],
+      coverage: 0.99,
+    }),
+  );
+const LS = 50_000_623;
+const ALPHA = 11.5e-6;
+const endGauge = (): Uncertain => {
+  const d = difference();
+  // l = ls + d − ls(δα·θ + αs·δθ) at δα = 0, δθ = 0, θ = −0.1.
+  return of(
+    propagate(([ls = 0, dd = 0, da = 0, dt = 0]) => ls + dd - ls * (da * -0.1 + ALPHA * dt), {
+      inputs: [
+        { name: "standard", value: LS, uncertainty: 25, freedom: 18 },
+        { name: "difference", value: 215, uncertainty: d.uncertainty, freedom: 25.6 },
+        { name: "expansion", value: 0, uncertainty: fromHalfWidth(1e-6, "rectangular"), freedom: 50 },
+        { name: "temperature", value: 0, uncertainty: fromHalfWidth(0.05, "rectangular"), freedom: 2 },
+      ],
+      coverage: 0.99,
+    }),
+  );
+};
+
+/* JCGM 100, H.2: resistance and reactance, five readings taken together. */
+const V = [5.007, 4.994, 5.005, 4.99, 4.999];
+const I = [19.663e-3, 19.639e-3, 19.64e-3, 19.685e-3, 19.678e-3];
+const PHI = [1.0456, 1.0438, 1.0468, 1.0428, 1.0433];
+const H2 = (status: Source["status"]): Source => ({
+  name: "JCGM 100:2008",
+  place: "H.2, resistance and reactance",
+  status,
+});
+const reading = (list: number[]) => {
+  const came = repeated(list);
+  if (!came) throw new Error("Too few readings");
+  return came;
+};
+const rs = () => [
+  { a: "V", b: "I", r: correlation(V, I) ?? Number.NaN },
+  { a: "V", b: "phi", r: correlation(V, PHI) ?? Number.NaN },
+  { a: "I", b: "phi", r: correlation(I, PHI) ?? Number.NaN },
+];
+const together = (f: (v: number, i: number, phi: number) => number, correlated = true) =>
+  of(
+    propagate(([v = 0, i = 0, phi = 0]) => f(v, i, phi), {
+      inputs: [
+        { name: "V", value: reading(V).mean, uncertainty: reading(V).ofMean },
+        { name: "I", value: reading(I).mean, uncertainty: reading(I).ofMean },
+        { name: "phi", value: reading(PHI).mean, uncertainty: reading(PHI).ofMean },
+      ],
+      correlations: correlated ? rs() : [],
+    }),
+  );
+const R = (correlated = true) => together((v, i, phi) => (v * Math.cos(phi)) / i, correlated);
+const X = () => together((v, i, phi) => (v * Math.sin(phi)) / i);
+const Z = () => together((v, i) => v / i);
+const r = (a: Uncertain, b: Uncertain) => covarianceOf(a, b, rs()).correlation ?? Number.NaN;
+
+const TABLE_G2: Source = { name: "JCGM 100:2008", place: "table G.2", status: "from memory" };
+const t = (coverage: number, freedom: number, want: number, within: number) => ({
+  about: `t for ${coverage * 100} % and ${freedom} degrees of freedom`,
+  source: TABLE_G2,
+  got: () => coverageFactor(coverage, freedom),
+  want,
+  within,
+});
+
+export default {
+  topic: "Measurement uncertainty",
+  checks: [
+    {
+      about: "end gauge: u of the difference, nm",
+      source: H1,
+      got: () => difference().uncertainty,
+      want: 9.7,
+      within: 0.05,
+    },
+    {
+      about:
+        "end gauge: effective degrees of freedom of the difference (25.6 from the rounded 9.7, 25.447 unrounded)",
+      source: { ...H1, status: "recomputed" },
+      got: () => difference().freedom,
+      want: 25.447,
+      within: 0.0005,
+    },
+    {
+      about: "end gauge: length, nm",
+      source: H1,
+      got: () => endGauge().value,
+      want: 50_000_838,
+      within: 0.5,
+    },
+    {
+      about: "end gauge: contributions 25, 16.6, 9.7 and 2.9 nm",
+      source: H1,
+      got: () => endGauge().contributions.map((one) => Math.abs(one.moves)),
+      want: [25, 16.6, 9.7, 2.9],
+      within: 0.05,
+    },
+    {
+      about: "end gauge: combined standard uncertainty, nm",
+      source: H1,
+      got: () => endGauge().uncertainty,
+      want: 32,
+      within: 0.5,
+    },
+    {
+      about: "end gauge: effective degrees of freedom (printed 16.7 from rounded figures, 16.752 unrounded)",
+      source: { ...H1, status: "recomputed" },
+      got: () => endGauge().freedom,
+      want: 16.752,
+      within: 0.02,
+    },
+    {
+      about: "end gauge: t for 99 % and 16 degrees of freedom",
+      source: H1_MEMORY,
+      got: () => endGauge().coverageFactor,
+      want: 2.92,
+      within: 0.005,
+    },
+    {
+      about: "end gauge: U99, nm (93 from u = 32; 92.5 unrounded)",
+      source: { ...H1, status: "recomputed" },
+      got: () => endGauge().expanded,
+      want: 92.5,
+      within: 0.05,
+    },
+    {
+      about: "means of V, I (mA) and phase",
+      source: H2("read"),
+      got: () => [reading(V).mean, 1000 * reading(I).mean, reading(PHI).mean],
+      want: [4.999, 19.661, 1.04446],
+      within: 5e-6,
+    },
+    {
+      about: "standard uncertainties of the means of V, I (mA) and phase",
+      source: H2("recomputed"),
+      got: () => [reading(V).ofMean, 1000 * reading(I).ofMean, reading(PHI).ofMean],
+      want: [0.00320936, 0.00947101, 0.000752064],
+      within: 5e-8,
+    },
+    {
+      about: "correlations V–I, V–phase, I–phase",
+      source: H2("read"),
+      got: () => rs().map((one) => one.r),
+      want: [-0.36, 0.86, -0.65],
+      within: 0.005,
+    },
+    {
+      about: "resistance: 127.732 with u 0.071",
+      source: H2("read"),
+      got: () => [R().value, R().uncertainty],
+      want: [127.732, 0.071],
+      within: 0.0005,
+    },
+    {
+      about: "reactance: 219.847",
+      source: H2("read"),
+      got: () => X().value,
+      want: 219.847,
+      within: 0.0005,
+    },
+    {
+      about: "reactance: u 0.295 (0.29558 unrounded)",
+      source: H2("recomputed"),
+      got: () => X().uncertainty,
+      want: 0.2955817,
+      within: 5e-7,
+    },
+    {
+      about: "impedance: 254.260 with u 0.236",
+      source: H2("read"),
+      got: () => [Z().value, Z().uncertainty],
+      want: [254.26, 0.236],
+      within: 0.0005,
+    },
+    {
+      about: "correlations of the results R–X, R–Z, X–Z",
+      source: H2("recomputed"),
+      got: () => [r(R(), X()), r(R(), Z()), r(X(), Z())],
+      want: [-0.58843, -0.485259, 0.992512],
+      within: 5e-6,
+    },
+    {
+      about: "resistance with the correlation forgotten, from the printed rounded inputs: 0.19412, not 0.070",
+      source: H2("derived"),
+      got: () =>
+        of(
+          propagate(([v = 0, i = 0, phi = 0]) => (v * Math.cos(phi)) / i, {
+            inputs: [
+              { name: "V", value: 4.999, uncertainty: 0.0032 },
+              { name: "I", value: 19.661e-3, uncertainty: 0.0095e-3 },
+              { name: "phi", value: 1.04446, uncertainty: 0.00075 },
+            ],
+          }),
+        ).uncertainty,
+      want: 0.19412,
+      within: 5e-6,
+    },
+    {
+      about: "Welch and Satterthwaite: u 0.57 with 9, u 0.25 with endless degrees of freedom",
+      source: {
+        name: "Open-source uncertainty calculator's tests",
+        place: "degrees of freedom",
+        status: "read",
+      },
+      got: () =>
+        of(
+          combine(0, [1, 1], {
+            inputs: [
+              { name: "a", value: 0, uncertainty: 0.57, freedom: 9 },
+              { name: "b", value: 0, uncertainty: 0.25 },
+            ],
+          }),
+        ).freedom,
+      want: 12.8,
+      within: 0.05,
+    },
+    {
+      about: "sum of four normal inputs of u 1: ± 3.92 at 95 %",
+      source: { name: "JCGM 101:2008", place: "9.2.2", status: "read" },
+      got: () => fourOf(1).expanded,
+      want: 3.92,
+      within: 0.005,
+    },
+    {
+      about: "sum of four, one of u 10: u 10.1 and ± 19.9 by first order",
+      source: { name: "JCGM 101:2008", place: "9.2.4", status: "from memory" },
+      got: () => [fourOf(10).uncertainty, fourOf(10).expanded],
+      want: [10.1, 19.9],
+      within: 0.05,
+    },
+    {
+      about:
+        "ln x with x between 0.1 and 1.1: first order gives −0.511 and u 0.481, where the truth is −0.665 and 0.606",
+      source: { name: "NPL report DEM-ES-011", place: "table 9.2", status: "read" },
+      got: () => {
+        const came = of(
+          propagate(([x = 0]) => Math.log(x), {
+            inputs: [{ name: "x", value: 0.6, uncertainty: fromHalfWidth(0.5, "rectangular") }],
+          }),
+        );
+        return [came.value, came.uncertainty];
+      },
+      want: [-0.511, 0.481],
+      within: 0.0005,
+    },
+    {
+      about: "a limit of ± 1/64 in, evenly spread, is a standard uncertainty of 0.009021 in",
+      source: { name: "JCGM 100:2008", place: "4.3.7", status: "derived" },
+      got: () => fromHalfWidth(1 / 64, "rectangular"),
+      want: 0.009021,
+      within: 5e-7,
+    },
+    t(0.95, 4, 2.78, 0.005),
+    t(0.95, 10, 2.23, 0.005),
+    t(0.95, 16, 2.12, 0.005),
+    t(0.99, 16, 2.92, 0.005),
+    t(0.95, Number.POSITIVE_INFINITY, 1.96, 0.0005),
+    {
+      about: "two-sided limits of the normal law at 5, 1, 0.5 and 0.1 %",
+      source: { name: "Normal law", place: "tables of it", status: "recomputed" },
+      got: () =>
+        [0.95, 0.99, 0.995, 0.999].map((coverage) => coverageFactor(coverage, Number.POSITIVE_INFINITY)),
+      want: [1.96, 2.5758, 2.807, 3.2905],
+      within: 5e-5,
+    },
+    {
+      about: "standard deviation of H.2's voltages",
+      source: {
+        name: "simple-statistics",
+        place: "standardDeviation, population form scaled",
+        status: "library",
+      },
+      got: () => reading(V).standardDeviation,
+      want: standardDeviation(V) * Math.sqrt(5 / 4),
+      within: 1e-12,
+    },
+    {
+      about: "correlation of H.2's voltages and phases",
+      source: { name: "simple-statistics", place: "sampleCorrelation", status: "library" },
+      got: () => correlation(V, PHI) ?? Number.NaN,
+      want: sampleCorrelation(V, PHI),
+      within: 1e-12,
+    },
+    {
+      about:
+        "coverage of the expanded uncertainty over 200 000 drawn cases of a product (share within, 0.95)",
+      source: { name: "simple-statistics", place: "quantile of drawn cases", status: "library" },
+      got: () => drawnHalfWidth(),
+      want: of(
+        propagate(([a = 0, b = 0]) => a * b, {
+          inputs: [
+            { name: "a", value: 52, uncertainty: 0.03 },
+            { name: "b", value: 26, uncertainty: 0.03 },
+          ],
+        }),
+      ).expanded,
+      within: 0.02,
+    },
+  ],
+} satisfies Topic;
+
+function fourOf(last: number): Uncertain {
+  return of(
+    combine(0, [1, 1, 1, 1], {
+      inputs: [1, 1, 1, last].map((uncertainty, i) => ({ name: `x${i}`, value: 0, uncertainty })),
+    }),
+  );
+}
+
+/** Half the width of the middle 95 % of a product of two normal lengths, drawn with a fixed seed. */
+function drawnHalfWidth(): number {
+  let state = 20_261_201;
+  const uniform = () => {
+    state = (Math.imul(state, 1_664_525) + 1_013_904_223) >>> 0;
+    return (state + 0.5) / 4_294_967_296;
+  };
+  const normal = () => Math.sqrt(-2 * Math.log(uniform())) * Math.cos(2 * Math.PI * uniform());
+  const drawn = Array.from({ length: 200_000 }, () => (52 + 0.03 * normal()) * (26 + 0.03 * normal()));
+  return (quantile(drawn, 0.975) - quantile(drawn, 0.025)) / 2;
+}
