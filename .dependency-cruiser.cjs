@@ -19,7 +19,10 @@ module.exports = {
       name: "not-to-unresolvable",
       severity: "error",
       from: {},
-      to: { couldNotResolve: true, pathNot: "build/server/index\\.js$|^virtual:|\\?url$|^\\./\\+types/|/\\+types/" },
+      to: {
+        couldNotResolve: true,
+        pathNot: "build/server/index\\.js$|^virtual:|\\?url$|^\\./\\+types/|/\\+types/",
+      },
     },
     {
       name: "domain-is-pure",

@@ -73,8 +73,11 @@ test("by keyboard: picked up, walked from place to place, put down; and put back
   await inYard(db, shop, "Keyed");
   const page = await as(shop.people.foreman, { viewport: DESK });
   await open(page);
+  const yard = page.locator('[data-place="yard"]');
   await standing(page, "Keyed", "Yard").focus();
   await page.keyboard.press("Space");
+  // In hand, over the place where it stands: from here on keys are taken.
+  await expect(yard).toHaveAttribute("data-over", "true");
   await expect(page.getByText("Keyed stood here")).toBeVisible();
   await page.keyboard.press("Escape");
   await expect(page.getByText("Keyed stood here")).toBeHidden();
@@ -82,7 +85,7 @@ test("by keyboard: picked up, walked from place to place, put down; and put back
 
   await page.keyboard.press("Space");
   await expect(page.getByText("Keyed stood here")).toBeVisible();
-  await expect(page.locator('[data-place="yard"]')).toHaveAttribute("data-over", "true");
+  await expect(yard).toHaveAttribute("data-over", "true");
   // From the yard, which comes last, the places come round in their order.
   for (const n of [1, 2]) {
     await page.keyboard.press("ArrowDown");
