@@ -55,5 +55,14 @@ export default function handleRequest(
 
 /** Faults of loaders and actions; refusals are answers and do not come here. */
 export function handleError(error: unknown, { request }: { request: Request }) {
-  if (!request.signal.aborted) console.error(error);
+  if (!request.signal.aborted) console.error(withoutValues(error));
+}
+
+/** A database fault names what was typed: the log keeps the query, the code and the place, never the values. */
+function withoutValues(error: unknown): unknown {
+  if (!(error instanceof Error) || !("query" in error)) return error;
+  const code =
+    error.cause && typeof error.cause === "object" && "code" in error.cause ? error.cause.code : "";
+  const place = (error.stack ?? "").split("\n").filter((line) => line.startsWith("    at "));
+  return [`A query failed (${String(code)}): ${String(error.query)}`, ...place].join("\n");
 }

@@ -12,6 +12,7 @@ import { appContext, nonceContext, tooManyContext } from "../app/context";
 import { openDatabase } from "../app/db/client.server";
 import { isUpToDate } from "../app/db/migrate.server";
 import { env } from "../app/env.server";
+import { pagePath } from "../app/http/path";
 import { type LiveServer, startRealtime } from "../app/realtime/sockets.server";
 import { sameOrigin, socketOriginAllowed } from "./origin";
 
@@ -66,13 +67,18 @@ export async function createApp({ io, migrationsDir, loadBuild }: Options) {
     next();
   });
   app.use(securityHeaders(production, settings.COOKIE_SECURE === "1"));
+  app.use(plainRequests);
   app.use(sameOrigin);
   app.use(shortBodies);
-  app.post(["/sign-in{.data}", "/devices{.data}"], limited(settings.SIGN_IN_PER_MINUTE));
-  app.post(
-    "/api/v1/calc/:name",
-    limited(settings.CALC_PER_MINUTE, (req) => hashOf(tokenOf(req) ?? "")),
-  );
+  const tries = limited(settings.SIGN_IN_PER_MINUTE);
+  const sums = limited(settings.CALC_PER_MINUTE, (req) => hashOf(tokenOf(req) ?? ""));
+  app.use((req, res, next) => {
+    const page = pagePath(req.path);
+    if (page === "/pair" || (req.method === "POST" && (page === "/sign-in" || page === "/devices")))
+      return tries(req, res, next);
+    if (page?.startsWith("/api/v1/calc/")) return sums(req, res, next);
+    next();
+  });
   app.use((_req, res, next) => {
     // Pages are made for one person: nothing between us and them keeps a copy.
     res.set("Cache-Control", "no-store");
@@ -80,7 +86,8 @@ export async function createApp({ io, migrationsDir, loadBuild }: Options) {
   });
   app.use(
     createRequestHandler({
-      build: loadBuild ?? (() => import("virtual:react-router/server-build")),
+      // Read before the first request: a new build on disk must not change a server that runs.
+      build: loadBuild ?? (await import("virtual:react-router/server-build")),
       mode: settings.NODE_ENV,
       getLoadContext(_req, res) {
         const context = new RouterContextProvider();
@@ -101,6 +108,16 @@ export async function createApp({ io, migrationsDir, loadBuild }: Options) {
     },
   };
 }
+
+const METHODS = new Set(["GET", "HEAD", "POST"]);
+
+/** Refuses what no browser sends, before anything makes an address of it: other methods, odd targets, a broken Host. */
+const plainRequests: RequestHandler = (req, res, next) => {
+  if (!METHODS.has(req.method)) res.status(405).json({ message: "There is nothing that takes this." });
+  else if (!req.url.startsWith("/") || !URL.canParse(`http://${req.get("host") ?? ""}/`))
+    res.status(400).json({ message: "That is not an address of this shop." });
+  else next();
+};
 
 /** Longer than any form or list of figures that the shop sends. */
 const LONGEST_BODY = 1024 * 1024;

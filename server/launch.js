@@ -47,6 +47,10 @@ if (development) {
   shop = await createApp({ io, migrationsDir });
   outer.use(compression());
   const client = join(root, "build/client");
+  outer.use((_req, res, next) => {
+    res.set("X-Content-Type-Options", "nosniff");
+    next();
+  });
   outer.use(
     "/assets",
     express.static(join(client, "assets"), { immutable: true, maxAge: "1y", fallthrough: false }),

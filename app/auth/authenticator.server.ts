@@ -39,10 +39,12 @@ export function makeAuthenticator(db: Db, now: () => Date): Authenticator<Signed
         .where(and(eq(signInFailures.accountHash, accountHash), gt(signInFailures.at, since)));
       if (Number(tries?.n ?? 0) >= TRIES_PER_ACCOUNT)
         throw new SignInSlowedDown("Too many tries on this account. Wait 15 minutes, or ask the owner.");
-      const [person] = await db
+      const [found] = await db
         .select()
         .from(people)
         .where(and(eq(people.email, email), isNull(people.leftAt)));
+      // The database takes é for e; failures are counted by what was typed, so only that very address signs in.
+      const person = found?.email === email ? found : undefined;
       const good = await bcrypt.compare(password, person?.passwordHash ?? NOBODY);
       if (!person?.passwordHash || !good) {
         await db.insert(signInFailures).values({ accountHash, at: now() });

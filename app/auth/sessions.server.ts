@@ -47,8 +47,16 @@ export async function endSession(db: Reader, sessionHash: string, now: Date): Pr
     .where(and(eq(schema.sessions.idHash, sessionHash), isNull(schema.sessions.endedAt)));
 }
 
-/** The actor behind a cookie's secret, or null: unknown, ended, idle too long, person gone, device revoked. */
-export async function actorFromSecret(db: Db, secret: string | null, now: Date): Promise<Actor | null> {
+/**
+ * The actor behind a cookie's secret, or null: unknown, ended, idle too long, person gone, device revoked.
+ * @param used false: looking is no use of the session, which goes on growing idle
+ */
+export async function actorFromSecret(
+  db: Db,
+  secret: string | null,
+  now: Date,
+  { used = true } = {},
+): Promise<Actor | null> {
   if (!secret) return null;
   const { sessions, people, devices } = schema;
   const idHash = hashOf(secret);
@@ -63,7 +71,8 @@ export async function actorFromSecret(db: Db, secret: string | null, now: Date):
   const limits = session.personId === null ? SESSION_LIMITS.display : SESSION_LIMITS.person;
   if (now.getTime() - session.lastSeenAt.getTime() > limits.idle) return null;
   if (device?.revokedAt || person?.leftAt) return null;
-  if (now.getTime() - session.lastSeenAt.getTime() > TOUCH_EVERY)
+  // A wall is looked at, not used: for a display hearing the shop is use enough.
+  if ((used || !person) && now.getTime() - session.lastSeenAt.getTime() > TOUCH_EVERY)
     await db.update(sessions).set({ lastSeenAt: now }).where(eq(sessions.idHash, idHash));
   const base = { shopId: session.shopId, deviceId: session.deviceId, sessionHash: idHash };
   if (person)

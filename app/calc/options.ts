@@ -117,7 +117,7 @@ const input = z.strictObject({
         height: z.number().min(0).max(5000).describe("Over the ground."),
       }),
     )
-    .max(60)
+    .max(16)
     .default([])
     .describe("Lowest points of the vehicle, ahead of, behind and between the axles."),
   dragLink: z

@@ -6,17 +6,9 @@ import { actorContext, appContext } from "../context";
 import { env } from "../env.server";
 import type { Context } from "../services/change.server";
 import { Refusal } from "../services/errors";
+import { pagePath } from "./path";
 
 type Ctx = Readonly<RouterContextProvider>;
-
-/** The page's path behind a request, whether it came for the document or for its data. */
-export function pathOf(request: Request): string {
-  const { pathname } = new URL(request.url);
-  if (pathname === "/_root.data") return "/";
-  if (pathname.endsWith("/_.data")) return pathname.slice(0, -"_.data".length);
-  if (pathname.endsWith(".data")) return pathname.slice(0, -".data".length);
-  return pathname;
-}
 
 /** What a request needs by the access table; null when the table does not know the path or the method. */
 export function needOf(path: string, method: string): Need | null {
@@ -30,14 +22,21 @@ export function needOf(path: string, method: string): Need | null {
 const wantsPage = (request: Request) =>
   request.method === "GET" && (request.headers.get("accept") ?? "").includes("text/html");
 
+/** Signs that some reader of addresses drops or turns: with them a path could become another site's address. */
+const ODD_SIGNS = /[^\u0021-\u007e]|\\/;
+
 /** Where a person goes on after signing in: a path of ours, never another site. */
 export function safeReturn(to: string | null): string {
-  return to !== null && /^\/(?![/\\])[^\\]*$/.test(to) ? to : "/";
+  if (to === null || !to.startsWith("/") || to.startsWith("//") || ODD_SIGNS.test(to)) return "/";
+  const here = "http://here.invalid";
+  const url = URL.parse(to, here);
+  return url?.origin === here ? url.pathname + url.search : "/";
 }
 
 /** Refuses a request that the access table does not allow to this actor. */
 export function guardRequest(request: Request, actor: Actor | null): void {
-  const path = pathOf(request);
+  const path = pagePath(new URL(request.url).pathname);
+  if (path === null) throw data({ message: "There is no such page." }, { status: 404 });
   const need = needOf(path, request.method);
   if (need === null) throw data({ message: "There is nothing that takes this." }, { status: 405 });
   if (need === "anyone") return;
@@ -120,10 +119,9 @@ export async function orErrorPage<T>(work: () => Promise<T>): Promise<T> {
 
 /** A number from a route's path. @throws 404 */
 export function idParam(value: string | undefined): number {
-  const id = Number(value);
-  if (!Number.isSafeInteger(id) || id <= 0)
+  if (!/^[1-9]\d{0,14}$/.test(value ?? ""))
     throw data({ message: "There is no such page." }, { status: 404 });
-  return id;
+  return Number(value);
 }
 
 /** The address that tags and sheets carry: the one set for the shop, or the one this request came to. */

@@ -41,7 +41,7 @@ export function startRealtime(
   io.use(async (socket, next) => {
     try {
       const secret = await sessionSecret(socket.handshake.headers.cookie);
-      const actor = await actorFromSecret(db, secret, now());
+      const actor = await actorFromSecret(db, secret, now(), { used: false });
       if (!actor) return next(new Error("sign-in"));
       socket.data.actor = actor;
       next();
@@ -93,7 +93,7 @@ export function startRealtime(
     for (const socket of io.sockets.sockets.values()) {
       try {
         const secret = await sessionSecret(socket.handshake.headers.cookie);
-        if (!(await actorFromSecret(db, secret, now()))) socket.disconnect(true);
+        if (!(await actorFromSecret(db, secret, now(), { used: false }))) socket.disconnect(true);
       } catch (error) {
         onFault(error, "recheck");
       }

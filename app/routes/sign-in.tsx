@@ -28,6 +28,7 @@ export async function action({ request, context }: Route.ActionArgs) {
       { message: "Too many tries from this address. Wait a minute.", email: typed },
       { status: 429 },
     );
+  const to = safeReturn(new URL(request.url).searchParams.get("to"));
   try {
     const { personId, shopId } = await makeAuthenticator(db, now).authenticate("form", request);
     const before = context.get(actorContext);
@@ -41,7 +42,7 @@ export async function action({ request, context }: Route.ActionArgs) {
       { shopId, personId, deviceId: before?.deviceId ?? null, userAgent },
       now(),
     );
-    throw redirect(safeReturn(new URL(request.url).searchParams.get("to")), {
+    throw redirect(to, {
       headers: { "Set-Cookie": await sessionCookie().serialize(secret) },
     });
   } catch (error) {

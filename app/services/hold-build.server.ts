@@ -5,7 +5,7 @@ import type { HoldKind } from "../domain/builds/stages";
 import { type Context, change, requirePerson } from "./change.server";
 import { Refusal } from "./errors";
 
-const { holds } = schema;
+const { builds, holds } = schema;
 
 /** Puts a build on hold with a reason, or lifts the hold that stands. @throws Refusal not-found, conflict */
 export async function holdBuild(
@@ -15,6 +15,12 @@ export async function holdBuild(
   const actor = requirePerson(ctx, "holds:set");
   const { shopId } = ctx.actor;
   return change(ctx, async (tx, note) => {
+    // Two who hold or lift at once follow one another.
+    await tx
+      .select({ id: builds.id })
+      .from(builds)
+      .where(and(eq(builds.id, what.buildId), eq(builds.shopId, shopId)))
+      .for("update");
     const standing = await readStanding(tx, shopId, what.buildId);
     if (!standing) throw new Refusal("not-found", "That vehicle does not stand in this shop.");
     const { vehicle, bayId } = standing;

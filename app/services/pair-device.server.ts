@@ -1,5 +1,5 @@
 import { randomInt } from "node:crypto";
-import { and, desc, eq, gt, isNull } from "drizzle-orm";
+import { and, desc, eq, gt, isNull, lt } from "drizzle-orm";
 import { endSession, hashOf, newSecret, startSession } from "../auth/sessions.server";
 import { type Db, isDuplicate, schema } from "../db/client.server";
 import { CODE_ALPHABET } from "../domain/tags/short-code";
@@ -23,6 +23,10 @@ export async function askForPairing(
 ): Promise<{ code: string; claim: string; expiresAt: Date }> {
   const claim = newSecret();
   const expiresAt = new Date(now.getTime() + PAIRING_MS);
+  // Codes that nobody typed in are of no use to anybody any more.
+  await db
+    .delete(devicePairings)
+    .where(and(lt(devicePairings.expiresAt, now), isNull(devicePairings.deviceId)));
   for (;;) {
     const code = pairingCode();
     try {

@@ -64,7 +64,7 @@ const hoursOf = (form: object, index: number) => (form as StageFields)[`hours-${
 
 const isDate = (typed: string) =>
   /^\d{4}-\d{2}-\d{2}$/.test(typed) && !Number.isNaN(Date.parse(`${typed}T00:00:00Z`));
-const isTime = (typed: string) => /^([01]\d|2[0-3]):[0-5]\d/.test(typed);
+const isTime = (typed: string) => /^([01]\d|2[0-3]):[0-5]\d(:[0-5]\d)?$/.test(typed);
 
 /** A refinement that speaks even when other fields are wrong, so that every fault is named at once. */
 const always = { when: () => true };

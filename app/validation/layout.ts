@@ -61,6 +61,8 @@ const placesOf = (form: FormData, name: string) => [
 
 const GAUGE_PLACES: readonly GaugePlace[] = ["leftRail", "rightRail", "frontCross", "rearCross"];
 const MAX_STANDS = 12;
+/** What a stand may be called. */
+const PLACE = /^[a-z0-9-]{1,20}$/i;
 
 export type LevelForm =
   | { method: "heights"; stands: { place: string; x: Typed; y: Typed; height: Typed }[] }
@@ -85,8 +87,12 @@ export function readLevelForm(form: FormData, unit: LengthUnit): FormRead<LevelF
   const places = placesOf(form, "height").slice(0, MAX_STANDS);
   if (places.length < 3)
     faults.add("form", "Heights at three stands or more make a level; a fourth shows twist.");
+  if (places.some((place) => !PLACE.test(place)))
+    faults.add("form", "A stand has a name of letters and dashes.");
+  if (new Set(places.map((place) => place.toLowerCase())).size < places.length)
+    faults.add("form", "Two stands have the same name.");
   const stands = places.map((place) => ({
-    place: place.slice(0, 20),
+    place,
     x: length(form, `x.${place}`, unit, faults),
     y: length(form, `y.${place}`, unit, faults),
     height: length(form, `height.${place}`, unit, faults, 3000),

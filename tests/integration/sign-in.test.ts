@@ -2,7 +2,7 @@ import { eq } from "drizzle-orm";
 import { afterAll, beforeAll, describe, expect, it } from "vitest";
 import { makeTestShop, type TestShop } from "#tests/factories";
 import { testDatabase } from "#tests/setup/database";
-import { startServer, type TestServer } from "#tests/setup/server";
+import { cookieFor, startServer, type TestServer } from "#tests/setup/server";
 import { actorFromSecret, endSession, hashOf, SESSION_LIMITS, startSession } from "~/auth/sessions.server";
 import { type Db, schema } from "~/db/client.server";
 
@@ -130,6 +130,31 @@ describe("signing in", () => {
     expect(await sees(cookie)).toBe(302);
   });
 
+  it("leaves a paired display a display when a person signs out on it", async () => {
+    const [device] = await db
+      .insert(schema.devices)
+      .values({
+        shopId: shop.shopId,
+        kind: "wall",
+        name: "Wall",
+        pairedBy: shop.people.foreman.personId ?? 0,
+        pairedAt: new Date(),
+      })
+      .$returningId();
+    const display = await cookieFor(db, shop.display, device?.id ?? null);
+    const person = cookieOf(await post(good(), { cookie: display }));
+    expect(await sees(person, "/springs")).toBe(200);
+    const out = await fetch(`${server.origin}/sign-out`, {
+      method: "POST",
+      redirect: "manual",
+      headers: { cookie: person, origin: server.origin },
+    });
+    expect(out.headers.get("location")).toBe("/wall");
+    const again = cookieOf(out);
+    expect(await sees(again, "/wall")).toBe(200);
+    expect(await sees(again, "/springs")).toBe(403);
+  });
+
   it("refuses a form that comes from another site", async () => {
     expect((await post(good(), { headers: { origin: "https://evil.example" } })).status).toBe(403);
     expect((await post(good(), { headers: { origin: "null" } })).status).toBe(403);
@@ -168,6 +193,14 @@ describe("a session", () => {
     expect(await actorFromSecret(db, secret, later(t0, 2 * idle - 3 * MINUTE))).not.toBeNull();
     const other = await start(t0);
     expect(await actorFromSecret(db, other, later(t0, idle + MINUTE))).toBeNull();
+  });
+
+  it("is not used by a screen that only listens", async () => {
+    const secret = await start(t0);
+    const { idle } = SESSION_LIMITS.person;
+    for (let at = 0; at < idle; at += 60 * MINUTE)
+      expect(await actorFromSecret(db, secret, later(t0, at), { used: false })).not.toBeNull();
+    expect(await actorFromSecret(db, secret, later(t0, idle + MINUTE), { used: false })).toBeNull();
   });
 
   it("ends at the latest after its day, however much it is used", async () => {

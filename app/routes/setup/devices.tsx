@@ -9,6 +9,7 @@ import { Refusal } from "~/services/errors";
 import { confirmPairing, listDevices, revokeDevice } from "~/services/pair-device.server";
 import { Button } from "~/ui/button";
 import { Field, SelectField } from "~/ui/field";
+import { idField } from "~/validation/floor";
 import { PairForm } from "~/validation/setup";
 import type { Route } from "./+types/devices";
 
@@ -23,7 +24,7 @@ export async function loader({ context }: Route.LoaderArgs) {
   return { shell, devices: devices.map((device) => ({ ...device, pairedAt: day.format(device.pairedAt) })) };
 }
 
-const Revoke = z.object({ deviceId: z.coerce.number().int().positive() });
+const Revoke = z.object({ deviceId: idField });
 
 export async function action({ request, context }: Route.ActionArgs) {
   const form = await formOf(request);

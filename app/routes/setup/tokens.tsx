@@ -9,6 +9,7 @@ import { readShell } from "~/http/shell.server";
 import { listTokens, makeToken, revokeToken } from "~/services/api-tokens.server";
 import { Button } from "~/ui/button";
 import { Field } from "~/ui/field";
+import { idField } from "~/validation/floor";
 import { TokenForm } from "~/validation/setup";
 import type { Route } from "./+types/tokens";
 
@@ -28,7 +29,7 @@ export async function loader({ context }: Route.LoaderArgs) {
   };
 }
 
-const Revoke = z.object({ tokenId: z.coerce.number().int().positive() });
+const Revoke = z.object({ tokenId: idField });
 
 export async function action({ request, context }: Route.ActionArgs) {
   const form = await formOf(request);

@@ -12,6 +12,7 @@ import { answer, requireActor, serviceContext } from "~/http/request.server";
 import { readShell } from "~/http/shell.server";
 import { useLiveTouch } from "~/realtime/use-live";
 import { addSpring, takeOutSpring } from "~/services/add-spring.server";
+import { idField } from "~/validation/floor";
 import { springForm } from "~/validation/spring";
 import { remembered } from "../counter/remembered.server";
 import type { Route } from "./+types/springs";
@@ -39,7 +40,7 @@ export async function loader({ request, context }: Route.LoaderArgs) {
   });
 }
 
-const TakeOut = z.object({ springId: z.string().regex(/^\d+$/, "Which spring?").transform(Number) });
+const TakeOut = z.object({ springId: idField });
 
 /** `do`: "add" a spring to the rack, or "take-out" one. */
 export async function action({ request, context }: Route.ActionArgs) {
