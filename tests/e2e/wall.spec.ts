@@ -32,13 +32,7 @@ test("the wall says when it is not live, never shows an old level as true, and i
   await expect(bay(1)).toContainText("was: Layout");
   await expect(bay(1)).toContainText("Level not known: ask at the bay");
 
-  // While it hears nothing the vehicle moves, and another comes.
-  await moveVehicle(contextFor(db, shop.people.foreman), {
-    buildId: mule.buildId,
-    placementId: mule.placementId,
-    toBayId: shop.bays[2],
-    confirmed: true,
-  });
+  // While it hears nothing another vehicle comes, and this one moves.
   await makeBuild(db, shop.shopId, {
     nickname: "Latecomer",
     code: "WBXK",
@@ -46,6 +40,12 @@ test("the wall says when it is not live, never shows an old level as true, and i
     by,
     bayId: shop.bays[4],
     at: "torque",
+  });
+  await moveVehicle(contextFor(db, shop.people.foreman), {
+    buildId: mule.buildId,
+    placementId: mule.placementId,
+    toBayId: shop.bays[2],
+    confirmed: true,
   });
   await expect(bay(1)).toContainText("was: Layout");
 

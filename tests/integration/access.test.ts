@@ -157,7 +157,7 @@ describe("requests from elsewhere", () => {
       method,
       headers: { cookie: cookies.foreman ?? "" },
     });
-    expect(response.status).toBe(403);
+    expect(response.status).toBe(405);
   });
 
   it("sends the headers that keep a page to itself", async () => {
