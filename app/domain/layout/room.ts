@@ -33,3 +33,29 @@ export function roomInOpening(
     rear: { straight: mm(behind - straight), atLock: mm(behind - lock) },
   };
 }
+
+/** An edge of an opening with its lip's height above the hub at full compression; null where it was not measured. */
+export type LipEdge = { station: Millimetres; lip: Millimetres | null };
+export type LipRoom = Room & {
+  /** False: the tyre's whole radius was taken, so that there is more room than this. */
+  lipMeasured: boolean;
+};
+
+/**
+ * Room to one edge with the lip's height counted: at that height the tyre reaches only as far as its chord. Over the whole
+ * steering sweep, not only at full lock.
+ * @param side 1 for the front edge, −1 for the rear one
+ * @returns null when the tyre stays wholly below the lip
+ * @example roomToLip(mm(0), { station: inches(17), lip: inches(9) }, 1, tyre).straight // 17 − √(17.5² − 9²) = 1.99 in
+ */
+export function roomToLip(axleStation: Millimetres, edge: LipEdge, side: 1 | -1, tyre: Tyre): LipRoom | null {
+  const { lip } = edge;
+  if (lip !== null && lip >= tyre.freeRadius) return null;
+  const chord = mm(lip === null ? tyre.freeRadius : Math.sqrt(tyre.freeRadius ** 2 - lip ** 2));
+  const away = (edge.station - axleStation) * side;
+  return {
+    straight: mm(away - chord),
+    atLock: mm(away - worstReach({ ...tyre, freeRadius: chord })),
+    lipMeasured: lip !== null,
+  };
+}
