@@ -1,5 +1,7 @@
 import { axleLineCalc } from "./axle-line";
 import type { Calc } from "./calc";
+import { dimensionsCalc } from "./dimensions";
+import { drivelineCalc } from "./driveline";
 import { dropsCalc } from "./drops";
 import { fourLinkCalc } from "./four-link";
 import { hardwareCalc } from "./hardware";
@@ -9,7 +11,9 @@ import { levelCalc } from "./level";
 import { loadsCalc } from "./loads";
 import { optionsCalc } from "./options";
 import { shackleCalc } from "./shackle";
+import { steeringCalc } from "./steering";
 import { surveyCalc } from "./survey";
+import { tyreCalc } from "./tyre";
 import { uncertaintyCalc } from "./uncertainty";
 
 /** Every calculation that can be asked for, in the order of the page. */
@@ -22,6 +26,10 @@ export const CALCS = [
   leafPackCalc,
   shackleCalc,
   optionsCalc,
+  dimensionsCalc,
+  tyreCalc,
+  steeringCalc,
+  drivelineCalc,
   fourLinkCalc,
   loadsCalc,
   hardwareCalc,
