@@ -16,6 +16,7 @@ export default [
   route("counter", "routes/counter/counter.tsx"),
   route("counter/book-in", "routes/counter/book-in.tsx"),
   route("builds/:buildId", "routes/builds/build.tsx"),
+  route("builds/:buildId/asked", "routes/builds/asked.tsx"),
   route("builds/:buildId/tag", "routes/builds/tag.tsx"),
   route("builds/:buildId/stage", "routes/resources/set-stage.ts"),
   route("builds/:buildId/layout", "routes/resources/start-layout.ts"),

@@ -24,6 +24,7 @@ export const ACCESS: readonly { path: string; GET?: Need; POST?: Need }[] = [
   { path: "/counter", GET: "counter:see" },
   { path: "/counter/book-in", GET: "builds:book-in", POST: "builds:book-in" },
   { path: "/builds/:buildId", GET: "builds:see" },
+  { path: "/builds/:buildId/asked", GET: "builds:book-in", POST: "builds:book-in" },
   { path: "/builds/:buildId/tag", GET: "tags:print", POST: "tags:print" },
   { path: "/builds/:buildId/stage", POST: "layouts:measure" },
   { path: "/builds/:buildId/layout", POST: "layouts:measure" },

@@ -40,7 +40,12 @@ export async function voidLevel(
     .update(levelChecks)
     .set({ voidedAt: ctx.now(), voidedBy: personId, voidReason: reason.slice(0, 160) })
     .where(and(eq(levelChecks.id, levelCheckId), isNull(levelChecks.voidedAt)));
-  const approvalsVoided = await voidApprovals(tx, ctx, layoutId, `Level void: ${reason}`);
+  const approvalsVoided = await voidApprovals(
+    tx,
+    ctx,
+    layoutId,
+    `the level is void, ${reason.charAt(0).toLowerCase()}${reason.slice(1)}`,
+  );
   note({
     verb: "void-level",
     subject: { kind: "layout", id: layoutId },

@@ -163,3 +163,24 @@ export const bookInForm = (unit: LengthUnit) =>
 export const PROMISE_TIME = "17:00";
 
 export type BookIn = z.output<ReturnType<typeof bookInForm>>;
+
+/**
+ * What was measured and asked for, to be put right later.
+ * @param unit what a bare number on a length field means in this shop
+ */
+export const askedForm = (unit: LengthUnit) =>
+  z
+    .object({
+      wanted: text(2000, "Write down what the customer wants.").min(1, "Write down what the customer wants."),
+      tyre: optionalText(40),
+      loadedRadius: optionalLength(unit, RADIUS),
+      tyreRadius: optionalLength(unit, RADIUS),
+      tyreWidth: optionalLength(unit, TYRE_WIDTH),
+      wheelbase: optionalLength(unit, WHEELBASE),
+      approach,
+    })
+    .refine((form) => !form.loadedRadius || !form.tyreRadius || form.loadedRadius.mm <= form.tyreRadius.mm, {
+      path: ["loadedRadius"],
+      message: "Under load a tyre stands lower: the loaded radius is not more than the tyre's own.",
+    });
+export type Asked = z.output<ReturnType<typeof askedForm>>;

@@ -61,6 +61,8 @@ const placesOf = (form: FormData, name: string) => [
 
 const GAUGE_PLACES: readonly GaugePlace[] = ["leftRail", "rightRail", "frontCross", "rearCross"];
 const MAX_STANDS = 12;
+/** No frame stands on a narrower base than this, mm (common practice, no source). */
+const NARROWEST_STANDS = 250;
 /** What a stand may be called. */
 const PLACE = /^[a-z0-9-]{1,20}$/i;
 
@@ -97,6 +99,14 @@ export function readLevelForm(form: FormData, unit: LengthUnit): FormRead<LevelF
     y: length(form, `y.${place}`, unit, faults),
     height: length(form, `height.${place}`, unit, faults, 3000),
   }));
+  for (const [axis, words] of [
+    ["x", "one behind the other"],
+    ["y", "side by side"],
+  ] as const) {
+    const along = stands.map((stand) => stand[axis].mm);
+    if (!faults.any && Math.max(...along) - Math.min(...along) < NARROWEST_STANDS)
+      faults.add("form", `Stands so close ${words} tell no slope: type where they are.`);
+  }
   for (const stand of stands)
     if (stand.height.mm < 0)
       faults.add(`height.${stand.place}`, "A height is measured up from the level line: no minus.");

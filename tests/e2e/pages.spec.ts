@@ -53,6 +53,13 @@ const PAGES: PageCase[] = [
     says: /Old Mule/,
   },
   {
+    name: "asked",
+    who: "counter",
+    path: async (demo) => `/builds/${await demo.build("Old Mule")}/asked`,
+    sizes: [DESK, PHONE],
+    says: /measured and asked for/,
+  },
+  {
     name: "tag",
     who: "counter",
     path: async (demo) => `/builds/${await demo.build("Old Mule")}/tag`,

@@ -309,7 +309,7 @@ describe("steps stay shut until their ground stands", () => {
     });
     expect(now.approval).toMatchObject({
       state: "void",
-      voided: { reason: "Level void: rolled out to the yard" },
+      voided: { reason: "the level is void, rolled out to the yard" },
     });
     await refused(
       drop("opening-front", "left", "82", "30"),

@@ -1,3 +1,4 @@
+import { Link } from "react-router";
 import type { LengthUnit } from "../../domain/units/length";
 import { asMeasured } from "./as-measured";
 
@@ -11,7 +12,18 @@ export type Asked = {
 };
 
 /** What the customer wants, in their words and in numbers. */
-export function AskedFor({ wanted, asked, unit }: { wanted: string; asked: Asked; unit: LengthUnit }) {
+export function AskedFor({
+  wanted,
+  asked,
+  unit,
+  putRight,
+}: {
+  wanted: string;
+  asked: Asked;
+  unit: LengthUnit;
+  /** Where it is put right; null for those who may not. */
+  putRight: string | null;
+}) {
   const rows: [string, string | null][] = [
     ["Tyres", asked.tyre],
     ["Tyre radius", asMeasured(asked.tyreRadius, unit)],
@@ -23,9 +35,16 @@ export function AskedFor({ wanted, asked, unit }: { wanted: string; asked: Asked
   const given = rows.filter(([, value]) => value !== null);
   return (
     <section aria-labelledby="asked-head" className="grid gap-3">
-      <h2 id="asked-head" className="label">
-        Asked for
-      </h2>
+      <div className="flex items-baseline justify-between gap-4">
+        <h2 id="asked-head" className="label">
+          Asked for
+        </h2>
+        {putRight ? (
+          <Link className="font-medium text-line underline" to={putRight}>
+            Put right
+          </Link>
+        ) : null}
+      </div>
       <p className="whitespace-pre-line text-lg leading-snug">{wanted}</p>
       {given.length > 0 ? (
         <dl className="grid">

@@ -30,7 +30,12 @@ export function BuildPage(props: BuildPageProps) {
           </section>
         </div>
         <div className="grid content-start gap-8">
-          <AskedFor wanted={build.wanted} asked={build.asked} unit={unit} />
+          <AskedFor
+            wanted={build.wanted}
+            asked={build.asked}
+            unit={unit}
+            putRight={props.mayChange ? `/builds/${build.id}/asked` : null}
+          />
           {customer ? <CustomerNote customer={customer} /> : null}
           <Story rows={story} now={now} timeZone={timeZone} />
         </div>

@@ -38,6 +38,7 @@ export type BuildPageProps = {
   bay: BoardBay | null;
   story: StoryRow[];
   mayPrint: boolean;
+  mayChange: boolean;
   mayMeasure: boolean;
   now: string;
   timeZone: string;

@@ -222,3 +222,29 @@ export async function readStory(tx: Reader, shopId: number, buildId: number): Pr
     .limit(STORY_LENGTH);
   return rows.map((row) => ({ id: row.id, at: iso(row.at), by: row.by, words: row.words }));
 }
+
+/** What was measured and asked for, as typed, for the form that puts it right; null when this shop has no such build. */
+export async function readAsked(tx: Reader, shopId: number, buildId: number) {
+  const [row] = await tx
+    .select({ build: builds, nickname: vehicles.nickname, code: tags.code })
+    .from(builds)
+    .innerJoin(vehicles, eq(vehicles.id, builds.vehicleId))
+    .leftJoin(tags, and(eq(tags.vehicleId, vehicles.id), isNull(tags.replacedAt)))
+    .where(and(eq(builds.id, buildId), eq(builds.shopId, shopId)));
+  if (!row) return null;
+  const { build } = row;
+  return {
+    buildId: build.id,
+    nickname: row.nickname,
+    code: row.code ?? "",
+    fields: {
+      wanted: build.wanted,
+      tyre: build.tyreTyped ?? "",
+      loadedRadius: build.loadedRadiusTyped ?? "",
+      tyreRadius: build.tyreRadiusTyped ?? "",
+      tyreWidth: build.tyreWidthTyped ?? "",
+      wheelbase: build.wheelbaseTyped ?? "",
+      approach: build.approachAskedDeg === null ? "" : String(build.approachAskedDeg),
+    },
+  };
+}

@@ -31,7 +31,16 @@ export const STAGE_LABEL: Record<StageKind, string> = {
   "hand-over": "Ready",
 };
 
-const ON_A_LEVEL: readonly StageKind[] = ["level", "layout", "approval", "mock-up", "tack", "weld"];
+const ON_A_LEVEL: readonly StageKind[] = [
+  // Somebody who levels before Strip is ticked off has a level to lose all the same.
+  "strip",
+  "level",
+  "layout",
+  "approval",
+  "mock-up",
+  "tack",
+  "weld",
+];
 
 /** Does work at this stage lean on the level? Once the brackets are welded a moved vehicle loses nothing. */
 export const leansOnLevel = (kind: StageKind): boolean => ON_A_LEVEL.includes(kind);

@@ -55,6 +55,8 @@ export type Option = {
   stands: boolean;
   /** Why not, in words. */
   reasons: string[];
+  /** What was asked for and cannot be told, for want of a reading: "Approach". It fails nothing and proves nothing. */
+  unknown: string[];
 };
 
 export const optionKey = (springId: number, turned: boolean, holeId: number) =>
@@ -104,14 +106,23 @@ function oneOption(input: OptionInput, spring: LeafSpring, turned: boolean, hole
     plusMinus: mm(2 * Math.hypot(sigma.hole, sigma.half)),
     stands: true,
     reasons: [],
+    unknown: [],
   };
+  option.unknown = unknownOf(option, input.constraints ?? {});
   const reasons = reasonsAgainst(option, input);
   return { ...option, reasons, stands: reasons.length === 0 };
 }
 
-function reasonsAgainst(option: Option, { constraints = {}, unit = "in" }: OptionInput): string[] {
+const unknownOf = ({ approach, frontRoom }: Option, { approachAtLeast, noRub }: Constraints): string[] => [
+  ...(approachAtLeast !== undefined && approach === null ? ["Approach"] : []),
+  ...(noRub && frontRoom === null ? ["Room"] : []),
+];
+
+function reasonsAgainst(option: Option, { constraints = {}, opening, unit = "in" }: OptionInput): string[] {
   const reasons: string[] = [];
   const size = (value: number) => formatLength(mm(Math.abs(value)), unit);
+  if (opening && (option.axleStation > opening.front || option.axleStation < opening.rear))
+    reasons.push("The axle would stand outside the wheel opening.");
   const { approachAtLeast, shiftWithin, noRub } = constraints;
   if (approachAtLeast !== undefined && option.approach !== null && option.approach < approachAtLeast)
     reasons.push(

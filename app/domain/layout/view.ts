@@ -95,6 +95,8 @@ export type LookView = {
   firstBy: string;
   first: { typed: string; made: Made } | null;
   looks: { typed: string; made: Made; apart: Millimetres; agrees: boolean }[];
+  /** Readings that a third one set aside, with why. */
+  setAside: { typed: string; made: Made; reason: string }[];
 };
 export type SecondLookView = {
   state: "to-do" | "apart" | "agrees" | "waived";

@@ -41,6 +41,7 @@ export async function loader({ params, context }: Route.LoaderArgs) {
     // A customer's name and number are for the counter, the foreman and the owner.
     customer: may(role, "counter:see") ? customer : null,
     mayPrint: may(role, "tags:print"),
+    mayChange: may(role, "builds:book-in"),
     mayMeasure: may(role, "layouts:measure"),
     shell: await readShell(context, actor),
   };

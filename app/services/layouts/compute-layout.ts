@@ -120,6 +120,8 @@ export function computeGeometry({ head, shop, drops, rack, holes }: Input): Geom
   else if (build.loadedRadiusMm === null)
     missing.push("The tyre's loaded radius was not given at booking in.");
   const tyreKnown = build.tyreRadiusMm !== null && build.tyreWidthMm !== null;
+  if (!tyreKnown)
+    missing.push("The tyre's radius and width were not given at booking in: no room in the opening.");
   result.options = optionTable({
     springs: rack,
     holes: result.holes satisfies HangerHole[],

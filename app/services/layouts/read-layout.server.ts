@@ -206,6 +206,11 @@ function secondLookView({ secondLook, waiver }: LoadedLayout): SecondLookView {
         apart: mm(look.apartMm),
         agrees: look.agrees,
       })),
+      setAside: item.setAside.map(({ look, ...person }) => ({
+        typed: `${look.stationTyped}, ${look.offsetTyped}`,
+        made: made(person, look.takenAt),
+        reason: look.supersededReason ?? "",
+      })),
     })),
     waived: waiver && { made: made(waiver, waiver.waiver.waivedAt), reason: waiver.waiver.reason },
   };

@@ -8,6 +8,8 @@ export type LookItem = Weight & {
   row: DropRow;
   /** Looks held against that reading, oldest first, without those that a third reading set aside. */
   looks: SecondLookRow[];
+  /** Readings of this point that a third one set aside: shown, never lost. */
+  setAside: SecondLookRow[];
   state: "to-do" | "apart" | "agrees";
 };
 export type SecondLook = {
@@ -37,7 +39,8 @@ export function secondLookState(input: {
     if (!row) return [];
     const own = looks.filter(({ look }) => look.againstId === row.reading.id && look.supersededAt === null);
     const state = own.some(({ look }) => look.agrees) ? "agrees" : own.length > 0 ? "apart" : "to-do";
-    return [{ ...weight, row, looks: own, state }];
+    const setAside = looks.filter(({ look }) => look.dropId === row.drop.id && look.supersededAt !== null);
+    return [{ ...weight, row, looks: own, setAside, state }];
   });
   const has = (state: LookItem["state"]) => items.some((item) => item.state === state);
   return {

@@ -147,7 +147,10 @@ function Ground({ view, when }: { view: LayoutView; when: (at: string) => string
     {
       sign: "drop",
       good: kept.length > 0,
-      words: `${kept.length} drops by ${[...new Set(kept.map((drop) => drop.reading?.made.name))].join(", ")}.`,
+      words:
+        kept.length === 0
+          ? "No drop stands."
+          : `${kept.length} drops by ${[...new Set(kept.map((drop) => drop.reading?.made.name))].join(", ")}.`,
     },
   ];
   if (unchecked.length > 0)

@@ -160,7 +160,7 @@ type RowProps = Pick<Props, "view" | "onLook" | "onPin"> & {
 function Row({ view, option, inHand, looked, pinned, onLook, onPin }: RowProps) {
   const ground = inHand ? "bg-brass-wash" : pinned ? "bg-concrete-200" : looked ? "bg-line-wash" : "";
   const faded = option.stands ? "" : "text-concrete-500";
-  const sign = inHand ? "pin" : option.stands ? "finish" : "off";
+  const sign = inHand ? "pin" : !option.stands ? "off" : option.unknown.length > 0 ? "question" : "finish";
   return (
     <>
       <tr className={`border-t border-concrete-200 ${ground} ${faded}`}>
@@ -171,12 +171,18 @@ function Row({ view, option, inHand, looked, pinned, onLook, onPin }: RowProps) 
             aria-pressed={looked}
             onClick={() => onLook(option.key)}
             className="flex min-h-12 w-full items-center gap-3 px-2"
-            aria-label={`Hole ${option.hole.number}, axle line ${formatDecimalInches(option.axleStation)}, ${springHead(option).title}${inHand ? ", in hand" : option.stands ? "" : ", does not stand"}`}
+            aria-label={`Hole ${option.hole.number}, axle line ${formatDecimalInches(option.axleStation)}, ${springHead(option).title}${inHand ? ", in hand" : !option.stands ? ", does not stand" : option.unknown.length > 0 ? `, ${option.unknown.join(" and ").toLowerCase()} not known` : ""}`}
           >
             <Sign
               name={sign}
               size={20}
-              className={inHand ? "text-brass-ink" : option.stands ? "text-moss" : "text-oxide"}
+              className={
+                inHand || (option.stands && option.unknown.length > 0)
+                  ? "text-brass-ink"
+                  : option.stands
+                    ? "text-moss"
+                    : "text-oxide"
+              }
             />
             <b className="font-label text-2xl font-bold">{option.hole.number}</b>
           </button>

@@ -42,7 +42,11 @@ export function OptionsStep({ view, may }: { view: LayoutView; may: May }) {
         detail={view.missing.join(" ")}
       />
     );
-  const stand = options.filter((option) => option.stands).length;
+  const stand = options.filter((option) => option.stands && option.unknown.length === 0).length;
+  const unknown = options.filter((option) => option.stands && option.unknown.length > 0).length;
+  const approachKnown = options.some((option) => option.approach !== null);
+  const after = view.steps.find((step) => step.id === view.next && step.id !== "options") ??
+    view.steps.find((step) => step.id === "second-look") ?? { id: "second-look", label: "Second look" };
   const put = (option: Option) => sending.send(`/layouts/${view.id}/option`, { key: option.key });
   return (
     <div className="grid min-h-0 grid-cols-[minmax(0,1fr)] xl:grid-cols-[minmax(0,1fr)_minmax(26rem,34rem)]">
@@ -52,13 +56,19 @@ export function OptionsStep({ view, may }: { view: LayoutView; may: May }) {
           <span className="font-label font-semibold">Asked for</span>
           <span className="inline-flex min-h-11 items-center gap-2 rounded border border-paint-edge px-3 font-medium">
             <Sign
-              name={view.asked.approachAtLeast === null ? "leave" : "finish"}
+              name={view.asked.approachAtLeast === null ? "leave" : approachKnown ? "finish" : "question"}
               size={18}
-              className={view.asked.approachAtLeast === null ? "text-concrete-500" : "text-moss"}
+              className={
+                view.asked.approachAtLeast === null
+                  ? "text-concrete-500"
+                  : approachKnown
+                    ? "text-moss"
+                    : "text-brass-ink"
+              }
             />
             {view.asked.approachAtLeast === null
               ? "No approach angle asked for"
-              : `Approach ${view.asked.approachAtLeast}° or more`}
+              : `Approach ${view.asked.approachAtLeast}° or more${approachKnown ? "" : ": not known yet"}`}
           </span>
           <label className="inline-flex min-h-11 items-center gap-2 rounded border border-paint-edge px-3 font-medium">
             <input
@@ -70,7 +80,7 @@ export function OptionsStep({ view, may }: { view: LayoutView; may: May }) {
             Only those that stand
           </label>
           <span className="ml-auto font-label font-semibold">
-            {stand} of {options.length} stand
+            {stand} of {options.length} stand{unknown > 0 ? `, ${unknown} not known` : ""}
           </span>
         </div>
         <OptionTable
@@ -92,7 +102,12 @@ export function OptionsStep({ view, may }: { view: LayoutView; may: May }) {
             : ""}
         </p>
         {view.missing.length > 0 ? (
-          <p className="px-4 pb-3 text-sm text-concrete-700">Not known: {view.missing.join(" ")}</p>
+          <p className="px-4 pb-3 text-sm text-concrete-700">
+            Not known: {view.missing.join(" ")}{" "}
+            <Link className="font-medium text-line underline" to={`/builds/${view.vehicle.buildId}/asked`}>
+              Put right what was given at booking in
+            </Link>
+          </p>
         ) : null}
       </section>
       <aside
@@ -144,8 +159,8 @@ export function OptionsStep({ view, may }: { view: LayoutView; may: May }) {
                       : `Put in hand: ${formatDecimalInches(looked.axleStation)}, hole ${looked.hole.number}`}
                   </Button>
                   {chosen ? (
-                    <Link className={buttonClass("plain", "l")} to={`/layouts/${view.id}/step/approval`}>
-                      Go to Approval
+                    <Link className={buttonClass("plain", "l")} to={`/layouts/${view.id}/step/${after.id}`}>
+                      Go to {after.label}
                     </Link>
                   ) : null}
                 </div>

@@ -1,4 +1,4 @@
-import { useRef } from "react";
+import { type RefObject, useEffect, useRef } from "react";
 import { dropPoint } from "../../../domain/layout/drops";
 import type { DropView, LayoutView } from "../../../domain/layout/view";
 import { mm } from "../../../domain/units/length";
@@ -22,6 +22,8 @@ export type HandProps = {
   pad: { padUp: boolean; setPad: (up: boolean) => void };
   field: string | null;
   setField: (name: string | null) => void;
+  /** Set when the drop before was typed on the pad: this one begins in its first field. */
+  goesOn: RefObject<boolean>;
   onRead: (read: EntryRead) => void;
   onKept: () => void;
   onSending: (on: boolean) => void;
@@ -50,6 +52,7 @@ export function DropEntry({
   pad,
   field,
   setField,
+  goesOn,
   onRead,
   onKept,
   onSending,
@@ -66,6 +69,11 @@ export function DropEntry({
   const { keep, busy, refused } = useKeepDrop(view, outbox, drop);
   const root = useRef<HTMLDivElement>(null);
   const fields = fieldsOf(view, drop, method, withHeight);
+  useEffect(() => {
+    if (!goesOn.current) return;
+    goesOn.current = false;
+    root.current?.querySelector("input")?.focus();
+  }, [goesOn]);
   const posted = postedDrop(view, drop, method, draft, withHeight);
   const focusOn = (name: string) =>
     root.current?.querySelector<HTMLInputElement>(`[name="${name}"]`)?.focus();

@@ -1,4 +1,4 @@
-import { useMemo, useState } from "react";
+import { type RefObject, useMemo, useRef, useState } from "react";
 import { Link } from "react-router";
 import type { DropPointId, DropSide } from "../../../domain/layout/drops";
 import type { DropView, LayoutView } from "../../../domain/layout/view";
@@ -29,12 +29,19 @@ export function DropsStep({ view, may, outbox, shut }: Props) {
   const pad = usePad();
   const drop = view.drops.find((one) => sameSpot(one, picked)) ?? null;
   const next = nextSpot(view.drops, outbox.list, redrop && !drop, picked);
+  const goesOn = useRef(false);
   const pick = (spot: Spot | null) => {
+    // Typing on the pad goes on with the next drop: no tap in between.
+    goesOn.current = field !== null && pad.padUp;
     setPicked(spot);
     setAgain(false);
     setField(null);
     setRead(null);
   };
+  const needed =
+    !shut &&
+    !redrop &&
+    view.drops.every((one) => !one.needed || (one.reading?.stands && !one.reading.suspect));
   const typing = field !== null && pad.padUp;
   const preview = useMemo(
     () =>
@@ -56,12 +63,30 @@ export function DropsStep({ view, may, outbox, shut }: Props) {
         />
       </div>
       <section className="drops-hand" aria-label="Drop in hand">
+        {needed && drop ? (
+          <Link to={`/layouts/${view.id}/step/axle-line`} className={buttonClass("go", "l")}>
+            All that is needed is kept: go to Axle line
+          </Link>
+        ) : null}
         {shut ? (
           <ShutStep view={view} step="drops" why={shut} />
         ) : drop && may.measure ? (
           <Hand
             key={subjectOf(drop)}
-            {...{ view, drop, outbox, next, pad, field, setField, again, setAgain, onRead: setRead, pick }}
+            {...{
+              view,
+              drop,
+              outbox,
+              next,
+              pad,
+              field,
+              setField,
+              goesOn,
+              again,
+              setAgain,
+              onRead: setRead,
+              pick,
+            }}
           />
         ) : drop?.reading ? (
           <DropKept view={view} drop={drop} again={null} goOn={null} />
@@ -83,6 +108,7 @@ type HandProps = {
   pad: ReturnType<typeof usePad>;
   field: string | null;
   setField: (name: string | null) => void;
+  goesOn: RefObject<boolean>;
   again: boolean;
   setAgain: (again: boolean) => void;
   onRead: (read: EntryRead) => void;

@@ -149,7 +149,7 @@ function LevelCheck({ view, may, done }: Props) {
         <StandPlaces
           places={places}
           draft={draft}
-          open={heights.missing?.startsWith("Say where") ?? false}
+          openAtFirst={heights.missing?.startsWith("Say where") ?? false}
           readOnly={!may.measure}
           fields={sending.fields}
           change={change}

@@ -1,3 +1,4 @@
+import { useState } from "react";
 import { Button } from "../../../ui/button";
 import { Sign } from "../../../ui/sign";
 import { ReadingField } from "../reading-field";
@@ -7,7 +8,8 @@ import type { Place } from "./heights";
 type Props = {
   places: readonly Place[];
   draft: Draft;
-  open: boolean;
+  /** Whether it stands open when it is first shown; after that only a press opens or shuts it. */
+  openAtFirst: boolean;
   readOnly: boolean;
   fields: Record<string, string>;
   change: (changes: Draft) => void;
@@ -15,7 +17,8 @@ type Props = {
 };
 
 /** Where the stands are under the frame. Remembered from check to check; a slope is only as good as these. */
-export function StandPlaces({ places, draft, open, readOnly, fields, change, addStand }: Props) {
+export function StandPlaces({ places, draft, openAtFirst, readOnly, fields, change, addStand }: Props) {
+  const [open, setOpen] = useState(openAtFirst);
   const shared = (name: "x" | "y", value: string) =>
     change(
       Object.fromEntries(
@@ -25,7 +28,11 @@ export function StandPlaces({ places, draft, open, readOnly, fields, change, add
       ),
     );
   return (
-    <details className="border-t border-concrete-300 bg-chalk" open={open}>
+    <details
+      className="border-t border-concrete-300 bg-chalk"
+      open={open}
+      onToggle={(event) => setOpen(event.currentTarget.open)}
+    >
       <summary className="flex min-h-12 items-center gap-2 px-4 font-semibold">
         <Sign name="stand" size={22} /> Where the stands are
       </summary>
@@ -71,9 +78,14 @@ export function StandPlaces({ places, draft, open, readOnly, fields, change, add
           ))}
         </ul>
         {addStand ? (
-          <Button size="l" className="justify-self-start" onClick={addStand}>
-            Add a stand
-          </Button>
+          <div className="flex flex-wrap gap-3">
+            <Button size="l" onClick={() => setOpen(false)}>
+              Done
+            </Button>
+            <Button size="l" tone="quiet" onClick={addStand}>
+              Add a stand
+            </Button>
+          </div>
         ) : null}
       </div>
     </details>

@@ -1,4 +1,4 @@
-import { Link } from "react-router";
+import { Link, useNavigate } from "react-router";
 import type { LayoutView } from "../../../domain/layout/view";
 import { mm } from "../../../domain/units/length";
 import { buttonClass } from "../../../ui/button";
@@ -21,6 +21,7 @@ export function MarksStep({ view, may, done }: { view: LayoutView; may: May; don
   });
   const sending = usePost(done);
   const pad = usePad();
+  const navigate = useNavigate();
   const [a, b] = ["A", "B"].map((label) => bay.marks.find((mark) => mark.label === label));
   const known = a && b ? mm(Math.hypot(a.x - b.x, a.y - b.y)) : null;
   const typed = lengthIn(draft.taped, unit);
@@ -30,7 +31,9 @@ export function MarksStep({ view, may, done }: { view: LayoutView; may: May; don
   const keep = async () => {
     if (typed === null) return;
     const answer = await sending.send(`/layouts/${view.id}/marks`, { taped: (draft.taped ?? "").trim() });
-    if (answer?.ok) reset(draft);
+    if (!answer?.ok) return;
+    reset(draft);
+    if (fits) void navigate(`/layouts/${view.id}/step/drops`);
   };
   const knownWords = known === null ? "" : withUnit(known, unit);
   return (
@@ -96,7 +99,7 @@ export function MarksStep({ view, may, done }: { view: LayoutView; may: May; don
           onChange={(taped) => change({ taped })}
           onKeep={() => void keep()}
           unit={unit}
-          next="and go on to the drops"
+          next={fits ? "and go on to the drops" : "although it is off"}
           busy={sending.busy}
           {...pad}
         />

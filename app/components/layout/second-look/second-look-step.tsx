@@ -157,6 +157,15 @@ function Readings({ view, item }: { view: LayoutView; item: LookView }) {
             </td>
           </tr>
         ))}
+        {item.setAside.map((look) => (
+          <tr key={look.made.at}>
+            <th scope="row">{look.made.name}</th>
+            <td>
+              <s>{look.typed}</s>
+            </td>
+            <td>set aside: {look.reason}</td>
+          </tr>
+        ))}
       </tbody>
     </table>
   );

@@ -128,11 +128,7 @@ export function LayoutSheet({ view, option, qr, printedAt }: Props) {
           <p>approved {approval ? when(approval.made.at) : ""}</p>
         </div>
         <div className="sheet-signed">
-          <p className="sheet-line" />
-          <p>
-            <b>Second person</b>
-          </p>
-          <p>measured again before welding</p>
+          <SecondPerson view={view} when={when} />
         </div>
       </div>
       <footer className="sheet-cautions">
@@ -195,5 +191,33 @@ function Mark({ n, title, value, within, detail, signed = false }: MarkProps) {
         <p>{detail}</p>
       </div>
     </section>
+  );
+}
+
+/** Who read again what weighs most, or who let it go on without, and why. */
+function SecondPerson({ view, when }: { view: LayoutView; when: (at: string) => string }) {
+  const { waived, items } = view.secondLook;
+  const looks = items.flatMap((item) => item.looks.filter((look) => look.agrees));
+  const last = looks.at(-1);
+  if (waived)
+    return (
+      <>
+        <p className="sheet-line">{waived.made.initials}</p>
+        <p>
+          <b>No second look</b>
+        </p>
+        <p>
+          {waived.made.name}: {waived.reason}
+        </p>
+      </>
+    );
+  return (
+    <>
+      <p className="sheet-line">{last?.made.initials}</p>
+      <p>
+        <b>{last ? [...new Set(looks.map((look) => look.made.name))].join(", ") : "Second person"}</b>
+      </p>
+      <p>{last ? `read again, agrees, ${when(last.made.at)}` : "reads again before welding"}</p>
+    </>
   );
 }

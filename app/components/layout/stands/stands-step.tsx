@@ -1,4 +1,4 @@
-import { Link } from "react-router";
+import { Link, useNavigate } from "react-router";
 import { cautionFor } from "../../../domain/layout/caution";
 import type { LayoutView } from "../../../domain/layout/view";
 import { Button, buttonClass } from "../../../ui/button";
@@ -19,7 +19,12 @@ const TOOLS = [
 /** Before anything is read: the vehicle hangs safe, its weight off the suspension. */
 export function StandsStep({ view, may, done }: { view: LayoutView; may: May; done: () => void }) {
   const { busy, trouble, send } = usePost(done);
+  const navigate = useNavigate();
   const { stands, shop, bay } = view;
+  const standing = async () => {
+    const answer = await send(`/layouts/${view.id}/stands`, {});
+    if (answer?.ok) void navigate(`/layouts/${view.id}/step/level`);
+  };
   return (
     <>
       {stands ? (
@@ -78,7 +83,7 @@ export function StandsStep({ view, may, done }: { view: LayoutView; may: May; do
             Go to Level
           </Link>
         ) : may.measure ? (
-          <Button tone="go" size="xl" busy={busy} onClick={() => void send(`/layouts/${view.id}/stands`, {})}>
+          <Button tone="go" size="xl" busy={busy} onClick={() => void standing()}>
             On stands, wheels chocked
           </Button>
         ) : (
