@@ -179,7 +179,7 @@ test("from booking in to the layout sheet, with the wall showing each change", a
   await tech.goto(`${layout}/step/marks`);
   await tech.getByLabel("Tape from A to B").fill("10'");
   await tech.getByLabel("Tape from A to B").press("Enter");
-  await expect(tech.getByRole("link", { name: "Go to Drops" })).toBeVisible();
+  await expect(tech).toHaveURL(/\/step\/drops$/);
   await tech.goto(`${layout}/step/drops`);
   await dropPoint(tech, "Opening, front edge, left", { "Ahead of A": "82 3/8", "Off the line": "30 1/4" });
   await dropPoint(tech, "Opening, front edge, right", {
