@@ -22,6 +22,8 @@ export function factsOf(view: LayoutView): StepFacts {
     optionChosen: view.choice !== null && !view.choice.changed,
     secondLook: view.secondLook.state,
     approval: view.approval?.state ?? "none",
+    tack: view.tack.state,
+    work: view.work.progress,
   };
 }
 
@@ -34,8 +36,5 @@ export function wayBack(view: LayoutView, step: StepId): { id: StepId; label: st
     0,
     view.steps.findIndex((one) => one.id === step),
   );
-  return (
-    before.find((one) => one.state !== "done" && one.state !== "later" && whyShutIn(view, one.id) === null) ??
-    null
-  );
+  return before.find((one) => one.state !== "done" && whyShutIn(view, one.id) === null) ?? null;
 }

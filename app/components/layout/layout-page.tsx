@@ -1,6 +1,7 @@
 import { type ReactNode, useEffect, useRef, useState } from "react";
 import type { StepId } from "../../domain/layout/steps";
 import type { LayoutView } from "../../domain/layout/view";
+import { workLine } from "../../domain/layout/work-list";
 import type { LiveStatus } from "../../realtime/live-status";
 import { useNow } from "../wall/use-now";
 import { ApprovalStep } from "./choose/approval-step";
@@ -16,7 +17,10 @@ import { SecondLookStep } from "./second-look/second-look-step";
 import { ShutStep } from "./shut-step";
 import { StandsStep } from "./stands/stands-step";
 import { StepsRail } from "./steps-rail";
+import { TackStep } from "./tack/tack-step";
 import { useUnsent } from "./use-unsent";
+import { FinishStep } from "./work/finish-step";
+import { WeldStep } from "./work/weld-step";
 import "./layout.css";
 import "./reading.css";
 import "./level/level.css";
@@ -59,7 +63,7 @@ export function LayoutPage({ view, step, may, person, servedAt, live, refresh }:
   );
 }
 
-const NOTHING: May = { measure: false, approve: false };
+const NOTHING: May = { measure: false, approve: false, whyNoWeld: null };
 
 type StepProps = Pick<Props, "view" | "step" | "may" | "person" | "refresh"> & { shut: boolean };
 
@@ -80,10 +84,23 @@ function stepIn({ view, step, may, person, shut, refresh }: StepProps): ReactNod
       return shut ? null : <SecondLookStep view={view} may={may} person={person} done={refresh} />;
     case "approval":
       return shut && !view.approval ? null : <ApprovalStep view={view} may={may} />;
+    case "tack":
+      return shut && view.tack.checks.length === 0 ? null : <TackStep view={view} may={may} done={refresh} />;
+    case "weld":
+      return shut && nothingSigned(view, "weld") ? null : (
+        <WeldStep view={view} may={may} person={person} done={refresh} />
+      );
+    case "finish":
+      return shut && nothingSigned(view, "finish") ? null : (
+        <FinishStep view={view} may={may} person={person} done={refresh} />
+      );
     default:
       return null;
   }
 }
+
+const nothingSigned = ({ work }: LayoutView, step: "weld" | "finish") =>
+  !Object.keys(work.signed).some((id) => workLine(id)?.step === step);
 
 /** Says it at once, to those who listen, when a level that stood is void: on this tablet or by somebody else. */
 function LevelNews({ view }: { view: LayoutView }) {

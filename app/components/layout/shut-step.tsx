@@ -13,8 +13,8 @@ export function ShutStep({ view, step, why }: { view: LayoutView; step: StepId; 
   return (
     <section aria-label={`${state?.label ?? "Step"} is shut`}>
       <Verdict
-        tone={isVoid ? "void" : state?.state === "later" ? "empty" : "waiting"}
-        sign={isVoid ? "void" : state?.state === "later" ? "plan" : "lock"}
+        tone={isVoid ? "void" : "waiting"}
+        sign={isVoid ? "void" : "lock"}
         title={why}
         detail={
           state?.state === "void"
