@@ -342,7 +342,7 @@ describe("the torque list and the finish", () => {
     });
     await sign("u-bolts.left", { ...TYPED.torque, due: "2099-02-03" }, tech());
     expect((await view()).work.signed["u-bolts.left"]).toMatchObject([
-      { wanted: "110 ft lb", read: "112 ft lb", tool: "Wrench 4", dueAt: "2099-02-03T12:00:00.000Z" },
+      { wanted: "110 ft lb", read: "112 ft lb", tool: "Wrench 4", dueAt: "2099-02-03T23:59:00.000Z" },
     ]);
   });
 
@@ -365,6 +365,8 @@ describe("the torque list and the finish", () => {
       fields: { "figure.toe": expect.any(String) },
     });
     await sign("alignment", { "figure.toe": "0.12", "figure.camber-left": "-0.5" }, tech());
+    await sign("alignment", { "figure.toe": "0.12", "figure.camber-left": "-0.5" }, tech());
+    expect((await view()).work.signed.alignment).toHaveLength(1);
     await sign("road-test", {}, tech());
     await sign("re-torque", {}, tech());
     expect((await stages()).get("road-test")?.state).toBe("under-way");

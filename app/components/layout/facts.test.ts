@@ -93,6 +93,10 @@ describe("what a layout's steps depend on", () => {
     });
     const rolledOut = { standsInBay: false, approval, tack, marks: { made } as LayoutView["marks"] };
     expect(whyShutIn(view({ ...rolledOut, work: work(9) }), "weld")).toContain("the vehicle is not in Bay 5");
-    expect(whyShutIn(view({ ...rolledOut, work: work(10) }), "weld")).toBeNull();
+    const welded = view({ ...rolledOut, work: work(10) });
+    expect(whyShutIn(welded, "weld")).toBeNull();
+    expect(whyShutIn(welded, "finish")).toContain("Weld and torque first");
+    expect(wayBack(welded, "finish")?.id).toBe("weld");
+    expect(wayBack(view({ ...rolledOut, work: work(9) }), "finish")?.id).toBe("level");
   });
 });

@@ -1,5 +1,5 @@
 import { type ReactNode, useEffect, useRef, useState } from "react";
-import type { StepId } from "../../domain/layout/steps";
+import { isWelded, type StepId } from "../../domain/layout/steps";
 import type { LayoutView } from "../../domain/layout/view";
 import { workLine } from "../../domain/layout/work-list";
 import type { LiveStatus } from "../../realtime/live-status";
@@ -8,7 +8,7 @@ import { ApprovalStep } from "./choose/approval-step";
 import { AxleLineStep } from "./choose/axle-line-step";
 import { OptionsStep } from "./choose/options-step";
 import { DropsStep } from "./drops/drops-step";
-import { whyShutIn } from "./facts";
+import { factsOf, whyShutIn } from "./facts";
 import { LayoutHead } from "./layout-head";
 import { LevelStep } from "./level/level-step";
 import { MarksStep } from "./marks/marks-step";
@@ -85,14 +85,16 @@ function stepIn({ view, step, may, person, shut, refresh }: StepProps): ReactNod
     case "approval":
       return shut && !view.approval ? null : <ApprovalStep view={view} may={may} />;
     case "tack":
-      return shut && view.tack.checks.length === 0 ? null : <TackStep view={view} may={may} done={refresh} />;
+      return shut && view.tack.checks.length === 0 ? null : (
+        <TackStep view={view} may={may} shut={shut} done={refresh} />
+      );
     case "weld":
       return shut && nothingSigned(view, "weld") ? null : (
-        <WeldStep view={view} may={may} person={person} done={refresh} />
+        <WeldStep view={view} may={may} person={person} shut={shut} done={refresh} />
       );
     case "finish":
       return shut && nothingSigned(view, "finish") ? null : (
-        <FinishStep view={view} may={may} person={person} done={refresh} />
+        <FinishStep view={view} may={may} person={person} shut={shut} done={refresh} />
       );
     default:
       return null;
@@ -104,7 +106,8 @@ const nothingSigned = ({ work }: LayoutView, step: "weld" | "finish") =>
 
 /** Says it at once, to those who listen, when a level that stood is void: on this tablet or by somebody else. */
 function LevelNews({ view }: { view: LayoutView }) {
-  const state = view.standsInBay ? (view.level?.state ?? "none") : "void";
+  const welded = isWelded(factsOf(view));
+  const state = welded ? "none" : view.standsInBay ? (view.level?.state ?? "none") : "void";
   const before = useRef(state);
   const [news, setNews] = useState("");
   const reason = view.standsInBay

@@ -52,7 +52,7 @@ export type StepState = {
   note: string;
 };
 
-const AFTER_APPROVAL: readonly StepId[] = ["tack", "weld", "finish"];
+export const AFTER_APPROVAL: readonly StepId[] = ["tack", "weld", "finish"];
 
 /** Every bracket is welded and signed: from here on a moved vehicle loses nothing. */
 export const isWelded = (facts: StepFacts): boolean => facts.tack === "passes" && isWhole(facts.work.weld);

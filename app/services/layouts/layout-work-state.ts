@@ -43,3 +43,15 @@ export function layoutWork(input: {
     },
   };
 }
+
+/** The alignment figures that were typed with a signature. */
+export const figuresUnder = (
+  items: readonly WorkItemRow[],
+  line: WorkItemRow["item"],
+): { id: string; typed: string }[] =>
+  items
+    .filter(
+      ({ item }) =>
+        item.item.startsWith(`${line.item}.`) && item.signedAt.getTime() === line.signedAt.getTime(),
+    )
+    .map(({ item }) => ({ id: item.item.slice(line.item.length + 1), typed: item.readTyped }));

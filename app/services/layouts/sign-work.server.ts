@@ -17,6 +17,7 @@ import type { WorkForm } from "../../validation/layout-work";
 import { type Context, change } from "../change.server";
 import { Refusal } from "../errors";
 import { advanceStages } from "./advance-stages.server";
+import { figuresUnder } from "./layout-work-state";
 import { showPieces } from "./show-pieces.server";
 import { layoutTouches, measurer, openStep } from "./step-guard.server";
 import { whyNoWeld } from "./weld-skill.server";
@@ -48,13 +49,12 @@ export async function signWork(
     const early = entry.state === "pass" ? whyNotYet(line, work.states) : null;
     if (early) throw new Refusal("conflict", early);
     const faults = entryFaults(line, entry);
-    const dueAt =
-      due && new Date(new TZDate(due.year, due.month - 1, due.day, 12, 0, shop.timeZone).getTime());
+    const dueAt = due && endOfDay(due, shop.timeZone);
     if (dueAt && dueAt < ctx.now()) faults.due ??= "That day has gone: when is it torqued again?";
     const [first] = Object.values(faults);
     if (first) throw new Refusal("invalid", first, faults);
     const before = work.items.filter(({ item }) => item.item === line.id).at(-1) ?? null;
-    if (before && isSame(before, actor.personId, entry)) return { words: "Signed already." };
+    if (before && isSame(before, work.items, actor.personId, entry)) return { words: "Signed already." };
 
     await tx.insert(workItems).values(
       rowsOf(line, entry).map((row, position) => ({
@@ -88,6 +88,10 @@ export async function signWork(
   });
 }
 
+/** A day ends when it ends in the shop. */
+const endOfDay = ({ year, month, day }: NonNullable<WorkForm["due"]>, timeZone: string): Date =>
+  new Date(new TZDate(year, month - 1, day, 23, 59, timeZone).getTime());
+
 async function guardWelder(tx: Tx, ctx: Context, actor: PersonActor, line: WorkLine): Promise<void> {
   if (line.list !== "weld") return;
   const why = await whyNoWeld(tx, actor, ctx.now());
@@ -108,14 +112,19 @@ const rowsOf = (line: WorkLine, { wanted, read, tool, words, figures }: WorkEntr
     : []),
 ];
 
-const isSame = ({ item }: WorkItemRow, personId: number, entry: WorkEntry): boolean =>
+const isSame = (
+  { item }: WorkItemRow,
+  items: readonly WorkItemRow[],
+  personId: number,
+  entry: WorkEntry,
+): boolean =>
   item.signedBy === personId &&
   item.state === entry.state &&
   item.wantedTyped === entry.wanted &&
   item.readTyped === entry.read &&
   item.tool === entry.tool &&
   item.words === entry.words &&
-  entry.figures.length === 0;
+  JSON.stringify(figuresUnder(items, item)) === JSON.stringify(entry.figures);
 
 function signedWords(line: WorkLine, { wanted, read, figures }: WorkEntry): string {
   if (line.kind === "bolt") return `${read} of ${wanted}`;

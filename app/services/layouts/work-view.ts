@@ -5,6 +5,7 @@ import { workLine } from "../../domain/layout/work-list";
 import { mm } from "../../domain/units/length";
 import { TackFigures } from "../../validation/layout-work";
 import type { LoadedLayout } from "./layout-state.server";
+import { figuresUnder } from "./layout-work-state";
 
 export const made = (person: { name: string; initials: string } | null, at: Date): Made => ({
   name: person?.name ?? "",
@@ -58,13 +59,3 @@ export function workView({ work }: LoadedLayout): WorkView {
   }
   return { progress: work.work, signed };
 }
-
-type Items = LoadedLayout["work"]["items"];
-
-const figuresUnder = (items: Items, line: Items[number]["item"]): SignatureView["figures"] =>
-  items
-    .filter(
-      ({ item }) =>
-        item.item.startsWith(`${line.item}.`) && item.signedAt.getTime() === line.signedAt.getTime(),
-    )
-    .map(({ item }) => ({ id: item.item.slice(line.item.length + 1), typed: item.readTyped }));

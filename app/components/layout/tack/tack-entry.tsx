@@ -91,7 +91,7 @@ export function TackEntry({ view, draft, change, problem, kept }: Props) {
       </Button>
       {held && pad.padUp ? (
         <EntryDock
-          what={`${held.end}: ${held.what.toLowerCase()}`}
+          what={`${held.end}: ${small(held.what)}`}
           hint={held.hint}
           value={draft[held.name] ?? ""}
           onChange={(value) => change({ [held.name]: value })}
@@ -106,5 +106,8 @@ export function TackEntry({ view, draft, change, problem, kept }: Props) {
   );
 }
 
+/** Within a sentence; mark A keeps its capital. */
+const small = (words: string): string => words.charAt(0).toLowerCase() + words.slice(1);
+
 const nextWords = (to: (typeof FIELDS)[number] | null): string =>
-  to ? `and go to ${to.end.toLowerCase()}, ${to.what.toLowerCase()}` : "and keep the check";
+  to ? `and go to ${small(to.end)}, ${small(to.what)}` : "and keep the check";

@@ -19,20 +19,22 @@ import "./tack.css";
 
 const EMPTY = { leftStation: "", leftOffset: "", rightStation: "", rightOffset: "" };
 
+type Props = { view: LayoutView; may: May; shut: boolean; done: () => void };
+
 /** The axle as it was tacked: both ends read again, held against the line that was signed, before anything is welded. */
-export function TackStep({ view, may, done }: { view: LayoutView; may: May; done: () => void }) {
+export function TackStep({ view, may, shut, done }: Props) {
   const { draft, change, reset } = useDraft(`plumbay.layout.${view.id}.tack`, EMPTY);
   const [said, setSaid] = useState("");
   const typed = typedCheck(view, draft);
   const [again, setAgain] = useState(false);
   const welded = isWelded(factsOf(view));
   const begun = Object.values(draft).some((text) => text !== "");
-  const settled = view.tack.state === "passes" && !again && !begun;
+  const settled = !shut && view.tack.state === "passes" && !again && !begun;
   const newest = view.tack.checks.find((check) => check.counts) ?? null;
   const shown = typed?.ok ? typed.value.built : newest;
   return (
     <>
-      <TackVerdict view={view} typed={typed} />
+      {shut ? null : <TackVerdict view={view} typed={typed} />}
       <p role="status" className="sr-only">
         {said}
       </p>

@@ -6,14 +6,14 @@ import type { May } from "../may";
 import { failedLines, statesIn } from "./signed";
 import { WorkDesk } from "./work-desk";
 
-type Props = { view: LayoutView; may: May; person: string; done: () => void };
+type Props = { view: LayoutView; may: May; person: string; shut: boolean; done: () => void };
 
 /** Alignment, the road, torque again, and the last signature. */
-export function FinishStep({ view, may, person, done }: Props) {
+export function FinishStep({ view, may, person, shut, done }: Props) {
   const due = nextDue(view);
   return (
     <>
-      <FinishVerdict view={view} />
+      {shut ? null : <FinishVerdict view={view} />}
       <WorkDesk
         view={view}
         may={may}

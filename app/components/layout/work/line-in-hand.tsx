@@ -24,8 +24,8 @@ export function LineInHand({ view, line, may, person, states, done, signed }: Pr
   const early = states.get(line.id) === "pass" ? null : whyNotYet(line, states);
   const why = may.measure ? (noWeld ?? early) : null;
   return (
-    <section className="work-line" aria-label="Line in hand" aria-live="polite">
-      <h2>{line.label}</h2>
+    <section className="work-line" aria-label="Line in hand">
+      <h2 tabIndex={-1}>{line.label}</h2>
       {line.kind === "ready" ? (
         <ul className="grid gap-2">
           {BEFORE_WELDING.map((words) => (

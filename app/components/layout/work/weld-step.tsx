@@ -5,20 +5,25 @@ import type { May } from "../may";
 import { failedLines, statesIn } from "./signed";
 import { WorkDesk } from "./work-desk";
 
-type Props = { view: LayoutView; may: May; person: string; done: () => void };
+type Props = { view: LayoutView; may: May; person: string; shut: boolean; done: () => void };
+
+const AT_WELD = "Heat pulls: short runs from side to side keep the axle where it was checked.";
+const AT_TORQUE =
+  "Torque with the bushings at ride height: clamped at droop they tear once it stands on its wheels. The torque is the parts maker's, typed from their paper.";
 
 /** Every bracket signed by a welder, then every bolt by whoever torqued it, then what has to be free to move. */
-export function WeldStep({ view, may, person, done }: Props) {
+export function WeldStep({ view, may, person, shut, done }: Props) {
+  const welded = isWhole(view.work.progress.weld);
   return (
     <>
-      <WeldVerdict view={view} />
+      {shut ? null : <WeldVerdict view={view} />}
       <WorkDesk
         view={view}
         may={may}
         person={person}
         done={done}
-        lists={["weld", "torque"]}
-        caution="Torque with the bushings at ride height: clamped at droop they tear once it stands on its wheels. The torque is the parts maker's, typed from their paper."
+        lists={welded ? ["torque", "weld"] : ["weld", "torque"]}
+        caution={welded ? AT_TORQUE : AT_WELD}
         next={{ to: "finish", label: "Go to Finish" }}
       />
     </>

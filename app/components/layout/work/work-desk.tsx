@@ -1,4 +1,4 @@
-import { useState } from "react";
+import { useEffect, useRef, useState } from "react";
 import { Link } from "react-router";
 import type { LayoutView } from "../../../domain/layout/view";
 import { nextLine, type WorkListId, workLine } from "../../../domain/layout/work-list";
@@ -22,13 +22,23 @@ type Props = {
 
 /** The lists, and one line in hand: the next that is not signed, unless another is picked. */
 export function WorkDesk({ view, may, person, done, lists, caution, next }: Props) {
-  const [picked, setPicked] = useState<string | null>(null);
+  const [picked, setPicked] = useState<{ id: string } | null>(null);
+  const hand = useRef<HTMLDivElement>(null);
+  const follow = useRef(false);
   const states = statesIn(view);
   const open = lists.map((list) => nextLine(list, states)).find((line) => line !== null) ?? null;
-  const inHand = (picked === null ? null : workLine(picked)) ?? open;
+  const inHand = (picked && workLine(picked.id)) ?? (may.measure ? open : null);
+  const heldId = inHand?.id ?? null;
+  // Who picked or signed a line goes on at the next: it comes into sight, and the keyboard stands there.
+  // biome-ignore lint/correctness/useExhaustiveDependencies: a line picked twice is brought into sight twice
+  useEffect(() => {
+    if (!follow.current) return;
+    follow.current = false;
+    hand.current?.querySelector("h2")?.focus();
+  }, [heldId, picked]);
   return (
     <div className="work-desk">
-      <div className="work-hand">
+      <div className="work-hand" ref={hand}>
         {inHand ? (
           <LineInHand
             key={inHand.id}
@@ -38,7 +48,10 @@ export function WorkDesk({ view, may, person, done, lists, caution, next }: Prop
             person={person}
             states={states}
             done={done}
-            signed={() => setPicked(null)}
+            signed={() => {
+              follow.current = true;
+              setPicked(null);
+            }}
           />
         ) : null}
         {open === null && next ? (
@@ -53,7 +66,16 @@ export function WorkDesk({ view, may, person, done, lists, caution, next }: Prop
       </div>
       <div className="grid content-start gap-5">
         {lists.map((list) => (
-          <WorkRows key={list} view={view} list={list} inHand={inHand?.id ?? null} onPick={setPicked} />
+          <WorkRows
+            key={list}
+            view={view}
+            list={list}
+            inHand={heldId}
+            onPick={(id) => {
+              follow.current = true;
+              setPicked({ id });
+            }}
+          />
         ))}
       </div>
     </div>
