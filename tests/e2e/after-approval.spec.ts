@@ -1,3 +1,4 @@
+import AxeBuilder from "@axe-core/playwright";
 import type { Page } from "@playwright/test";
 import { makeBuild, type TestShop } from "#tests/factories";
 import { readOnFloor, signedLayout } from "#tests/factories/signed-layout";
@@ -35,12 +36,30 @@ async function typeEnds(page: Page, left: number, right: number) {
     await fields.getByLabel(/^Off the line/).fill(read.offset.typed);
   }
 }
+/** A state that only the job itself brings about, looked at as pages.spec.ts looks at pages; phone width too. */
+async function looksRight(page: Page, name: string) {
+  const size = page.viewportSize();
+  for (const width of [size?.width ?? 768, 390]) {
+    await page.setViewportSize({ width, height: size?.height ?? 1024 });
+    const { violations } = await new AxeBuilder({ page }).analyze();
+    const serious = violations.filter(({ impact }) => impact === "serious" || impact === "critical");
+    expect
+      .soft(
+        serious.map(({ id }) => id),
+        `${name} at ${width}: axe`,
+      )
+      .toEqual([]);
+    const spill = await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth);
+    expect.soft(spill, `${name} at ${width}: spills out sideways`).toBeLessThanOrEqual(1);
+  }
+  if (size) await page.setViewportSize(size);
+}
 const hand = (page: Page) => page.getByRole("region", { name: "Line in hand" });
 const headed = (page: Page, label: string) =>
   expect(hand(page).getByRole("heading", { name: label })).toBeVisible();
 
 test("tacked out of square, moved, welded by who may, torqued, finished", async ({ as, db, shop }) => {
-  test.setTimeout(120_000);
+  test.setTimeout(180_000);
   const layout = await signedMule(db, shop);
   const tech = await as(shop.people.tech, { viewport: { width: 768, height: 1024 } });
 
@@ -56,6 +75,7 @@ test("tacked out of square, moved, welded by who may, torqued, finished", async 
   await expect(
     tech.getByRole("img", { name: "Left end 3/16 in back, right end on the line." }),
   ).toBeVisible();
+  await looksRight(tech, "tack out of true");
   await tech.getByRole("button", { name: "Keep this check" }).click();
   const checks = tech.getByRole("region", { name: "Checks" }).getByRole("listitem");
   await expect(checks).toHaveCount(1);
@@ -78,6 +98,7 @@ test("tacked out of square, moved, welded by who may, torqued, finished", async 
   const welder = await as(shop.people.welder, { viewport: { width: 1024, height: 768 } });
   await welder.goto(`${layout}/step/weld`);
   await expect(hand(welder)).toContainText("fire watch");
+  await looksRight(welder, "cautions");
   await hand(welder)
     .getByRole("button", { name: /^Ready: sign/ })
     .click();
@@ -99,6 +120,7 @@ test("tacked out of square, moved, welded by who may, torqued, finished", async 
   await hand(welder).getByRole("button", { name: "Not good" }).click();
   await expect(welder.getByText("Not good: Spring hanger, right: undercut.")).toBeVisible();
   await expect(tech.getByText("Not good: Spring hanger, right: undercut.")).toBeVisible();
+  await looksRight(welder, "a line that failed");
   for (const { label } of linesOf("weld").slice(2)) {
     await headed(welder, label);
     await hand(welder)
@@ -121,6 +143,7 @@ test("tacked out of square, moved, welded by who may, torqued, finished", async 
           .click();
         await expect(hand(tech)).toContainText("Under the 110 ft lb that is asked for");
         await expect(hand(tech).getByLabel("Asked for")).toHaveValue("110 ft lb");
+        await looksRight(tech, "a bolt under its torque");
       }
       await hand(tech).getByLabel("Read").fill("112");
     }
@@ -134,6 +157,7 @@ test("tacked out of square, moved, welded by who may, torqued, finished", async 
 
   // Alignment, the road, torque again, signed off.
   await expect(tech.getByText(/To be torqued again by Mon 2 Mar/)).toBeVisible();
+  await looksRight(tech, "alignment");
   await hand(tech).getByLabel("Toe, both together, °").fill("0.12");
   await hand(tech)
     .getByRole("button", { name: /: sign/ })
