@@ -37,6 +37,8 @@ export default [
   route("layouts/:layoutId/look", "routes/resources/layout/look.ts"),
   route("layouts/:layoutId/waive-look", "routes/resources/layout/waive-look.ts"),
   route("layouts/:layoutId/approve", "routes/resources/layout/approve.ts"),
+  route("layouts/:layoutId/tack", "routes/resources/layout/tack.ts"),
+  route("layouts/:layoutId/work", "routes/resources/layout/work.ts"),
 
   route("springs", "routes/springs/springs.tsx"),
   route("setup", "routes/setup/setup.tsx"),

@@ -45,6 +45,8 @@ export const ACCESS: readonly { path: string; GET?: Need; POST?: Need }[] = [
   { path: "/layouts/:layoutId/look", POST: "layouts:measure" },
   { path: "/layouts/:layoutId/waive-look", POST: "options:approve" },
   { path: "/layouts/:layoutId/approve", POST: "options:approve" },
+  { path: "/layouts/:layoutId/tack", POST: "layouts:measure" },
+  { path: "/layouts/:layoutId/work", POST: "layouts:measure" },
 
   { path: "/springs", GET: "springs:see", POST: "springs:edit" },
   { path: "/setup", GET: "setup:see", POST: "setup:edit" },

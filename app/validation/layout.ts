@@ -17,7 +17,7 @@ export type FormRead<T> = { ok: true; value: T } | { ok: false; fields: Fields }
 
 const MAX_TYPED = 40;
 
-class Faults {
+export class Faults {
   readonly fields: Fields = {};
   add(name: string, words: string) {
     this.fields[name] ??= words;
@@ -28,7 +28,7 @@ class Faults {
 }
 
 /** Reads one length; a fault is added and 0 answered when it cannot be. */
-function length(form: FormData, name: string, unit: LengthUnit, faults: Faults, most = 20_000): Typed {
+export function length(form: FormData, name: string, unit: LengthUnit, faults: Faults, most = 20_000): Typed {
   const typed = String(form.get(name) ?? "").trim();
   const read =
     typed.length > MAX_TYPED
@@ -122,7 +122,7 @@ export function readMarksForm(form: FormData, unit: LengthUnit): FormRead<Typed>
   return faults.any ? { ok: false, fields: faults.fields } : { ok: true, value: taped };
 }
 
-const UUID = /^[0-9a-f]{8}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{12}$/i;
+export const UUID = /^[0-9a-f]{8}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{4}-[0-9a-f]{12}$/i;
 
 export type DropForm = {
   point: DropPointId;

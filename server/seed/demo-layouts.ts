@@ -3,6 +3,7 @@ import { floorPoint, framePoint } from "../../app/domain/geometry/point";
 import type { DropPointId, DropSide } from "../../app/domain/layout/drops";
 import { frameFromDatums, toFloor } from "../../app/domain/layout/frame";
 import { optionKey } from "../../app/domain/layout/options";
+import { workLine } from "../../app/domain/layout/work-list";
 import type { Role } from "../../app/domain/people/roles";
 import { formatInches, inches, type Millimetres, mm, parseLength } from "../../app/domain/units/length";
 import type { Context } from "../../app/services/change.server";
@@ -13,6 +14,8 @@ import { chooseAxleLine } from "../../app/services/layouts/choose-axle-line.serv
 import { chooseOption } from "../../app/services/layouts/choose-option.server";
 import { confirmMarks } from "../../app/services/layouts/confirm-marks.server";
 import { keepDrop } from "../../app/services/layouts/keep-drop.server";
+import { keepTackCheck } from "../../app/services/layouts/keep-tack-check.server";
+import { signWork } from "../../app/services/layouts/sign-work.server";
 import { startLayout } from "../../app/services/layouts/start-layout.server";
 import { takeSecondLook } from "../../app/services/layouts/take-second-look.server";
 import { voidLevelByHand } from "../../app/services/layouts/void-level-by-hand.server";
@@ -172,4 +175,38 @@ export async function demoLayouts(input: DemoLayoutsInput): Promise<void> {
   await chooseOption(ida(960), hatchet, optionKey(spring(14), false, hole(3)));
   await lookAgain(as("bram", "Bram Oduya", "tech", 920), hatchet);
   await approveOption(ida(900), hatchet, null);
+  await tackAndWeld(
+    (minutesAgo) => as("bram", "Bram Oduya", "tech", minutesAgo),
+    hatchet,
+    (minutesAgo) => as("cato", "Cato Reyes", "tech", minutesAgo),
+  );
+}
+
+type By = (minutesAgo: number) => Context;
+
+/** Both ends read after tacking, the left one moved a little, and the first four brackets welded. */
+async function tackAndWeld(bram: By, layoutId: number, cato: By) {
+  const check = (who: Context, left: number, right: number) => {
+    const [l, r] = [onFrame("axle-end", "left", left, 30), onFrame("axle-end", "right", right, -30)];
+    return keepTackCheck(who, layoutId, {
+      left: { station: length(l.station), offset: length(l.offset) },
+      right: { station: length(r.station), offset: length(r.offset) },
+      sheet: null,
+      clientKey: crypto.randomUUID(),
+    });
+  };
+  await check(bram(260), 46.5 - 1 / 4, 46.5);
+  await check(bram(215), 46.5, 46.5);
+  const sign = (who: Context, id: string, tool = "") => {
+    const line = workLine(id);
+    if (!line) throw new Error(`The weld list has no ${id}`);
+    const entry = { state: "pass" as const, wanted: "", read: "", tool, words: "", figures: [] };
+    return signWork(who, layoutId, { line, entry, due: null });
+  };
+  const card = "Card 12, fillet and groove, all positions";
+  await sign(bram(158), "ready");
+  await sign(bram(139), "hanger.left", card);
+  await sign(bram(118), "hanger.right", card);
+  await sign(cato(74), "shackle-hanger.left", card);
+  await sign(cato(37), "shackle-hanger.right", card);
 }

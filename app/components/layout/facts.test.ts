@@ -22,6 +22,12 @@ const level = (over: Partial<LevelView> = {}): LevelView => ({
   ...over,
 });
 
+const NONE_SIGNED = {
+  weld: { done: 0, of: 10, failed: 0 },
+  torque: { done: 0, of: 10, failed: 0 },
+  finish: { done: 0, of: 4, failed: 0 },
+};
+
 function view(over: Partial<LayoutView>): LayoutView {
   const drops = DROP_POINTS.flatMap((point) =>
     point.sides.map((side) => ({
@@ -45,6 +51,8 @@ function view(over: Partial<LayoutView>): LayoutView {
     choice: null,
     secondLook: { state: "to-do", within: 3, items: [], waived: null },
     approval: null,
+    tack: { state: "none", within: 3.175, wanted: null, checks: [] },
+    work: { progress: NONE_SIGNED, signed: {} },
     steps: [],
     ...over,
   };
@@ -69,5 +77,26 @@ describe("what a layout's steps depend on", () => {
     expect(wayBack(view({ stands: null, level: null }), "drops")?.id).toBe("stands");
     expect(wayBack(view({}), "drops")?.id).toBe("marks");
     expect(whyShutIn(view({}), "marks")).toBeNull();
+  });
+
+  it("goes on in another bay once all is welded, and not before", () => {
+    const approval = { state: "approved", sheetRevision: 1, made, voided: null } as const;
+    const tack = {
+      state: "passes",
+      within: 3.175,
+      wanted: null,
+      checks: [],
+    } as unknown as LayoutView["tack"];
+    const work = (done: number) => ({
+      progress: { ...NONE_SIGNED, weld: { done, of: 10, failed: 0 } },
+      signed: {},
+    });
+    const rolledOut = { standsInBay: false, approval, tack, marks: { made } as LayoutView["marks"] };
+    expect(whyShutIn(view({ ...rolledOut, work: work(9) }), "weld")).toContain("the vehicle is not in Bay 5");
+    const welded = view({ ...rolledOut, work: work(10) });
+    expect(whyShutIn(welded, "weld")).toBeNull();
+    expect(whyShutIn(welded, "finish")).toContain("Weld and torque first");
+    expect(wayBack(welded, "finish")?.id).toBe("weld");
+    expect(wayBack(view({ ...rolledOut, work: work(9) }), "finish")?.id).toBe("level");
   });
 });

@@ -1,4 +1,4 @@
-import { type StepFacts, type StepId, whyShut } from "../../domain/layout/steps";
+import { AFTER_APPROVAL, isWelded, type StepFacts, type StepId, whyShut } from "../../domain/layout/steps";
 import type { LayoutView } from "../../domain/layout/view";
 
 /** What the steps depend on, as a layout's screens know it. */
@@ -22,20 +22,22 @@ export function factsOf(view: LayoutView): StepFacts {
     optionChosen: view.choice !== null && !view.choice.changed,
     secondLook: view.secondLook.state,
     approval: view.approval?.state ?? "none",
+    tack: view.tack.state,
+    work: view.work.progress,
   };
 }
 
 /** Why a step of this layout may not be worked on, in words; null when it may. */
 export const whyShutIn = (view: LayoutView, step: StepId): string | null => whyShut(step, factsOf(view));
 
-/** The step that opens a shut one: the first before it that is not done. */
+/** The step that opens a shut one: the first before it that is not done. Nobody goes back before Tack once all is welded. */
 export function wayBack(view: LayoutView, step: StepId): { id: StepId; label: string } | null {
-  const before = view.steps.slice(
-    0,
-    view.steps.findIndex((one) => one.id === step),
-  );
-  return (
-    before.find((one) => one.state !== "done" && one.state !== "later" && whyShutIn(view, one.id) === null) ??
-    null
-  );
+  const welded = isWelded(factsOf(view));
+  const before = view.steps
+    .slice(
+      0,
+      view.steps.findIndex((one) => one.id === step),
+    )
+    .filter(({ id }) => !welded || AFTER_APPROVAL.includes(id));
+  return before.find((one) => one.state !== "done" && whyShutIn(view, one.id) === null) ?? null;
 }

@@ -1,10 +1,12 @@
 import { VEHICLE_KIND } from "../../domain/builds/vehicle-kinds";
+import { isWelded } from "../../domain/layout/steps";
 import type { LayoutView } from "../../domain/layout/view";
 import type { LiveStatus } from "../../realtime/live-status";
 import { Sign, type SignName } from "../../ui/sign";
 import { Stencil } from "../../ui/stencil";
 import { Tape } from "../../ui/tape";
 import { ageInWords, whenInWords } from "../time";
+import { factsOf } from "./facts";
 import { levelWords } from "./level-words";
 import { unsentWords } from "./unsent";
 import type { Outbox } from "./use-unsent";
@@ -53,6 +55,14 @@ function Fact({ sign, tone, children }: { sign: SignName; tone: string; children
 
 function LevelFact({ view, now }: { view: LayoutView; now: number }) {
   const { level, shop, standsInBay, bay } = view;
+  if (isWelded(factsOf(view)))
+    return (
+      <Fact sign="welded" tone="text-moss">
+        <b className="font-semibold text-moss">Welded as signed</b>
+        <br />
+        nothing hangs on the level now
+      </Fact>
+    );
   if (!standsInBay)
     return (
       <Fact sign="void" tone="text-oxide">

@@ -1,13 +1,14 @@
 import { type ReactNode, useEffect, useRef, useState } from "react";
-import type { StepId } from "../../domain/layout/steps";
+import { isWelded, type StepId } from "../../domain/layout/steps";
 import type { LayoutView } from "../../domain/layout/view";
+import { workLine } from "../../domain/layout/work-list";
 import type { LiveStatus } from "../../realtime/live-status";
 import { useNow } from "../wall/use-now";
 import { ApprovalStep } from "./choose/approval-step";
 import { AxleLineStep } from "./choose/axle-line-step";
 import { OptionsStep } from "./choose/options-step";
 import { DropsStep } from "./drops/drops-step";
-import { whyShutIn } from "./facts";
+import { factsOf, whyShutIn } from "./facts";
 import { LayoutHead } from "./layout-head";
 import { LevelStep } from "./level/level-step";
 import { MarksStep } from "./marks/marks-step";
@@ -16,7 +17,10 @@ import { SecondLookStep } from "./second-look/second-look-step";
 import { ShutStep } from "./shut-step";
 import { StandsStep } from "./stands/stands-step";
 import { StepsRail } from "./steps-rail";
+import { TackStep } from "./tack/tack-step";
 import { useUnsent } from "./use-unsent";
+import { FinishStep } from "./work/finish-step";
+import { WeldStep } from "./work/weld-step";
 import "./layout.css";
 import "./reading.css";
 import "./level/level.css";
@@ -59,7 +63,7 @@ export function LayoutPage({ view, step, may, person, servedAt, live, refresh }:
   );
 }
 
-const NOTHING: May = { measure: false, approve: false };
+const NOTHING: May = { measure: false, approve: false, whyNoWeld: null };
 
 type StepProps = Pick<Props, "view" | "step" | "may" | "person" | "refresh"> & { shut: boolean };
 
@@ -80,14 +84,30 @@ function stepIn({ view, step, may, person, shut, refresh }: StepProps): ReactNod
       return shut ? null : <SecondLookStep view={view} may={may} person={person} done={refresh} />;
     case "approval":
       return shut && !view.approval ? null : <ApprovalStep view={view} may={may} />;
+    case "tack":
+      return shut && view.tack.checks.length === 0 ? null : (
+        <TackStep view={view} may={may} shut={shut} done={refresh} />
+      );
+    case "weld":
+      return shut && nothingSigned(view, "weld") ? null : (
+        <WeldStep view={view} may={may} person={person} shut={shut} done={refresh} />
+      );
+    case "finish":
+      return shut && nothingSigned(view, "finish") ? null : (
+        <FinishStep view={view} may={may} person={person} shut={shut} done={refresh} />
+      );
     default:
       return null;
   }
 }
 
+const nothingSigned = ({ work }: LayoutView, step: "weld" | "finish") =>
+  !Object.keys(work.signed).some((id) => workLine(id)?.step === step);
+
 /** Says it at once, to those who listen, when a level that stood is void: on this tablet or by somebody else. */
 function LevelNews({ view }: { view: LayoutView }) {
-  const state = view.standsInBay ? (view.level?.state ?? "none") : "void";
+  const welded = isWelded(factsOf(view));
+  const state = welded ? "none" : view.standsInBay ? (view.level?.state ?? "none") : "void";
   const before = useRef(state);
   const [news, setNews] = useState("");
   const reason = view.standsInBay

@@ -1,20 +1,21 @@
 import { Link } from "react-router";
-import type { StepId } from "../../domain/layout/steps";
+import { AFTER_APPROVAL, isWelded, type StepId } from "../../domain/layout/steps";
 import type { LayoutView } from "../../domain/layout/view";
 import { buttonClass } from "../../ui/button";
 import { Verdict } from "../../ui/verdict";
-import { wayBack } from "./facts";
+import { factsOf, wayBack } from "./facts";
 
 /** Why a step cannot be worked on, and the press that leads back to where it can. */
 export function ShutStep({ view, step, why }: { view: LayoutView; step: StepId; why: string }) {
   const state = view.steps.find((one) => one.id === step);
   const back = wayBack(view, step);
-  const isVoid = view.level?.state === "void" || !view.standsInBay;
+  const welded = AFTER_APPROVAL.includes(step) && isWelded(factsOf(view));
+  const isVoid = !welded && (view.level?.state === "void" || !view.standsInBay);
   return (
     <section aria-label={`${state?.label ?? "Step"} is shut`}>
       <Verdict
-        tone={isVoid ? "void" : state?.state === "later" ? "empty" : "waiting"}
-        sign={isVoid ? "void" : state?.state === "later" ? "plan" : "lock"}
+        tone={isVoid ? "void" : "waiting"}
+        sign={isVoid ? "void" : "lock"}
         title={why}
         detail={
           state?.state === "void"

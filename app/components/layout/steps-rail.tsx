@@ -9,13 +9,12 @@ const STATE_WORDS: Record<StepState["state"], string> = {
   open: "open",
   shut: "shut",
   void: "void",
-  later: "on paper",
 };
 
 /** What stands under a step's name. The states that say the least say nothing. */
 function noteOf(step: StepState): string {
   if (step.note) return step.note;
-  return step.state === "void" || step.state === "later" ? STATE_WORDS[step.state] : "";
+  return step.state === "void" ? STATE_WORDS.void : "";
 }
 
 const TONE: Record<StepState["state"], string> = {
@@ -24,7 +23,6 @@ const TONE: Record<StepState["state"], string> = {
   open: "",
   shut: "",
   void: "text-oxide font-semibold",
-  later: "",
 };
 
 /** The steps down a plumb line, the bob at the one in hand; a strip across on narrow screens. */
@@ -54,26 +52,19 @@ export function StepsRail({
           const marks = { "data-done": step.state === "done", "data-hung": i < here };
           return (
             <li key={step.id}>
-              {step.state === "later" ? (
-                <span className="layout-step" {...marks}>
-                  {step.label}
-                  <small>{note}</small>
-                </span>
-              ) : (
-                <Link
-                  ref={isHere ? currentRef : undefined}
-                  to={`/layouts/${layoutId}/step/${step.id}`}
-                  className="layout-step"
-                  aria-current={isHere ? "step" : undefined}
-                  {...marks}
-                >
-                  {isHere ? <Bob key={step.id} size={44} className="layout-bob" /> : null}
-                  {step.label}
-                  <small className={TONE[step.state]}>
-                    {note || <span className="sr-only">{STATE_WORDS[step.state]}</span>}
-                  </small>
-                </Link>
-              )}
+              <Link
+                ref={isHere ? currentRef : undefined}
+                to={`/layouts/${layoutId}/step/${step.id}`}
+                className="layout-step"
+                aria-current={isHere ? "step" : undefined}
+                {...marks}
+              >
+                {isHere ? <Bob key={step.id} size={44} className="layout-bob" /> : null}
+                {step.label}
+                <small className={TONE[step.state]}>
+                  {note || <span className="sr-only">{STATE_WORDS[step.state]}</span>}
+                </small>
+              </Link>
             </li>
           );
         })}

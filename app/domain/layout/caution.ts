@@ -28,10 +28,20 @@ const CAUTIONS: Record<StepId, readonly string[]> = {
   ],
   weld: [
     "Frame and suspension welds are for a qualified welder, to the code that applies.",
-    "Torque with the bushings at ride height.",
+    "Torque with the bushings at ride height: clamped at droop they twist, and tear, as soon as it stands on its wheels.",
   ],
   finish: ["Brake hoses and wiring at full droop, steering lock to lock, then the road test."],
 };
+
+/** What is signed before the first bead. */
+export const BEFORE_WELDING: readonly string[] = [
+  "Battery and electronics disconnected, the earth clamp close to the weld.",
+  "Fuel, brake and other lines covered or taken off, nothing that burns in reach of sparks.",
+  "Eyes, skin and lungs protected, air moving, those nearby warned.",
+  "Somebody on fire watch, also after the last bead.",
+  "Springs without load, vehicle on rated stands, wheels chocked.",
+  "Frame and suspension welds are for a qualified welder, to the code that applies here.",
+];
 
 /** The cautions of a step; empty where nothing special can hurt. */
 export const cautionFor = (step: StepId): readonly string[] => CAUTIONS[step];

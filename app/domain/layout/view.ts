@@ -6,7 +6,8 @@ import type { AxleLine, OpeningComparison } from "./axle-line";
 import type { DropPointId, DropSide, TieFit } from "./drops";
 import type { Frame } from "./frame";
 import type { Option } from "./options";
-import type { StepId, StepState } from "./steps";
+import type { StepFacts, StepId, StepState } from "./steps";
+import type { Progress, WorkListId, WorkState } from "./work-list";
 
 /*
  * One layout as its screens, its sheet and its drawings are handed it: what was typed, what it came to, who did it.
@@ -113,6 +114,50 @@ export type ApprovalView = {
   voided: { at: string; reason: string } | null;
 };
 
+/** A check of the tacked axle as it was kept: what was typed and what was said then. */
+export type TackCheckView = {
+  id: number;
+  passes: boolean;
+  /** Of the approval that is the newest now; another one wanted a check of its own. */
+  counts: boolean;
+  leftTyped: string;
+  rightTyped: string;
+  leftAhead: Millimetres;
+  rightAhead: Millimetres;
+  outOfSquare: Millimetres;
+  sideways: Millimetres;
+  headline: string;
+  moves: string[];
+  made: Made;
+};
+export type TackView = {
+  state: StepFacts["tack"];
+  within: Millimetres;
+  /** The line that was signed; null before anything was. */
+  wanted: AxleLine | null;
+  /** Newest first. */
+  checks: TackCheckView[];
+};
+
+/** A signature under a line of the weld, torque or finish list. */
+export type SignatureView = {
+  state: WorkState;
+  wanted: string;
+  read: string;
+  tool: string;
+  words: string;
+  /** When it has to be torqued again; null: not said. */
+  dueAt: string | null;
+  /** Alignment figures as typed, by id. */
+  figures: { id: string; typed: string }[];
+  made: Made;
+};
+export type WorkView = {
+  progress: Record<WorkListId, Progress>;
+  /** Lines that were signed, by their id, newest signature first. */
+  signed: Record<string, SignatureView[]>;
+};
+
 export type LayoutView = {
   id: number;
   /** The shop's revision this was read at. */
@@ -173,6 +218,8 @@ export type LayoutView = {
   choice: ChoiceView | null;
   secondLook: SecondLookView;
   approval: ApprovalView | null;
+  tack: TackView;
+  work: WorkView;
   /** What is missing for options to be whole, in words: "Drop hanger hole 1 on both sides". */
   missing: string[];
 };

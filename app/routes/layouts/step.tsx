@@ -8,6 +8,7 @@ import { idParam, orErrorPage, requireActor } from "~/http/request.server";
 import { readShell } from "~/http/shell.server";
 import { useLiveTouch } from "~/realtime/use-live";
 import { readLayout } from "~/services/layouts/read-layout.server";
+import { whyNoWeld } from "~/services/layouts/weld-skill.server";
 import type { Route } from "./+types/step";
 
 export const meta: Route.MetaFunction = ({ data: loaded }) => [
@@ -24,8 +25,9 @@ export async function loader({ params, context }: Route.LoaderArgs) {
   const actor = requireActor(context, "layouts:see");
   const { step } = params;
   if (!isStepId(step)) throw data({ message: "A layout has no such step." }, { status: 404 });
-  const { db } = context.get(appContext);
-  const person = actor.personId !== null;
+  const { db, now } = context.get(appContext);
+  const { personId } = actor;
+  const person = personId !== null;
   return {
     step,
     view: await orErrorPage(() => readLayout(db, actor.shopId, idParam(params.layoutId))),
@@ -33,6 +35,7 @@ export async function loader({ params, context }: Route.LoaderArgs) {
     may: {
       measure: person && may(actor.role, "layouts:measure"),
       approve: person && may(actor.role, "options:approve"),
+      whyNoWeld: person && step === "weld" ? await whyNoWeld(db, { ...actor, personId }, now()) : null,
     },
   };
 }

@@ -1,4 +1,5 @@
 import type { Reader } from "../../db/client.server";
+import { readFirstApproval, readTackChecks, readWorkItems } from "../../db/queries/layout-work.server";
 import {
   type DropRow,
   type LevelCheckRow,
@@ -21,6 +22,7 @@ import type { LeafSpring } from "../../domain/springs/leaf-spring";
 import { mm } from "../../domain/units/length";
 import { Refusal } from "../errors";
 import { computeGeometry, standingDrops } from "./compute-layout";
+import { layoutWork } from "./layout-work-state";
 import { secondLookState } from "./second-look-state";
 
 const asRound = (row: LevelCheckRow): Round => ({
@@ -87,6 +89,12 @@ export async function loadLayout(tx: Reader, shopId: number, layoutId: number) {
     method: head.layout.axleMethod,
     sigma: shop,
   });
+  const work = layoutWork({
+    approvalId: approvalRow?.approval.id ?? null,
+    since: approvalRow ? await readFirstApproval(tx, approvalRow.choice.id) : null,
+    checks: await readTackChecks(tx, layoutId),
+    items: await readWorkItems(tx, layoutId),
+  });
   const waiver = choice ? await readWaiver(tx, choice.choice.id) : null;
 
   const last = checks.at(-1) ?? null;
@@ -109,6 +117,8 @@ export async function loadLayout(tx: Reader, shopId: number, layoutId: number) {
     optionChosen: choice !== null && !changed,
     secondLook: waiver ? "waived" : secondLook.state,
     approval: approvalRow ? (approvalRow.approval.voidedAt ? "void" : "approved") : "none",
+    tack: work.tack,
+    work: work.work,
   };
   return {
     head,
@@ -126,6 +136,7 @@ export async function loadLayout(tx: Reader, shopId: number, layoutId: number) {
     approvalRow,
     secondLook,
     waiver,
+    work,
     facts,
   };
 }

@@ -17,23 +17,18 @@ import type {
   DropView,
   LayoutView,
   LevelView,
-  Made,
   SecondLookView,
   TypedLength,
 } from "../../domain/layout/view";
 import { degrees } from "../../domain/units/angle";
 import { type LengthUnit, type Millimetres, mm } from "../../domain/units/length";
 import { currentReadings, type LoadedLayout, loadLayout } from "./layout-state.server";
+import { made, tackView, workView } from "./work-view";
 
 const orNull = <T, R>(value: T | null, make: (value: T) => R): R | null =>
   value === null ? null : make(value);
 const typed = (value: number | null, entry: string | null): TypedLength | null =>
   value === null ? null : { mm: mm(value), typed: entry ?? "" };
-const made = (person: { name: string; initials: string } | null, at: Date): Made => ({
-  name: person?.name ?? "",
-  initials: person?.initials ?? "",
-  at: at.toISOString(),
-});
 
 /**
  * A layout as its screens are handed it: what was typed, what it came to, who did it; one consistent snapshot.
@@ -132,6 +127,8 @@ export function readLayout(db: Db, shopId: number, layoutId: number): Promise<La
           reason: approvalRow.approval.voidReason ?? "",
         })),
       },
+      tack: tackView(loaded),
+      work: workView(loaded),
       missing: geometry.missing,
     };
   });

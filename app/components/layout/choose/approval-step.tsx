@@ -56,9 +56,14 @@ export function ApprovalStep({ view, may }: { view: LayoutView; may: May }) {
         ) : null}
         <Ground view={view} when={when} />
         {approved ? (
-          <Link className={buttonClass("go", "xl")} to={`/layouts/${view.id}/sheet`}>
-            Layout sheet {view.approval?.sheetRevision}
-          </Link>
+          <>
+            <Link className={buttonClass("go", "xl")} to={`/layouts/${view.id}/sheet`}>
+              Layout sheet {view.approval?.sheetRevision}
+            </Link>
+            <Link className={buttonClass("plain", "l")} to={`/layouts/${view.id}/step/tack`}>
+              Tacked: go to Tack and square
+            </Link>
+          </>
         ) : option && may.approve ? (
           <Button
             tone="go"
