@@ -220,3 +220,24 @@ test("two foremen, one vehicle: one wins, the other is told and sees the truth",
   await expect(standing(second, "Wanted", "Bay 1")).toBeVisible();
   await expect(bay(second, 2)).not.toContainText("Wanted");
 });
+
+test("a full yard: the newest stands in front, the rest is a press away", async ({ as, db, shop }) => {
+  for (const nickname of ["Eldest", "Second", "Third", "Fourth", "Fifth", "Newest"])
+    await makeBuild(db, shop.shopId, {
+      nickname,
+      code: `Y${(++serial).toString(36).toUpperCase().padStart(3, "X")}`,
+      by: shop.people.foreman.personId ?? 0,
+      standsSince: new Date(Date.now() - 3_600_000 + serial * 60_000),
+    });
+  const page = await as(shop.people.foreman, { viewport: { width: 1024, height: 768 } });
+  await open(page);
+  await expect(standing(page, "Newest", "Yard")).toBeInViewport({ ratio: 0.9 });
+  await expect(standing(page, "Eldest", "Yard")).not.toBeInViewport();
+  const more = page.getByRole("button", { name: "More in the yard →" });
+  await more.click();
+  await expect(standing(page, "Newest", "Yard")).not.toBeInViewport({ ratio: 0.9 });
+  for (let presses = 0; presses < 4 && (await more.count()) > 0; presses++) await more.click();
+  await expect(standing(page, "Eldest", "Yard")).toBeInViewport({ ratio: 0.9 });
+  await page.getByRole("button", { name: "← Back to the first" }).click();
+  await expect(standing(page, "Newest", "Yard")).toBeInViewport({ ratio: 0.9 });
+});

@@ -1,7 +1,8 @@
 import { quantile, sampleCorrelation, standardDeviation } from "simple-statistics";
 import type { Outcome } from "../../app/domain/outcome";
-import { combine, covarianceOf, propagate, type Uncertain } from "../../app/domain/uncertainty/propagate";
+import { combine, propagate, type Uncertain } from "../../app/domain/uncertainty/propagate";
 import { correlation, fromHalfWidth, repeated } from "../../app/domain/uncertainty/readings";
+import { covarianceOf } from "../../app/domain/uncertainty/several";
 import { coverageFactor } from "../../app/domain/uncertainty/student";
 import type { Source, Topic } from "./check";
 

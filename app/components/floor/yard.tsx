@@ -9,13 +9,16 @@ import { useFloorView } from "./floor-context";
 import type { PlanExtent } from "./geometry";
 import { StandingVehicle, vehicleStyle } from "./standing-vehicle";
 import { usePlace } from "./use-place";
+import { useRoomBeyond } from "./use-room-beyond";
 import { VerdictWord } from "./verdict-word";
 import { VERDICT_WORDS } from "./words";
 
-/** The yard: what stands outside, in order of need. */
+/** The yard: what stands outside, the newest first; more than fit are a press away. */
 export function Yard({ extent }: { extent: PlanExtent }) {
   const { floor, may } = useFloorView();
   const { yard } = floor.board;
+  const newestFirst = yard.toSorted((a, b) => b.since.localeCompare(a.since));
+  const { row, beyond, goOn } = useRoomBeyond(yard.length);
   const place = usePlace("yard");
   const { setNodeRef } = useDroppable({ id: "place-yard", data: { place: "yard", order: 0 } });
   return (
@@ -27,17 +30,22 @@ export function Yard({ extent }: { extent: PlanExtent }) {
       data-place="yard"
       {...place.data}
     >
-      <div className="yard-row">
+      <div className="yard-row" ref={row}>
         {yard.length === 0 ? (
           <p className="self-center">
             The yard is empty. {may.bookIn ? "Book a vehicle in at the counter." : ""}
           </p>
         ) : null}
-        {yard.map((vehicle) => (
+        {newestFirst.map((vehicle) => (
           <YardItem key={vehicle.buildId} vehicle={vehicle} />
         ))}
       </div>
       <div className="yard-side">
+        {beyond ? (
+          <button type="button" className="yard-more" onClick={goOn}>
+            {beyond === "ahead" ? "More in the yard →" : "← Back to the first"}
+          </button>
+        ) : null}
         <p className="flex gap-2">
           <span className="floor-label">
             <b>Yard</b>

@@ -50,3 +50,15 @@ export function fromHalfWidth(halfWidth: number, spread: Spread): number {
   if (!(halfWidth >= 0)) throw new RangeError(`${halfWidth} is not a half-width`);
   return halfWidth / Math.sqrt({ rectangular: 3, triangular: 6, arcsine: 2 }[spread]);
 }
+
+/**
+ * Standard uncertainty from an expanded one and the factor that it was made with, as a certificate states them.
+ * Source: JCGM 100:2008, 4.3.3 and 4.3.4 (from memory).
+ * @throws RangeError when the uncertainty is negative or the factor not above nothing
+ * @example fromExpanded(240, 3) // 80
+ */
+export function fromExpanded(expanded: number, coverageFactor: number): number {
+  if (!(expanded >= 0)) throw new RangeError(`${expanded} is not an uncertainty`);
+  if (!(coverageFactor > 0)) throw new RangeError(`${coverageFactor} is not a coverage factor`);
+  return expanded / coverageFactor;
+}

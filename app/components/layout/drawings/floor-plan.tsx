@@ -70,7 +70,7 @@ export function FloorPlan({
           [
             ["−", "Zoom out", zoomOut],
             ["+", "Zoom in", zoomIn],
-            ["0", "Show all", whole],
+            ["All", "Show all", whole],
           ] as const
         ).map(([sign, label, act]) => (
           <button
