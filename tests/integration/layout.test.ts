@@ -197,6 +197,14 @@ describe("the measured case, through the shop's own services", () => {
     await chooseAxleLine(tech(), layoutId, { method: "square", asked: null });
     now = await view();
     expect(toInches(now.axle?.line.station ?? mm(0))).toBeCloseTo(44.4066, 4);
+    // Each drop: square and tape 1/32 in, bob 1/32 in; the line is the mean of four, on a frame that is as unsure.
+    expect(toInches(now.axle?.sureness?.plusMinus ?? mm(0))).toBeGreaterThan(
+      (2 * Math.SQRT2) / 32 / 2 - 1e-9,
+    );
+    expect(toInches(now.axle?.sureness?.plusMinus ?? mm(0))).toBeLessThan(0.1);
+    expect(now.axle?.sureness?.words).toMatch(
+      /^(Mostly|The most comes from) (the bob|stations and offsets) \(50 %\)/,
+    );
     expect(now).toMatchObject({ options: null, missing: ["Drop hanger hole 1 on both sides."] });
 
     for (const side of ["left", "right"] as const)

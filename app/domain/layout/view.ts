@@ -83,6 +83,9 @@ export type ChoiceView = {
   changed: boolean;
 };
 
+/** How sure the axle line's station is (k = 2), and what weighs most in that, in words. */
+export type AxleSureness = { plusMinus: Millimetres; words: string };
+
 /** A drop to be looked at again. What the first person read is null until somebody else has read it too. */
 export type LookView = {
   point: DropPointId;
@@ -210,7 +213,13 @@ export type LayoutView = {
   openings: OpeningComparison | null;
   /** What each method gives, to choose from. Empty until openings are known. `asked` only when an offset was asked for. */
   axleWays: AxleLine[];
-  axle: { line: AxleLine; asked: TypedLength | null; made: Made } | null;
+  axle: {
+    line: AxleLine;
+    asked: TypedLength | null;
+    made: Made;
+    /** Null when it cannot be told. */
+    sureness: AxleSureness | null;
+  } | null;
   /** Stations of the holes on the frame, from the dropped hole. Empty until it was dropped on both sides. */
   holes: { id: number; number: number; station: Millimetres }[];
   /** Null until axle line and holes are known. */

@@ -22,6 +22,7 @@ import type {
 } from "../../domain/layout/view";
 import { degrees } from "../../domain/units/angle";
 import { type LengthUnit, type Millimetres, mm } from "../../domain/units/length";
+import { axleSureness } from "./axle-sureness";
 import { currentReadings, type LoadedLayout, loadLayout } from "./layout-state.server";
 import { made, tackView, workView } from "./work-view";
 
@@ -112,6 +113,14 @@ export function readLayout(db: Db, shopId: number, layoutId: number): Promise<La
               line: geometry.line,
               asked: typed(layout.axleAskedMm, layout.axleAskedTyped),
               made: made(head.axler, layout.axleAt),
+              sureness: axleSureness({
+                rows: loaded.rows,
+                stands: (row) => loaded.ground.standing.has(row.reading.levelCheckId),
+                marks,
+                shop,
+                method: geometry.line.method,
+                asked: mm(layout.axleAskedMm ?? 0),
+              }),
             }
           : null,
       holes: geometry.holes,

@@ -37,6 +37,13 @@ const WHY: Record<AxleMethod, string> = {
   asked: "Square, so far ahead of the centre as the customer wants.",
 };
 
+/** " Sure to 1/16 in. Mostly the bob (54 %), then …" */
+function surenessWords({ axle, unit }: LayoutView): string {
+  return axle?.sureness
+    ? ` Sure to ${smallLength(axle.sureness.plusMinus, unit)} (k = 2). ${axle.sureness.words}`
+    : "";
+}
+
 /** How the axle line is laid: three ways with what each gives. */
 export function AxleLineStep({ view, may }: { view: LayoutView; may: May }) {
   const { revalidate } = useRevalidator();
@@ -58,7 +65,7 @@ export function AxleLineStep({ view, may }: { view: LayoutView; may: May }) {
             tone="true"
             sign="finish"
             title={`Axle line at ${formatDecimalInches(view.axle.line.station)}, ${NAME[view.axle.line.method].toLowerCase()}.`}
-            detail={`Inches ahead of the rear datum pair. Chosen by ${view.axle.made.name}.`}
+            detail={`Inches ahead of the rear datum pair. Chosen by ${view.axle.made.name}.${surenessWords(view)}`}
           />
         ) : (
           <Verdict
