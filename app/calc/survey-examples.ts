@@ -29,7 +29,7 @@ export const SURVEY_EXAMPLES = [
       words: "The floor rises 4.0 mm/m to the left.",
       flatness: 3,
       bump: { x: 1500, y: 0, deviation: 2.66667 },
-      hollow: { x: 3000, y: 1000, deviation: -0.333333 },
+      hollow: { x: 0, y: -1000, deviation: -0.333333 },
       deviations: [
         -0.333333, -0.333333, -0.333333, -0.333333, 2.66667, -0.333333, -0.333333, -0.333333, -0.333333,
       ],

@@ -37,6 +37,9 @@ export const MOST_HEIGHTS = 2000;
 /** Slopes below this (mm/m) are level: they round to 0.0. */
 const SPOKEN = 0.05;
 
+/** Deviations nearer to each other than this are one: of several such points the first counts. */
+const SAME_MM = 1e-6;
+
 /**
  * The plane z = c + a·x + b·y that fits a floor best, its slope and what lies over and under it.
  * Source: a regression plane, any text on adjustment; 1 mm/m is 0.0573°.
@@ -53,8 +56,8 @@ export function surveyFloor(heights: readonly FloorHeight[]): Outcome<FloorSurve
   if (!fit) return problem("The heights are in one line: a height beside it is needed.");
   const [c = 0, a = 0, b = 0] = fit.solution;
   const deviations = heights.map((one, i) => ({ ...one, deviation: mm(fit.residuals[i] ?? 0) }));
-  const bump = deviations.reduce((best, one) => (one.deviation > best.deviation ? one : best));
-  const hollow = deviations.reduce((best, one) => (one.deviation < best.deviation ? one : best));
+  const bump = deviations.reduce((best, one) => (one.deviation > best.deviation + SAME_MM ? one : best));
+  const hollow = deviations.reduce((best, one) => (one.deviation < best.deviation - SAME_MM ? one : best));
   const steepest = Math.hypot(a, b) * 1000;
   const rises = steepest < SPOKEN ? null : toDegrees(Math.atan2(b, a));
   const squares = fit.residuals.reduce((sum, v) => sum + v * v, 0);
