@@ -55,7 +55,7 @@ export const UNCERTAINTY_EXAMPLES = [
     },
   },
   {
-    title: "Impedance U/I from five readings of each, correlated (JCGM 100, H.2)",
+    title: "Impedance U/I from five readings of each, taken together (JCGM 100, H.2)",
     input: {
       model: "product" as const,
       inputs: [
@@ -70,21 +70,15 @@ export const UNCERTAINTY_EXAMPLES = [
           power: -1,
         },
       ],
-      correlations: [
-        {
-          a: "voltage",
-          b: "current",
-          r: -0.355311,
-        },
-      ],
+      readTogether: true,
     },
     output: {
       value: 254.259702,
       uncertainty: 0.236336111,
-      freedom: 13.346022,
+      freedom: 4,
       coverage: 0.95,
-      coverageFactor: 2.16036866,
-      expanded: 0.510573128,
+      coverageFactor: 2.77644511,
+      expanded: 0.656174,
       contributions: [
         {
           name: "voltage",
@@ -98,6 +92,60 @@ export const UNCERTAINTY_EXAMPLES = [
         },
       ],
       words: "Mostly voltage (64 %), then current (36 %).",
+    },
+  },
+  {
+    title: "Wheelbase from two drops by certified tapes, with the factor 2 that the shop agreed on",
+    input: {
+      model: "sum" as const,
+      inputs: [
+        {
+          name: "the front drop",
+          value: 3352.8,
+          expanded: {
+            value: 1.2,
+            coverageFactor: 2,
+          },
+        },
+        {
+          name: "the rear drop",
+          value: 25.4,
+          expanded: {
+            value: 1.2,
+            coverageFactor: 2,
+          },
+          sensitivity: -1,
+        },
+      ],
+      correlations: [
+        {
+          a: "the front drop",
+          b: "the rear drop",
+          r: 0.5,
+        },
+      ],
+      coverageFactor: 2,
+    },
+    output: {
+      value: 3327.4,
+      uncertainty: 0.6,
+      freedom: null,
+      coverage: 0.954499736,
+      coverageFactor: 2,
+      expanded: 1.2,
+      contributions: [
+        {
+          name: "the front drop",
+          moves: 0.6,
+          share: 0.5,
+        },
+        {
+          name: "the rear drop",
+          moves: -0.6,
+          share: 0.5,
+        },
+      ],
+      words: "The most comes from the front drop (50 %), then the rear drop (50 %).",
     },
   },
 ];

@@ -18,7 +18,7 @@ export function correlationMatrix(
   names: readonly string[],
   correlations: readonly Correlation[],
 ): Outcome<number[][]> {
-  const matrix = names.map((_, i) => names.map((__, j) => (i === j ? 1 : 0)));
+  const matrix: number[][] = names.map((_, i) => names.map((__, j) => (i === j ? 1 : 0)));
   const told = new Set<string>();
   for (const { a, b, r } of correlations) {
     const [i, j] = [names.indexOf(a), names.indexOf(b)];
