@@ -279,5 +279,8 @@ test("from booking in to the layout sheet, with the wall showing each change", a
       .getByText(/The level is void: rolled out to the yard\. Level again, then drop one old point again\./)
       .first(),
   ).toBeVisible();
+  await tech.goto(`${layout}/sheet`);
+  await expect(tech.getByRole("alert")).toContainText("VOID");
+  await expect(tech.getByRole("article", { name: "Layout sheet" })).toContainText("46 1/2");
   await tablet.close();
 });

@@ -498,6 +498,9 @@ describe("choosing and signing", () => {
       state: "void",
       voided: { reason: "Opening, front edge read again" },
     });
+    // The void sheet shows what was signed, not what today's sums say.
+    expect(toInches(now.approval?.signed.axleStation ?? mm(0))).toBeCloseTo(44.5, 4);
+    expect(now.approval?.signed.hole.number).toBe(1);
     expect(now.choice).toBeNull();
     await chooseOption(foreman(), layoutId, optionOf("centred", 1));
     expect(await approveOption(foreman(), layoutId, null)).toMatchObject({ sheetRevision: 2 });

@@ -1,5 +1,6 @@
 import { describe, expect, it } from "vitest";
 import { DROP_POINTS } from "../../domain/layout/drops";
+import type { Option } from "../../domain/layout/options";
 import { stepStates } from "../../domain/layout/steps";
 import type { LayoutView, LevelView } from "../../domain/layout/view";
 import { degrees } from "../../domain/units/angle";
@@ -80,7 +81,14 @@ describe("what a layout's steps depend on", () => {
   });
 
   it("goes on in another bay once all is welded, and not before", () => {
-    const approval = { state: "approved", sheetRevision: 1, made, voided: null } as const;
+    const approval = {
+      state: "approved",
+      sheetRevision: 1,
+      // The steps do not look at the figures.
+      signed: {} as Option,
+      made,
+      voided: null,
+    } as const;
     const tack = {
       state: "passes",
       within: 3.175,

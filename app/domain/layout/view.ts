@@ -114,6 +114,8 @@ export type ApprovalView = {
   state: "approved" | "void";
   sheetRevision: number;
   made: Made;
+  /** What was signed, with the figures as they were then: a void sheet shows these, never today's sums. */
+  signed: Option;
   voided: { at: string; reason: string } | null;
 };
 

@@ -26,7 +26,11 @@ export async function loader({ request, params, context }: Route.LoaderArgs) {
 
 export default function Sheet({ loaderData }: Route.ComponentProps) {
   const { view, qr, printedAt } = loaderData;
-  const option = view.options?.find((one) => one.key === view.choice?.key) ?? null;
+  const { approval } = view;
+  const option =
+    approval?.state === "void"
+      ? approval.signed
+      : (view.options?.find((one) => one.key === view.choice?.key) ?? approval?.signed ?? null);
   return (
     <div className="min-h-dvh bg-concrete-200 py-4 print:bg-white print:py-0">
       <nav className="no-print mx-auto mb-4 flex w-[816px] max-w-full gap-3 px-4" aria-label="Sheet">

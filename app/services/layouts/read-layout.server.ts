@@ -9,6 +9,7 @@ import {
 } from "../../db/queries/layouts.server";
 import { floorPoint } from "../../domain/geometry/point";
 import { DROP_POINTS, dropPoint, pointFromTies } from "../../domain/layout/drops";
+import type { Option } from "../../domain/layout/options";
 import { lookLabel } from "../../domain/layout/second-look";
 import { nextOpenStep, stepStates } from "../../domain/layout/steps";
 import type {
@@ -131,6 +132,8 @@ export function readLayout(db: Db, shopId: number, layoutId: number): Promise<La
         state: approvalRow.approval.voidedAt ? "void" : "approved",
         sheetRevision: approvalRow.approval.sheetRevision,
         made: made(approvalRow, approvalRow.approval.approvedAt),
+        // Kept whole by chooseOption.
+        signed: approvalRow.choice.figures as unknown as Option,
         voided: orNull(approvalRow.approval.voidedAt, (at) => ({
           at: at.toISOString(),
           reason: approvalRow.approval.voidReason ?? "",
