@@ -18,7 +18,10 @@ type Props = { view: LayoutView; option: Option; qr: ReactNode; printedAt: strin
 
 /** Why the sheet is dead, in words; null while it is good. */
 export function voidReason(view: LayoutView): string | null {
-  if (view.approval?.state === "void") return `${view.approval.voided?.reason ?? "A number changed"}.`;
+  if (view.approval?.state === "void") {
+    const reason = view.approval.voided?.reason ?? "a number changed";
+    return `${reason.charAt(0).toUpperCase()}${reason.slice(1)}.`;
+  }
   if (view.level?.state !== "true")
     return `The level does not stand${view.level?.voided ? `: ${view.level.voided.reason}` : ""}.`;
   if (!view.standsInBay) return `The vehicle left Bay ${view.bay.number}.`;
