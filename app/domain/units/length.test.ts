@@ -1,10 +1,12 @@
 import fc from "fast-check";
 import { describe, expect, it } from "vitest";
 import {
+  formatCentimetres,
   formatDecimalInches,
   formatFeet,
   formatInches,
   formatLength,
+  formatMillimetres,
   inches,
   inchParts,
   mm,
@@ -45,6 +47,12 @@ describe("parseLength", () => {
     ["  24   1/16 ", 24.0625],
     ["-3/8", -0.375],
     ["−3/8", -0.375],
+    ["5/4", 1.25],
+    ["26⅖", 26.4],
+    ["0,125", 0.125],
+    ["12 13/32 in", 12.40625],
+    ["1'", 12],
+    ["1 foot 6 inches", 18],
   ])("reads %s in inches", (text, expected) => expect(toInches(value(text))).toBeCloseTo(expected, 9));
   it.each([
     ["673 mm", 673],
@@ -72,6 +80,26 @@ describe("parseLength", () => {
     ["1e5", /is not a length/],
     ["9".repeat(40), /too long/],
     ["NaN", /is not a length/],
+    ["3/0", /^3\/0 is not a fraction\.$/],
+    ["26 1/0", /^1\/0 is not a fraction\.$/],
+    ["5/4/2", /fraction too many/],
+    ["12 13 in", /“12 13” is not a length: two numbers/],
+    ["2' 3 4", /two numbers/],
+    ["1/-2", /minus goes in front/],
+    ["1/", /not a fraction as on the tape/],
+    ["/2", /not a fraction as on the tape/],
+    ["1/2 ft", /fraction of a foot/],
+    ["2 1/2'", /fraction of a foot/],
+    ["1e9", /is not a length/],
+    ["Infinity", /is not a length/],
+    ["99999999", /longer than 100 m/],
+    ["999999999999999 mm", /longer than 100 m/],
+    ["1,500 mm", /^“1,500” could be 1500 or 1.500/],
+    ["2' 1,125", /could be 1125 or 1.125/],
+    ["1,500", /leave the comma out/],
+    ["1.2.3", /is not a length/],
+    ["--2", /is not a length/],
+    ["26 1/2 mm", /is not a number of mm/],
   ])("says what is wrong with %j", (text, words) => expect(fault(text)).toMatch(words));
   it("never throws, whatever is typed", () => {
     fc.assert(
@@ -122,6 +150,21 @@ describe("formatting", () => {
     expect(formatFeet(inches(216))).toBe("18 ft");
     expect(formatFeet(inches(11.5), 2)).toBe("11 1/2 in");
     expect(formatFeet(inches(14.5), 2)).toBe("1 ft 2 1/2 in");
+  });
+  it("writes centimetres", () => {
+    expect(formatCentimetres(inches(26.5))).toBe("67.3 cm");
+    expect(formatCentimetres(mm(-0.4))).toBe("0.0 cm");
+    expect(formatCentimetres(mm(12.25), 2, "to-even")).toBe("1.22 cm");
+  });
+  it("rounds halves of decimals by the rule, whatever the machine makes of them", () => {
+    expect(formatDecimalInches(inches(0.375))).toBe("0.38");
+    expect(formatDecimalInches(inches(26.125))).toBe("26.13");
+    expect(formatDecimalInches(inches(26.125), 2, "to-even")).toBe("26.12");
+    expect(formatDecimalInches(inches(-26.125), 2, "to-even")).toBe("−26.12");
+    expect(formatMillimetres(mm(12.65), 1)).toBe("12.7 mm");
+    expect(formatMillimetres(mm(12.65), 1, "to-even")).toBe("12.6 mm");
+    expect(formatFeet(inches(30.5), 1)).toBe("2 ft 7 in");
+    expect(formatFeet(inches(30.5), 1, "to-even")).toBe("2 ft 6 in");
   });
   it("follows the person's unit", () => {
     expect(formatLength(inches(26.5), "in")).toBe("26 1/2 in");

@@ -1,7 +1,9 @@
 import { type LengthUnit, type Millimetres, toInches } from "./millimetres";
+import { decimals, nearestStep, type Ties, USUAL_TIES } from "./rounding";
 
 export { inches, type LengthUnit, type Millimetres, MM_PER_INCH, mm, toInches } from "./millimetres";
 export { parseLength } from "./parse-length";
+export { nearestWhole, roundToStep, type Ties } from "./rounding";
 
 const INCHES_PER_FOOT = 12;
 
@@ -11,36 +13,14 @@ export type InchParts = { sign: "" | "−"; whole: number; numerator: number; de
 const gcd = (a: number, b: number): number => (b === 0 ? a : gcd(b, a % b));
 
 /**
- * What becomes of a length that lies half way between two marks of the tape. `away-from-zero` is what people do at the
- * tape (common practice, no source) and the default; `to-even` is rule A of ISO 80000-1 and of ASTM E29 (from memory).
- */
-export type Ties = "away-from-zero" | "to-even";
-
-/**
- * The nearest whole number, by a rule for what lies half way.
- * @param value 0 or more
- * @example nearestWhole(2.5, "to-even") // 2
- */
-export function nearestWhole(value: number, ties: Ties = "away-from-zero"): number {
-  const below = Math.floor(value);
-  if (value - below !== 0.5 || ties === "away-from-zero") return Math.round(value);
-  return below % 2 === 0 ? below : below + 1;
-}
-
-/**
  * A length as whole inches and a reduced fraction, to the nearest 1/denominator.
  * @param length millimetres
  * @param ties what lies half way goes away from zero unless told
  * @returns numerator 0 (and denominator 1) when there is no fraction; no sign on zero
  * @example inchParts(inches(12.53125), 16) // 12 9/16; to even: 12 1/2
  */
-export function inchParts(
-  length: Millimetres,
-  denominator: number = 16,
-  ties: Ties = "away-from-zero",
-): InchParts {
-  // Six decimals of an inch are far below any tape; without them 1/64 stored as a decimal could fall just short of a half.
-  const steps = nearestWhole(Number((Math.abs(toInches(length)) * denominator).toFixed(6)), ties);
+export function inchParts(length: Millimetres, denominator: number = 16, ties: Ties = USUAL_TIES): InchParts {
+  const steps = nearestStep(Math.abs(toInches(length)) * denominator, ties);
   const whole = Math.floor(steps / denominator);
   const over = steps - whole * denominator;
   const common = over === 0 ? denominator : gcd(over, denominator);
@@ -65,9 +45,12 @@ export function formatInches(
   return `${sign || plus}${size}`;
 }
 
-/** "19 ft 2 in", "18 ft", "11 1/2 in" under a foot; to the nearest inch unless a denominator is given. */
-export function formatFeet(length: Millimetres, denominator: number = 1): string {
-  const parts = inchParts(length, denominator);
+/**
+ * "19 ft 2 in", "18 ft", "11 1/2 in" under a foot; to the nearest inch unless a denominator is given.
+ * @example formatFeet(inches(14.5), 2) // "1 ft 2 1/2 in"
+ */
+export function formatFeet(length: Millimetres, denominator: number = 1, ties: Ties = USUAL_TIES): string {
+  const parts = inchParts(length, denominator, ties);
   const feet = Math.floor(parts.whole / INCHES_PER_FOOT);
   const rest = parts.whole - feet * INCHES_PER_FOOT;
   const fraction = parts.numerator === 0 ? "" : `${parts.numerator}/${parts.denominator}`;
@@ -80,16 +63,32 @@ export function formatFeet(length: Millimetres, denominator: number = 1): string
     : `${parts.sign}${feet} ft ${inchesPart} in`;
 }
 
-/** "673 mm", "12.7 mm" with one decimal. */
-export function formatMillimetres(length: Millimetres, decimals = 0): string {
-  const size = Math.abs(length).toFixed(decimals);
-  return `${length < 0 && Number(size) !== 0 ? "−" : ""}${size} mm`;
+/**
+ * "673 mm", "12.7 mm" with one decimal; halves away from zero unless told.
+ * @example formatMillimetres(mm(12.65), 1) // "12.7 mm"; to even "12.6 mm"
+ */
+export function formatMillimetres(length: Millimetres, places = 0, ties: Ties = USUAL_TIES): string {
+  const { sign, size } = decimals(length, places, ties);
+  return `${sign}${size} mm`;
 }
 
-/** "46.50": inches with a fixed number of decimals, without the unit; a true minus sign. */
-export function formatDecimalInches(length: Millimetres, places = 2): string {
-  const size = Math.abs(toInches(length)).toFixed(places);
-  return `${length < 0 && Number(size) !== 0 ? "−" : ""}${size}`;
+/**
+ * "67.3 cm": one decimal, a millimetre, unless told; halves away from zero unless told.
+ * @example formatCentimetres(inches(26.5)) // "67.3 cm"
+ */
+export function formatCentimetres(length: Millimetres, places = 1, ties: Ties = USUAL_TIES): string {
+  const { sign, size } = decimals(length / 10, places, ties);
+  return `${sign}${size} cm`;
+}
+
+/**
+ * "46.50": inches with a fixed number of decimals, without the unit; a true minus sign; halves away from zero unless
+ * told.
+ * @example formatDecimalInches(inches(26.125)) // "26.13"; to even "26.12"
+ */
+export function formatDecimalInches(length: Millimetres, places = 2, ties: Ties = USUAL_TIES): string {
+  const { sign, size } = decimals(toInches(length), places, ties);
+  return `${sign}${size}`;
 }
 
 /** A length in a person's unit, with it: "26 1/2 in" or "673 mm". */

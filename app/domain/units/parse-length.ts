@@ -15,6 +15,12 @@ const VULGAR: Record<string, string> = {
   "⅞": "7/8",
   "⅓": "1/3",
   "⅔": "2/3",
+  "⅕": "1/5",
+  "⅖": "2/5",
+  "⅗": "3/5",
+  "⅘": "4/5",
+  "⅙": "1/6",
+  "⅚": "5/6",
 };
 
 const METRIC: Record<string, number> = { mm: 1, cm: 10, m: 1000 };
@@ -23,7 +29,7 @@ const METRIC: Record<string, number> = { mm: 1, cm: 10, m: 1000 };
 function plain(text: string): string {
   return text
     .normalize("NFC")
-    .replace(/[½¼¾⅛⅜⅝⅞⅓⅔]/g, (sign) => ` ${VULGAR[sign]} `)
+    .replace(/[½¼¾⅛⅜⅝⅞⅓⅔⅕⅖⅗⅘⅙⅚]/g, (sign) => ` ${VULGAR[sign]} `)
     .replace(/[\u2044\u2215]/g, "/")
     .replace(/[′’‘]/g, "'")
     .replace(/''|[″”“]/g, '"')
@@ -50,14 +56,30 @@ function mixed(text: string): Outcome<number> {
       return problem(`${numerator}/${denominator} is an inch or more: read the tape again.`);
     return ok(Number(whole) + Number(numerator) / Number(denominator));
   }
+  if (/\/\s*-/.test(cleaned)) return problem(`“${cleaned}”: a minus goes in front of the whole length.`);
   if (cleaned.includes("/")) return problem(`“${cleaned}” is not a fraction as on the tape, ${EXAMPLE}.`);
+  if (/^[\d.,]+ [\d.,]+$/.test(cleaned))
+    return problem(`“${cleaned}” is not a length: two numbers, and no fraction, ${EXAMPLE}.`);
   const value = decimal(cleaned);
   return value === null
     ? problem(`“${cleaned}” is not a length: type it as on the tape, ${EXAMPLE}.`)
     : ok(value);
 }
 
+/** One, two or three figures, a comma and three more: thousands to one person, thousandths to another. */
+const EITHER_WAY = /(?:^|[^\d.,])([1-9]\d{0,2},\d{3})(?![\d])/;
+
+/** What cannot be told from the text alone, in a sentence. */
+function doubt(text: string): string | null {
+  const figure = EITHER_WAY.exec(text)?.[1];
+  if (figure === undefined) return null;
+  const [whole, point] = [figure.replace(",", ""), figure.replace(",", ".")];
+  return `“${figure}” could be ${whole} or ${point}: leave the comma out, or type a point.`;
+}
+
 function imperial(text: string): Outcome<Millimetres> {
+  if (/\/.*(?:'|ft|feet|foot)/.test(text))
+    return problem(`“${text}” has a fraction of a foot: type feet and inches, for example 2' 6.`);
   const feet = /^([\d.,]+)\s*(?:'|ft\.?|feet|foot)\s*(.*)$/.exec(text);
   if (!feet) {
     const value = mixed(text.replace(/\s*(?:"|in\.?|inch|inches)$/, ""));
@@ -85,12 +107,16 @@ function imperial(text: string): Outcome<Millimetres> {
  * with typographic fractions, primes and dashes, and a minus in front.
  * @param text the entry as typed
  * @param bareUnit what a number without a unit means
- * @returns millimetres, or what is wrong with the entry in a sentence
+ * @returns millimetres, or what is wrong with the entry in a sentence; a figure such as 1,500 is refused, which is a
+ * thousand and a half to one person and one and a half to another
+ * @example parseLength("2' 2 1/2", "in") // 673.1 mm
  */
 export function parseLength(text: string, bareUnit: LengthUnit): Outcome<Millimetres> {
   let rest = plain(text);
   if (rest === "") return problem(`Type the length as on the tape, ${EXAMPLE}.`);
   if (rest.length > 30) return problem("That is too long for a length.");
+  const doubtful = doubt(rest);
+  if (doubtful) return problem(doubtful);
   const negative = rest.startsWith("-");
   if (negative) rest = rest.slice(1).trim();
   const metric = /^(.*?)\s*(mm|cm|m)$/.exec(rest);

@@ -7,8 +7,9 @@ import { formatDegrees } from "../../../domain/units/angle";
 import { formatDecimalInches, mm } from "../../../domain/units/length";
 import { type Box, type Label, placeLabels } from "./labels";
 import { axleEnds, dropLabel, ELLIPSE_DRAWN, ellipseFor, frameBox, optionOf, standing } from "./plan-figures";
+import { Dimension, HALO, path, ScaleBar, type To } from "./plan-measures";
 import { Tapes } from "./plan-tapes";
-import { barLength, type Scale, type Size, type Spot, spotAt } from "./viewport";
+import { type Scale, type Size, type Spot, spotAt } from "./viewport";
 
 export type PlanProps = {
   view: LayoutView;
@@ -19,15 +20,6 @@ export type PlanProps = {
   optionKey: string | null;
   compact: boolean;
 };
-
-const HALO = {
-  paintOrder: "stroke",
-  stroke: "var(--concrete-100)",
-  strokeWidth: 5,
-  strokeLinejoin: "round",
-} as const;
-const path = (spots: readonly Spot[]) =>
-  spots.map((spot, i) => `${i === 0 ? "M" : "L"}${spot.x.toFixed(1)} ${spot.y.toFixed(1)}`).join("");
 
 /** The plan itself, at one scale; no state. Also drawn on the layout sheet. */
 export function PlanDrawing(props: PlanProps) {
@@ -56,8 +48,6 @@ export function PlanDrawing(props: PlanProps) {
     </svg>
   );
 }
-
-type To = (point: { x: number; y: number }) => Spot;
 
 /** Saw-cut joints, four feet apart: the floor's own grid. */
 function Joints({ scale, size }: { scale: Scale; size: Size }) {
@@ -340,71 +330,6 @@ function Drops({ view, to, size, scale, inHand }: PlanProps & { to: To }) {
           {label.text}
         </text>
       ))}
-    </g>
-  );
-}
-
-/** From the rear datum pair to the axle line, along the frame. */
-function Dimension({ view, to, optionKey }: { view: LayoutView; to: To; optionKey: string | null }) {
-  const station = optionOf(view, optionKey)?.axleStation ?? view.axle?.line.station;
-  const foot = standing(view, "datum-rear", "right");
-  if (!view.frame || station === undefined || !foot) return null;
-  const { frame } = view;
-  const offset = toFrame(frame, foot).offset - 330;
-  const [from, till] = [
-    to(toFloor(frame, framePoint(0, offset))),
-    to(toFloor(frame, framePoint(station, offset))),
-  ];
-  const [foot0, footS] = [to(foot), to(toFloor(frame, framePoint(station, offset + 330)))];
-  const middle = { x: (from.x + till.x) / 2, y: (from.y + till.y) / 2 };
-  return (
-    <g stroke="var(--ink)" fill="none">
-      <path
-        d={`${path([foot0, { x: from.x, y: from.y + 6 }])}${path([footS, { x: till.x, y: till.y + 6 }])}`}
-        strokeWidth=".9"
-      />
-      <path d={path([from, till])} strokeWidth="1.1" />
-      <path d={`M${from.x - 5} ${from.y + 5}l10 -10M${till.x - 5} ${till.y + 5}l10 -10`} strokeWidth="1.6" />
-      <text
-        x={middle.x}
-        y={middle.y + 7}
-        textAnchor="middle"
-        fontSize="21"
-        fontWeight="700"
-        fill="var(--ink)"
-        style={{ fontFamily: "var(--font)" }}
-        {...HALO}
-        strokeWidth={9}
-      >
-        {formatDecimalInches(mm(station))}
-      </text>
-    </g>
-  );
-}
-
-function ScaleBar({ view, scale }: { view: LayoutView; scale: Scale }) {
-  const inches = view.unit === "in";
-  const length = barLength(
-    inches ? [25.4, 76.2, 152.4, 304.8, 609.6, 1219.2] : [10, 50, 100, 200, 500, 1000],
-    scale.k,
-    130,
-  );
-  const width = length * scale.k;
-  const words = inches ? `${Math.round(length / 25.4)} in` : `${length} mm`;
-  return (
-    <g>
-      <text x="12" y="20" fontSize="14" fontWeight="500" fill="var(--concrete-700)" {...HALO}>
-        ellipses drawn {ELLIPSE_DRAWN} times, k = 2 · nose →
-      </text>
-      <path
-        d={`M12 36h${width}M12 31v10M${12 + width} 31v10`}
-        stroke="var(--ink)"
-        strokeWidth="1.5"
-        fill="none"
-      />
-      <text x={20 + width} y="41" fontSize="14" fontWeight="600" {...HALO}>
-        {words}
-      </text>
     </g>
   );
 }
