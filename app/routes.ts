@@ -26,6 +26,8 @@ export default [
 
   route("layouts/:layoutId", "routes/layouts/layout.tsx"),
   route("layouts/:layoutId/step/:step", "routes/layouts/step.tsx"),
+  route("layouts/:layoutId/history", "routes/layouts/history.tsx"),
+  route("layouts/:layoutId/readings.csv", "routes/layouts/readings.ts"),
   route("layouts/:layoutId/sheet", "routes/layouts/sheet.tsx"),
   route("layouts/:layoutId/stands", "routes/resources/layout/stands.ts"),
   route("layouts/:layoutId/level", "routes/resources/layout/level.ts"),

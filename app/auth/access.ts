@@ -34,6 +34,8 @@ export const ACCESS: readonly { path: string; GET?: Need; POST?: Need }[] = [
 
   { path: "/layouts/:layoutId", GET: "layouts:see" },
   { path: "/layouts/:layoutId/step/:step", GET: "layouts:see" },
+  { path: "/layouts/:layoutId/history", GET: "layouts:see" },
+  { path: "/layouts/:layoutId/readings.csv", GET: "layouts:see" },
   { path: "/layouts/:layoutId/sheet", GET: "layouts:see" },
   { path: "/layouts/:layoutId/stands", POST: "layouts:measure" },
   { path: "/layouts/:layoutId/level", POST: "layouts:measure" },

@@ -174,6 +174,13 @@ const PAGES: PageCase[] = [
     says: /revision 1/,
   },
   {
+    name: "history",
+    who: "foreman",
+    path: async (demo) => `/layouts/${await demo.layout("Sunday")}/history`,
+    sizes: [DESK, PHONE],
+    says: /Approved: axle line/,
+  },
+  {
     name: "springs",
     who: "foreman",
     path: () => "/springs",

@@ -4,6 +4,7 @@ import { contextFor, makeBuild, makeTestShop, type TestPerson, type TestShop } f
 import { testDatabase } from "#tests/setup/database";
 import { type Db, schema } from "~/db/client.server";
 import { readBoard } from "~/db/queries/board.server";
+import { readLayoutHistory, readLayoutReadings } from "~/db/queries/layout-history.server";
 import { floorPoint, framePoint } from "~/domain/geometry/point";
 import type { DropPointId, DropSide } from "~/domain/layout/drops";
 import { frameFromDatums, toFloor } from "~/domain/layout/frame";
@@ -669,5 +670,22 @@ describe("the second look", () => {
     await keepDrop(tech(), layoutId, onFrame("hanger-hole", "left", 70.6, 15.5, { reason: "bob swung" }));
     await chooseOption(foreman(), layoutId, optionOf("centred", 1));
     expect((await view()).secondLook.items.map((item) => item.state)).toEqual(["to-do", "agrees"]);
+  });
+});
+
+describe("the history", () => {
+  it("holds every reading as typed, also those that were superseded, and who took it", async () => {
+    await toMarks();
+    await drop("opening-front", "left", "82 3/8", "30 1/4");
+    await drop("opening-front", "left", "82 1/2", "30 1/4", { reason: "bob swung" });
+    const rows = await readLayoutReadings(db, layoutId);
+    expect(rows.filter((row) => row.what === "level")).toHaveLength(4);
+    const [old, now] = rows.filter((row) => row.what === "drop");
+    expect(old).toMatchObject({ typed: "82 3/8, 30 1/4", by: "Tess Tech", supersededAt: expect.any(String) });
+    expect(now).toMatchObject({ typed: "82 1/2, 30 1/4", reason: "bob swung", supersededAt: null });
+    const lines = await readLayoutHistory(db, shop.shopId, layoutId);
+    expect(lines[0]).toMatchObject({ verb: "keep-drop", by: "Tess Tech" });
+    expect(lines.map((line) => line.verb)).toContain("check-level");
+    expect(await readLayoutHistory(db, shop.shopId + 1_000_000, layoutId)).toEqual([]);
   });
 });

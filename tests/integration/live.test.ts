@@ -158,7 +158,8 @@ describe("the live channel", () => {
     const other = await makeTestShop(db);
     const here = open({ cookie: await cookieFor(db, shop.people.tech) });
     const there = open({ cookie: await cookieFor(db, other.people.tech) });
-    await Promise.all([outcome(here), outcome(there)]);
+    // With its first beat a screen is in its room and the server knows what it has sent: from here on changes are patches.
+    await Promise.all([here, there].map((socket) => new Promise((resolve) => socket.once("beat", resolve))));
     const heardThere: string[] = [];
     there.on("patch", (patch: BoardPatch) => heardThere.push(JSON.stringify(patch)));
     const made = await build({ nickname: "Only here" });

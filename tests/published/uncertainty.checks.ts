@@ -5,6 +5,8 @@ import { correlation, fromHalfWidth, repeated } from "../../app/domain/uncertain
 import { covarianceOf } from "../../app/domain/uncertainty/several";
 import { coverageFactor } from "../../app/domain/uncertainty/student";
 import type { Source, Topic } from "./check";
+import { LABORATORY } from "./laboratory-checks";
+import { STUDENT } from "./student-checks";
 
 const of = <T>(came: Outcome<T>): T => {
   if (!came.ok) throw new Error(came.problem);
@@ -78,18 +80,11 @@ const X = () => together((v, i, phi) => (v * Math.sin(phi)) / i);
 const Z = () => together((v, i) => v / i);
 const r = (a: Uncertain, b: Uncertain) => covarianceOf(a, b, rs()).correlation ?? Number.NaN;
 
-const TABLE_G2: Source = { name: "JCGM 100:2008", place: "table G.2", status: "from memory" };
-const t = (coverage: number, freedom: number, want: number, within: number) => ({
-  about: `t for ${coverage * 100} % and ${freedom} degrees of freedom`,
-  source: TABLE_G2,
-  got: () => coverageFactor(coverage, freedom),
-  want,
-  within,
-});
-
 export default {
   topic: "Measurement uncertainty",
   checks: [
+    ...LABORATORY,
+    ...STUDENT,
     {
       about: "end gauge: u of the difference, nm",
       source: H1,
@@ -274,11 +269,6 @@ export default {
       want: 0.009021,
       within: 5e-7,
     },
-    t(0.95, 4, 2.78, 0.005),
-    t(0.95, 10, 2.23, 0.005),
-    t(0.95, 16, 2.12, 0.005),
-    t(0.99, 16, 2.92, 0.005),
-    t(0.95, Number.POSITIVE_INFINITY, 1.96, 0.0005),
     {
       about: "two-sided limits of the normal law at 5, 1, 0.5 and 0.1 %",
       source: { name: "Normal law", place: "tables of it", status: "recomputed" },

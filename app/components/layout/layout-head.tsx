@@ -1,3 +1,4 @@
+import { Link } from "react-router";
 import { VEHICLE_KIND } from "../../domain/builds/vehicle-kinds";
 import { isWelded } from "../../domain/layout/steps";
 import type { LayoutView } from "../../domain/layout/view";
@@ -33,7 +34,10 @@ export function LayoutHead({ view, person, now, live, outbox }: Props) {
           </span>
         </h1>
         <p className="truncate font-label text-[15px] text-concrete-700">
-          Front end, fixed eye {fixedEye} · {person}
+          Front end, fixed eye {fixedEye} · {person} ·{" "}
+          <Link className="text-line underline" to={`/layouts/${view.id}/history`}>
+            History
+          </Link>
         </p>
       </div>
       <div className="layout-facts">
