@@ -1,4 +1,5 @@
 import { z } from "zod";
+import { jointsOf, shackleOf } from "../domain/layout/option-detail";
 import { reasonsAgainst } from "../domain/layout/option-limits";
 import { alikeTo } from "../domain/layout/option-order";
 import { optionSearch } from "../domain/layout/option-search";
@@ -19,6 +20,13 @@ const point = (words: string) =>
       station: station("Ahead positive."),
       offset: station("To the left positive."),
       height: station("Over the ground."),
+    })
+    .describe(words);
+const shaft = (words: string) =>
+  z
+    .strictObject({
+      plan: z.number().gt(-80).lt(80).default(0).describe("In plan, degrees, to the left positive."),
+      side: z.number().gt(-80).lt(80).describe("From the side, degrees, up positive."),
     })
     .describe(words);
 const edge = (words: string) =>
@@ -128,9 +136,30 @@ const input = z.strictObject({
     .optional()
     .describe("For the change of the drag link."),
   propshaft: z
-    .strictObject({ box: point("Joint at the gearbox."), axle: point("Joint at the axle, axle as it was.") })
+    .strictObject({
+      box: point("Joint at the gearbox."),
+      axle: point("Joint at the axle, axle as it was."),
+      output: shaft("How the gearbox's shaft points, taken ahead; for the joints' angles.").optional(),
+      pinion: shaft("How the pinion points, likewise.").optional(),
+    })
     .optional()
     .describe("For length and slip of the propshaft."),
+  shackle: z
+    .strictObject({
+      length: size("Centre to centre."),
+      load: z
+        .enum(["compression", "tension"])
+        .default("compression")
+        .describe("Compression: hanger above the moving eye. Tension: below it."),
+      angle: z
+        .number()
+        .gt(0)
+        .lt(180)
+        .optional()
+        .describe("Wanted at ride height, degrees; square unless told."),
+    })
+    .optional()
+    .describe("For the second hanger; needs the springs' arch."),
   limits: limitFields.default({}),
   sigma: z
     .strictObject({
@@ -173,6 +202,28 @@ const output = z.object({
         dragLinkChange: maybe("New length less the old."),
         propshaftRide: maybe("Propshaft at ride height, joint to joint."),
         propshaftSlip: maybe("Longest less shortest over droop, ride and full compression."),
+        joints: z
+          .object({
+            first: z.number().describe("At the gearbox."),
+            second: z.number().describe("At the axle."),
+          })
+          .nullable()
+          .describe("Joint angles at ride height, degrees. Null: not asked for."),
+        shackle: z
+          .object({
+            hanger: z
+              .object({
+                station: z.number().describe("Ahead of the rear datum pair."),
+                height: z.number().describe("Over the fixed eye."),
+              })
+              .describe("Pivot of the second hanger."),
+            droop: maybe("Shackle angle hanging, degrees."),
+            ride: maybe("At ride height."),
+            flat: maybe("With the spring flat."),
+            warnings: z.array(z.string()).describe("What to beware of."),
+          })
+          .nullable()
+          .describe("Null: no shackle or no arch given."),
         reasons: z.array(z.string()).describe("Why it does not stand; none when it does."),
         alike: z
           .array(z.number())
@@ -239,6 +290,8 @@ function optionOut(search: OptionSearch, columns: OptionColumns, i: number, show
     dragLinkChange: known(columns.dragLinkChange),
     propshaftRide: known(columns.propshaftRide),
     propshaftSlip: known(columns.propshaftSlip),
+    joints: jointsOf(search, columns, i),
+    shackle: shackleOf(search, columns, i),
     reasons: reasonsAgainst(search, columns, i, "mm"),
     alike: alikeTo(columns, i).flatMap((other) => {
       const place = shown.indexOf(other);

@@ -4,6 +4,7 @@ import { leafTravel, sidePoint } from "../springs/leaf-travel";
 import { leafOf } from "../springs/main-leaf";
 import { degrees, toRadians } from "../units/angle";
 import { inches, mm, toInches } from "../units/length";
+import { jointsOf, shackleOf } from "./option-detail";
 import { Rejection, reasonsAgainst } from "./option-limits";
 import { alikeTo } from "./option-order";
 import { optionSearch } from "./option-search";
@@ -239,4 +240,35 @@ describe("what hangs on the axle", () => {
     expect(toInches(mm(columns.propshaftRide[0] ?? 0))).toBeCloseTo(Math.hypot(40 + moved, 4), 9);
     expect(columns.propshaftSlip[0]).toBeGreaterThan(0);
   });
+});
+
+describe("what an option asks of shackle and joints", () => {
+  const search: OptionSearch = {
+    ...travelling,
+    shackle: { length: inches(4), load: "compression" },
+    propshaft: {
+      box: { station: inches(0), offset: inches(0), height: inches(20) },
+      axle: { station: inches(40), offset: inches(0), height: inches(20) },
+      output: { plan: degrees(0), side: degrees(3) },
+      pinion: { plan: degrees(0), side: degrees(-2) },
+    },
+  };
+  it("places the second hanger so that the shackle is square at ride height, in every hole alike", () => {
+    const columns = optionSearch(search);
+    const [first, second] = [0, 1].map((i) => shackleOf(search, columns, i));
+    expect(first?.ride).toBeCloseTo(90, 9);
+    expect(first?.droop).not.toBeNull();
+    const apart = (second?.hanger.station ?? 0) - (first?.hanger.station ?? 0);
+    expect(apart).toBeCloseTo(inches(1), 6);
+    expect(second?.ride).toBeCloseTo(first?.ride ?? 0, 9);
+  });
+  it("gives both joints' angles where the shafts' directions are known", () => {
+    const columns = optionSearch(search);
+    // The shaft lies level: each joint works at its own shaft's slope.
+    expect(jointsOf(search, columns, 0)?.first).toBeCloseTo(3, 9);
+    expect(jointsOf(search, columns, 0)?.second).toBeCloseTo(2, 9);
+    expect(jointsOf(travelling, columns, 0)).toBeNull();
+  });
+  it("says nothing of a shackle where the arch is not known", () =>
+    expect(shackleOf({ ...measured, shackle: search.shackle }, table(), 0)).toBeNull());
 });

@@ -1,5 +1,7 @@
+import type { ShaftAngles } from "../driveline/joint";
 import type { FixedEye, LeafSpring } from "../springs/leaf-spring";
 import type { BothEnds, MainLeaf } from "../springs/main-leaf";
+import type { ShackleLoad } from "../springs/shackle";
 import type { Degrees } from "../units/angle";
 import type { Millimetres } from "../units/length";
 import type { LowPoint } from "./approach";
@@ -62,7 +64,25 @@ export type OptionSearch = {
   /** The steering box's ball, and the axle's ball with the axle where it was. */
   dragLink?: { box: SpacePoint; axle: SpacePoint } | undefined;
   /** The joint at the gearbox, and the one at the axle with the axle where it was, at ride height. */
-  propshaft?: { box: SpacePoint; axle: SpacePoint } | undefined;
+  propshaft?:
+    | {
+        box: SpacePoint;
+        axle: SpacePoint;
+        /** How the gearbox's shaft and the pinion point, taken ahead; for the joints' angles. */
+        output?: ShaftAngles | undefined;
+        pinion?: ShaftAngles | undefined;
+      }
+    | undefined;
+  /** For the second hanger: where it goes so that the shackle has its angle at ride height. */
+  shackle?:
+    | {
+        length: Millimetres;
+        load: ShackleLoad;
+        /** Square to the line of the eyes unless told. */
+        angle?: Degrees | undefined;
+        movingEyeHigher?: Millimetres | undefined;
+      }
+    | undefined;
   limits?: Limits | undefined;
   /** Standard uncertainties: of a hole's station, of a half measured flat, of the arch at ride. */
   sigma: { hole: Millimetres; half: Millimetres; arch?: Millimetres | undefined };
