@@ -364,8 +364,11 @@ describe("the torque list and the finish", () => {
     await expect(sign("alignment", { "figure.toe": "wide" }, tech())).rejects.toMatchObject({
       fields: { "figure.toe": expect.any(String) },
     });
-    await sign("alignment", { "figure.toe": "0.12", "figure.camber-left": "-0.5" }, tech());
-    await sign("alignment", { "figure.toe": "0.12", "figure.camber-left": "-0.5" }, tech());
+    // A clock that goes on at every look: the figures belong to their line all the same.
+    let ticks = Date.now();
+    const ticking = contextFor(db, shop.people.tech, { now: () => new Date(ticks++) });
+    await sign("alignment", { "figure.toe": "0.12", "figure.camber-left": "-0.5" }, ticking);
+    await sign("alignment", { "figure.toe": "0.12", "figure.camber-left": "-0.5" }, ticking);
     expect((await view()).work.signed.alignment).toHaveLength(1);
     await sign("road-test", {}, tech());
     await sign("re-torque", {}, tech());

@@ -56,6 +56,8 @@ export async function signWork(
     const before = work.items.filter(({ item }) => item.item === line.id).at(-1) ?? null;
     if (before && isSame(before, work.items, actor.personId, entry)) return { words: "Signed already." };
 
+    // One moment for the line and its figures: that is how they are found together again.
+    const signedAt = ctx.now();
     await tx.insert(workItems).values(
       rowsOf(line, entry).map((row, position) => ({
         ...row,
@@ -66,7 +68,7 @@ export async function signWork(
         dueAt: line.kind === "bolt" && entry.state === "pass" ? dueAt : null,
         signedBy: actor.personId,
         deviceId: actor.deviceId,
-        signedAt: ctx.now(),
+        signedAt,
         position,
       })),
     );
