@@ -55,6 +55,13 @@ describe("adjustDistances", () => {
         return found !== undefined && lengthOf(found, point) < 1e-4;
       }),
     ));
+  it("settles where the last digits make the fit look worse", () => {
+    const base = network(FLOOR, at("P", 1400, 900), [0, 0, 0, 0, -0.1862328320288498]);
+    const shifted = ({ name, at: [x = mm(0), y = mm(0)] }: NamedPoint) => at(name, x + 700, y - 90);
+    const input = { ...base, fixed: base.fixed.map(shifted), unknown: base.unknown.map(shifted) };
+    const found = must(input).points[0];
+    expect(found && lengthOf(found, at("P", 2100, 810))).toBeLessThan(0.2);
+  });
   it("gives redundancy numbers that add up, and moves with the marks", () =>
     fc.assert(
       fc.property(

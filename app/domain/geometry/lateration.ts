@@ -43,6 +43,8 @@ export type AdjustedNetwork = {
 const ROUNDS = 200;
 /** A step below this (mm) ends it. */
 const SETTLED = 1e-7;
+/** A step below this (mm) is taken whole: a fit that looks worse by it does so by the last digits only. */
+const SURE_STEP = 1e-3;
 /** A step is halved at most so often. */
 const HALVINGS = 30;
 
@@ -134,6 +136,7 @@ const misfit = (network: DistanceNetwork, places: Places): number =>
 
 /** One step on, halved while it makes the fit worse. */
 function stepped(network: DistanceNetwork, places: Places, solution: readonly number[]): Places {
+  if (Math.hypot(...solution) < SURE_STEP) return movedBy(network, places, solution);
   const before = misfit(network, places);
   let share = 1;
   for (let halving = 0; ; halving++) {
